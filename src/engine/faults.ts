@@ -1,0 +1,47 @@
+/** All that the engine can refuse, with the facts that a message needs. Knows no HTTP. */
+
+export type FaultCode =
+  | 'wrong-dimension'
+  | 'unknown-unit'
+  | 'not-a-number'
+  | 'unknown-method'
+  | 'method-not-applicable'
+  | 'missing-parameter'
+  | 'no-layer'
+  | 'missing-thickness'
+  | 'pile-below-known-ground'
+  | 'toe-in-uncovered-soil'
+  | 'section-impossible'
+  | 'piles-overlap'
+  | 'too-many-piles'
+  | 'unknown-reference'
+  | 'duplicate-mark'
+  | 'missing-combination'
+  | 'missing-load'
+  | 'limit-state-mismatch'
+  | 'line-cannot-take-moment'
+  | 'no-design-basis-support'
+  | 'wrong-load-components'
+  | 'not-finite'
+
+/** One fault: where (JSON Pointer into the request), what, and the numbers as data. */
+export type Fault = {
+  readonly pointer: string
+  readonly code: FaultCode
+  readonly facts: Readonly<Record<string, string | number | readonly string[]>>
+}
+
+/** Thrown by the engine; carries every fault that was found together. */
+export class EngineFault extends Error {
+  readonly faults: readonly Fault[]
+  constructor(faults: readonly Fault[]) {
+    super(faults.map((f) => `${f.code} at ${f.pointer || '/'}`).join('; '))
+    this.name = 'EngineFault'
+    this.faults = faults
+  }
+}
+
+/** Refuses with a single fault. */
+export function refuse(code: FaultCode, pointer: string, facts: Fault['facts'] = {}): never {
+  throw new EngineFault([{ code, pointer, facts }])
+}

@@ -1,0 +1,24 @@
+/** Pile positions under one cap, in m from the cap's origin. */
+export type Point = { readonly x: number; readonly y: number }
+export type Layout =
+  | { readonly kind: 'grid'; readonly columns: number; readonly rows: number; readonly spacing?: number; readonly spacingX?: number; readonly spacingY?: number }
+  | { readonly kind: 'ring'; readonly count: number; readonly radius: number }
+  | { readonly kind: 'points'; readonly points: readonly Point[] }
+
+/** Positions in the layout's order: a grid runs along x first and is centred; a ring starts on the +x axis and turns towards +y. */
+export function positions(layout: Layout): readonly Point[] {
+  if (layout.kind === 'points') return layout.points
+  if (layout.kind === 'ring') {
+    return Array.from({ length: layout.count }, (_, i) => {
+      const angle = (2 * Math.PI * i) / layout.count
+      return { x: layout.radius * Math.cos(angle), y: layout.radius * Math.sin(angle) }
+    })
+  }
+  const { columns, rows } = layout
+  const dx = layout.spacingX ?? layout.spacing ?? 0
+  const dy = layout.spacingY ?? layout.spacing ?? 0
+  return Array.from({ length: columns * rows }, (_, i) => ({
+    x: ((i % columns) - (columns - 1) / 2) * dx,
+    y: (Math.floor(i / columns) - (rows - 1) / 2) * dy,
+  }))
+}

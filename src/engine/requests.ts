@@ -1,0 +1,23 @@
+import type { DesignBasis } from './design-basis/design-basis.ts'
+import type { GroundProfile } from './ground/profile-types.ts'
+import type { MethodChoices } from './methods/method-choice.ts'
+import type { Layout } from './piles/layout.ts'
+import type { PileType } from './piles/pile-type.ts'
+
+/** Requests of the calculators. */
+export type SinglePileRequest = {
+  readonly pile: PileType
+  readonly ground: GroundProfile
+  readonly direction?: 'compression' | 'uplift'
+  readonly methods?: MethodChoices
+  readonly designBasis?: DesignBasis
+}
+export type GroupRequest = SinglePileRequest & { readonly layout: Layout }
+export type SettlementRequest = {
+  readonly pile: PileType
+  readonly ground: GroundProfile
+  readonly layout?: Layout
+  readonly load: { readonly V: number; readonly Mx?: number; readonly My?: number }
+  readonly cap?: 'rigid' | 'flexible'
+  readonly method?: 'randolph-wroth-1978'
+}

@@ -1,0 +1,171 @@
+import { refuse } from '../faults.ts'
+import type { UnitCode } from '../quantities/units.ts'
+import { quantityKind } from '../quantities/quantity-kind.ts'
+import type { Citation } from '../sources/source.ts'
+import type { Formula, TermsOf } from './formula.ts'
+import type { OperandLine, RangeLine, Step } from './step.ts'
+import type { Term } from './term.ts'
+
+export type Labelled<U extends UnitCode> = { readonly symbol: string; readonly name: string; readonly unit: U }
+export type Solution<U extends UnitCode> = Labelled<U> & {
+  readonly value: number
+  readonly method: string
+  readonly operands: readonly Term[]
+  readonly unknowns: readonly { readonly symbol: string; readonly value: number; readonly unit: UnitCode }[]
+  readonly residuals: readonly { readonly name: string; readonly value: number }[]
+  readonly tolerance: number
+  readonly source: Citation
+}
+
+/** What all recorders of one computation share: the steps and their ids. Absent on a silent sheet. */
+type Book = { readonly steps: Step[]; readonly seen: Map<string, Term> }
+
+const line = (t: Term, symbol = t.symbol): OperandLine => ({ symbol, value: t.value, unit: t.unit, from: t.from })
+
+/**
+ * The recorder. The engine computes through it, so the trace is the computation.
+ * A silent sheet keeps no steps; the code that computes is the same. Ids are unique: a second use of one is a defect and throws.
+ */
+export class Sheet {
+  readonly #book: Book | undefined
+  readonly #prefix: string
+
+  private constructor(book: Book | undefined, prefix: string) {
+    this.#book = book
+    this.#prefix = prefix
+  }
+
+  static recording(): Sheet {
+    return new Sheet({ steps: [], seen: new Map() }, '')
+  }
+
+  static readonly silent: Sheet = new Sheet(undefined, '')
+
+  get records(): boolean {
+    return this.#book !== undefined
+  }
+
+  get steps(): readonly Step[] {
+    return this.#book?.steps ?? []
+  }
+
+  /** The same recorder, its ids beginning with `part/`. */
+  within(part: string): Sheet {
+    return this.#book ? new Sheet(this.#book, `${this.#prefix}${part}/`) : this
+  }
+
+  /** A value of the request. Asked for twice (same id), it stays one step. */
+  input<const U extends UnitCode>(label: Labelled<U>, value: number, pointer: string, id = label.symbol): Term<U> {
+    return this.#given(label, value, id, { from: pointer })
+  }
+
+  /** A default: a value that nobody gave, with the reason why it is used. */
+  assumed<const U extends UnitCode>(label: Labelled<U>, value: number, reason: string, source: Citation, id = label.symbol): Term<U> {
+    return this.#given(label, value, id, { default: true, reason, source })
+  }
+
+  #given<U extends UnitCode>(
+    label: Labelled<U>,
+    value: number,
+    id: string,
+    origin: { from: string } | { default: true; reason: string; source: Citation },
+  ): Term<U> {
+    const { symbol, name, unit } = label
+    if (!this.#book) return this.#term(symbol, unit, value, '')
+    const full = this.#prefix + id
+    const known = this.#book.seen.get(full)
+    if (known) return known as Term<U>
+    const term = this.#term(symbol, unit, value, full)
+    this.#keep({ id: full, kind: 'input', symbol, name, value, unit, quantity: quantityKind(unit), ...origin }, term)
+    return term
+  }
+
+  /** Evaluates a declared formula. The compiler demands the operands of `where`; a wrong unit is refused. */
+  step<W extends Record<string, UnitCode>, U extends UnitCode>(f: Formula<W, U>, operands: TermsOf<W>, id: string = f.symbol): Term<U> {
+    for (const name of f.names) {
+      const term = operands[name as keyof W]
+      if (term.unit !== f.where[name]) {
+        refuse('wrong-dimension', '', { field: `${f.name}: ${name}`, got: term.unit, expected: f.where[name] ?? '' })
+      }
+    }
+    const value = f.evaluate(operands)
+    if (!this.#book) return this.#term(f.symbol, f.unit, value, '')
+    const full = this.#prefix + id
+    const term = this.#term(f.symbol, f.unit, value, full)
+    this.#keep(
+      {
+        id: full, kind: 'formula', symbol: f.symbol, name: f.name, formula: f.text,
+        operands: f.names.map((name) => line(operands[name as keyof W], name)),
+        value, unit: f.unit, quantity: quantityKind(f.unit), source: f.source,
+        ...(f.range && { range: rangeLines(f, operands) }),
+      },
+      term,
+    )
+    return term
+  }
+
+  /** Adds terms of one unit. */
+  sum<const U extends UnitCode>(label: Labelled<U>, parts: readonly Term<U>[], id = label.symbol): Term<U> {
+    let value = 0
+    for (const part of parts) value += part.value
+    return this.#combined(label, value, parts, id, { kind: 'sum' })
+  }
+
+  /** Takes the smallest or largest of several candidates and keeps them all. */
+  choice<const U extends UnitCode>(label: Labelled<U>, rule: 'smallest' | 'largest', candidates: readonly Term<U>[], id = label.symbol): Term<U> {
+    const best = candidates.reduce((a, b) => ((rule === 'smallest' ? b.value < a.value : b.value > a.value) ? b : a))
+    return this.#combined(label, best.value, candidates, id, { kind: 'choice', rule, chosen: best.from })
+  }
+
+  /** Reads a table (rows in rising order of their argument), linear between rows, held at the ends; the bracketing rows are kept. */
+  lookup<const U extends UnitCode>(label: Labelled<U>, table: readonly (readonly [number, number])[], argument: Term, source: Citation, id = label.symbol): Term<U> {
+    const rows = bracket(table, argument.value)
+    const [low, high = low] = rows
+    const span = high![0] - low![0]
+    const value = span === 0 ? low![1] : low![1] + ((high![1] - low![1]) * (argument.value - low![0])) / span
+    return this.#combined(label, value, [argument], id, { kind: 'lookup', rows, source })
+  }
+
+  /** Records the outcome of a numerical solve. */
+  solution<const U extends UnitCode>(s: Solution<U>, id = s.symbol): Term<U> {
+    const { method, unknowns, residuals, tolerance, source } = s
+    return this.#combined(s, s.value, s.operands, id, { kind: 'solution', method, unknowns, residuals, tolerance, source })
+  }
+
+  // biome-ignore lint/suspicious/noExplicitAny: the rest of a step is fixed by its kind at each call above
+  #combined<U extends UnitCode>(label: Labelled<U>, value: number, parts: readonly Term[], id: string, rest: any): Term<U> {
+    const { symbol, name, unit } = label
+    if (!this.#book) return this.#term(symbol, unit, value, '')
+    const full = this.#prefix + id
+    const term = this.#term(symbol, unit, value, full)
+    this.#keep({ id: full, symbol, name, operands: parts.map((p) => line(p)), value, unit, quantity: quantityKind(unit), ...rest }, term)
+    return term
+  }
+
+  #term<U extends UnitCode>(symbol: string, unit: U, value: number, from: string): Term<U> {
+    // JSON would print a NaN as null; the engine never lets one out.
+    if (!Number.isFinite(value)) refuse('not-finite', '', { symbol })
+    return { value, unit, symbol, from }
+  }
+
+  #keep(step: Step, term: Term): void {
+    const book = this.#book!
+    if (book.seen.has(step.id)) throw new Error(`step ${step.id} is recorded twice`)
+    book.seen.set(step.id, term)
+    book.steps.push(step)
+  }
+}
+
+function rangeLines<W extends Record<string, UnitCode>>(f: Formula<W, UnitCode>, operands: TermsOf<W>): RangeLine[] {
+  return f.range!.map((r) => {
+    const value = operands[r.symbol as keyof W].value
+    return { ...r, inside: value >= (r.min ?? -Infinity) && value <= (r.max ?? Infinity) }
+  })
+}
+
+function bracket(table: readonly (readonly [number, number])[], x: number): readonly (readonly [number, number])[] {
+  const above = table.findIndex(([argument]) => argument >= x)
+  if (above === -1) return [table.at(-1)!]
+  const row = table[above]!
+  return above === 0 || row[0] === x ? [row] : [table[above - 1]!, row]
+}

@@ -1,0 +1,5 @@
+import { defineConfig } from 'vitest/config'
+
+export default defineConfig({
+  test: { root: new URL('..', import.meta.url).pathname, include: ['tests/**/*.test.ts'], testTimeout: 60_000 },
+})
