@@ -1,5 +1,10 @@
 /** A caution or warning attached to a result. */
-export type Notice = { readonly code: NoticeCode; readonly level: 'caution' | 'warning' | 'info'; readonly text: string; readonly pointer?: string }
+export type Notice = {
+  readonly code: NoticeCode
+  readonly level: 'caution' | 'warning' | 'info'
+  readonly text: string
+  readonly pointer?: string
+}
 
 export type NoticeCode =
   | 'usual-cautions'

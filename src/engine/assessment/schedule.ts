@@ -18,8 +18,23 @@ export type Cap = {
   readonly capWeight?: number
 }
 
-export type ModelRow = { readonly cap: string; readonly combination: string; readonly Fx: number; readonly Fy: number; readonly Fz: number; readonly Mx: number; readonly My: number; readonly Mz: number }
-export type PressingRow = { readonly cap: string; readonly combination: string; readonly V: number; readonly Mx: number; readonly My: number }
+export type ModelRow = {
+  readonly cap: string
+  readonly combination: string
+  readonly Fx: number
+  readonly Fy: number
+  readonly Fz: number
+  readonly Mx: number
+  readonly My: number
+  readonly Mz: number
+}
+export type PressingRow = {
+  readonly cap: string
+  readonly combination: string
+  readonly V: number
+  readonly Mx: number
+  readonly My: number
+}
 
 export type Loads = {
   readonly signs: Signs

@@ -1,13 +1,20 @@
-import type { UnitCode } from '../quantities/units.ts'
 import type { Layer } from '../ground/profile-types.ts'
 import type { Notice } from '../notice.ts'
 import type { Installation, Section } from '../piles/pile-type.ts'
+import type { UnitCode } from '../quantities/units.ts'
 import type { Formula } from '../trace/formula.ts'
 import type { Sheet } from '../trace/sheet.ts'
 import type { Term } from '../trace/term.ts'
 
 /** A parameter of a method that a request may set. */
-export type Parameter = { readonly symbol: string; readonly name: string; readonly unit: UnitCode; readonly min: number; readonly max: number; readonly required: boolean }
+export type Parameter = {
+  readonly symbol: string
+  readonly name: string
+  readonly unit: UnitCode
+  readonly min: number
+  readonly max: number
+  readonly required: boolean
+}
 
 /** The shape that every resistance method has in common; the catalogue prints it. */
 export type MethodCard = {

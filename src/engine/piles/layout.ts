@@ -1,7 +1,14 @@
 /** Pile positions under one cap, in m from the cap's origin. */
 export type Point = { readonly x: number; readonly y: number }
 export type Layout =
-  | { readonly kind: 'grid'; readonly columns: number; readonly rows: number; readonly spacing?: number; readonly spacingX?: number; readonly spacingY?: number }
+  | {
+      readonly kind: 'grid'
+      readonly columns: number
+      readonly rows: number
+      readonly spacing?: number
+      readonly spacingX?: number
+      readonly spacingY?: number
+    }
   | { readonly kind: 'ring'; readonly count: number; readonly radius: number }
   | { readonly kind: 'points'; readonly points: readonly Point[] }
 

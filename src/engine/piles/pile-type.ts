@@ -3,7 +3,12 @@
 export type Section =
   | { readonly shape: 'circular'; readonly diameter: number }
   | { readonly shape: 'square'; readonly width: number }
-  | { readonly shape: 'tubular'; readonly diameter: number; readonly wallThickness: number; readonly toe: 'open' | 'closed' }
+  | {
+      readonly shape: 'tubular'
+      readonly diameter: number
+      readonly wallThickness: number
+      readonly toe: 'open' | 'closed'
+    }
   | { readonly shape: 'h'; readonly depth: number; readonly flangeWidth: number; readonly area: number }
 
 export type Installation = 'driven' | 'bored' | 'continuous-flight-auger'

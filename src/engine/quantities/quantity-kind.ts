@@ -1,9 +1,23 @@
 import type { UnitCode } from './units.ts'
 
 const kinds: Readonly<Record<UnitCode, string>> = {
-  '1': 'ratio', m: 'length', m2: 'area', m3: 'volume', m4: 'second moment of area', mm: 'length', '1/m': 'reciprocal length', kN: 'force', kPa: 'stress',
-  'kN/m': 'stiffness', 'kN/m3': 'unit weight', 'kN.m': 'moment', 'kN.m/rad': 'rotational stiffness', 'rad/(kN.m)': 'rotational flexibility',
-  'm/kN': 'flexibility', deg: 'angle', rad: 'angle',
+  '1': 'ratio',
+  m: 'length',
+  m2: 'area',
+  m3: 'volume',
+  m4: 'second moment of area',
+  mm: 'length',
+  '1/m': 'reciprocal length',
+  kN: 'force',
+  kPa: 'stress',
+  'kN/m': 'stiffness',
+  'kN/m3': 'unit weight',
+  'kN.m': 'moment',
+  'kN.m/rad': 'rotational stiffness',
+  'rad/(kN.m)': 'rotational flexibility',
+  'm/kN': 'flexibility',
+  deg: 'angle',
+  rad: 'angle',
 }
 
 /** What a unit measures, in words. */

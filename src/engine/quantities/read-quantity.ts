@@ -14,9 +14,7 @@ const isAngle = (code: string) => code === 'deg' || code === 'rad' || code === '
  */
 export function readQuantity(input: number | string, expected: UnitCode): ReadQuantity {
   if (typeof input === 'number') {
-    return Number.isFinite(input)
-      ? { ok: true, value: input }
-      : { ok: false, code: 'not-a-number', got: String(input) }
+    return Number.isFinite(input) ? { ok: true, value: input } : { ok: false, code: 'not-a-number', got: String(input) }
   }
   const match = WRITTEN.exec(input)
   if (!match) return { ok: false, code: 'not-a-number', got: input }

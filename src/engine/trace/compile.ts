@@ -1,5 +1,5 @@
 import { type MathNode, parse } from 'mathjs'
-import { sameDimension, type Dimension, type Unit, type UnitCode, units } from '../quantities/units.ts'
+import { type Dimension, sameDimension, type Unit, type UnitCode, units } from '../quantities/units.ts'
 
 /**
  * Compiles the text of a formula to a native function, and derives its dimension.
@@ -11,8 +11,19 @@ type Checked = { readonly code: string; readonly dimension: Dimension }
 type Where = Readonly<Record<string, UnitCode>>
 
 const FUNCTIONS: Readonly<Record<string, string>> = {
-  min: 'Math.min', max: 'Math.max', sqrt: 'Math.sqrt', exp: 'Math.exp', log: 'Math.log', log10: 'Math.log10',
-  sin: 'Math.sin', cos: 'Math.cos', tan: 'Math.tan', atan: 'Math.atan', tanh: 'Math.tanh', abs: 'Math.abs', ceil: 'Math.ceil',
+  min: 'Math.min',
+  max: 'Math.max',
+  sqrt: 'Math.sqrt',
+  exp: 'Math.exp',
+  log: 'Math.log',
+  log10: 'Math.log10',
+  sin: 'Math.sin',
+  cos: 'Math.cos',
+  tan: 'Math.tan',
+  atan: 'Math.atan',
+  tanh: 'Math.tanh',
+  abs: 'Math.abs',
+  ceil: 'Math.ceil',
 }
 const COMPARISONS = new Set(['<', '<=', '>', '>=', '=='])
 const RATIO: Dimension = { length: 0, force: 0 }
@@ -61,7 +72,8 @@ function check(node: Node, where: Where, text: string, used: Set<string>): Check
         return { code, dimension: first.dimension }
       }
       if (name === 'abs') return { code, dimension: first.dimension }
-      if (name === 'sqrt') return { code, dimension: { length: first.dimension.length / 2, force: first.dimension.force / 2 } }
+      if (name === 'sqrt')
+        return { code, dimension: { length: first.dimension.length / 2, force: first.dimension.force / 2 } }
       if (!equal(first.dimension, RATIO)) fail(text, `${name} needs a ratio`)
       return { code, dimension: RATIO }
     }
@@ -86,7 +98,8 @@ function operator(node: Node, where: Where, text: string, used: Set<string>): Ch
   const checked = args.map((a) => check(a, where, text, used))
   const [a, b] = checked
   if (!a) return fail(text, `operator ${op} without operand`)
-  if (!b) return op === '-' ? { code: `(-${a.code})`, dimension: a.dimension } : fail(text, `operator ${op} is not allowed`)
+  if (!b)
+    return op === '-' ? { code: `(-${a.code})`, dimension: a.dimension } : fail(text, `operator ${op} is not allowed`)
   if (op === '+' || op === '-' || COMPARISONS.has(op)) {
     if (!equal(a.dimension, b.dimension)) fail(text, `${op} joins different dimensions`)
     return { code: `(${a.code} ${op} ${b.code})`, dimension: COMPARISONS.has(op) ? RATIO : a.dimension }

@@ -19,11 +19,13 @@ export type Declaration<W extends Record<string, UnitCode>, U extends UnitCode> 
 
 export type TermsOf<W extends Record<string, UnitCode>> = { readonly [K in keyof W]: Term<W[K]> }
 
-export type Formula<W extends Record<string, UnitCode> = Record<string, UnitCode>, U extends UnitCode = UnitCode> =
-  Declaration<W, U> & {
-    readonly names: readonly string[]
-    readonly evaluate: (operands: Operands) => number
-  }
+export type Formula<
+  W extends Record<string, UnitCode> = Record<string, UnitCode>,
+  U extends UnitCode = UnitCode,
+> = Declaration<W, U> & {
+  readonly names: readonly string[]
+  readonly evaluate: (operands: Operands) => number
+}
 
 const declared: Formula[] = []
 

@@ -5,9 +5,15 @@ import type { Step, Trace } from './step.ts'
 import { isTerm, type Term } from './term.ts'
 
 /** A tree of terms with plain numbers in their place. */
-export type Plain<T> = T extends Term ? number : T extends readonly (infer E)[] ? Plain<E>[] : T extends object ? { [K in keyof T]: Plain<T[K]> } : T
+export type Plain<T> = T extends Term
+  ? number
+  : T extends readonly (infer E)[]
+    ? Plain<E>[]
+    : T extends object
+      ? { [K in keyof T]: Plain<T[K]> }
+      : T
 
-const escape = (key: string) => key.replaceAll('~', '~0').replaceAll('/', '~1')
+const escapeKey = (key: string) => key.replaceAll('~', '~0').replaceAll('/', '~1')
 
 /** Replaces each term by its value, and ties its JSON Pointer to the step that it came from. */
 export function settleTerms<T>(tree: T): { result: Plain<T>; links: Record<string, string> } {
@@ -21,7 +27,7 @@ export function settleTerms<T>(tree: T): { result: Plain<T>; links: Record<strin
     if (typeof node !== 'object' || node === null) return node
     const out: Record<string, unknown> = {}
     for (const [key, child] of Object.entries(node)) {
-      if (child !== undefined) out[key] = walk(child, `${pointer}/${escape(key)}`)
+      if (child !== undefined) out[key] = walk(child, `${pointer}/${escapeKey(key)}`)
     }
     return out
   }

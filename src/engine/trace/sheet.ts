@@ -1,6 +1,6 @@
 import { refuse } from '../faults.ts'
-import type { UnitCode } from '../quantities/units.ts'
 import { quantityKind } from '../quantities/quantity-kind.ts'
+import type { UnitCode } from '../quantities/units.ts'
 import type { Citation } from '../sources/source.ts'
 import type { Formula, TermsOf } from './formula.ts'
 import type { OperandLine, RangeLine, Step } from './step.ts'
@@ -60,7 +60,13 @@ export class Sheet {
   }
 
   /** A default: a value that nobody gave, with the reason why it is used. */
-  assumed<const U extends UnitCode>(label: Labelled<U>, value: number, reason: string, source: Citation, id = label.symbol): Term<U> {
+  assumed<const U extends UnitCode>(
+    label: Labelled<U>,
+    value: number,
+    reason: string,
+    source: Citation,
+    id = label.symbol,
+  ): Term<U> {
     return this.#given(label, value, id, { default: true, reason, source })
   }
 
@@ -74,14 +80,22 @@ export class Sheet {
     if (!this.#book) return this.#term(symbol, unit, value, '')
     const full = this.#prefix + id
     const known = this.#book.seen.get(full)
-    if (known) return known as Term<U>
+    if (known) {
+      if (known.value !== value || known.unit !== unit)
+        throw new Error(`step ${full} is recorded twice, with two values`)
+      return known as Term<U>
+    }
     const term = this.#term(symbol, unit, value, full)
     this.#keep({ id: full, kind: 'input', symbol, name, value, unit, quantity: quantityKind(unit), ...origin }, term)
     return term
   }
 
   /** Evaluates a declared formula. The compiler demands the operands of `where`; a wrong unit is refused. */
-  step<W extends Record<string, UnitCode>, U extends UnitCode>(f: Formula<W, U>, operands: TermsOf<W>, id: string = f.symbol): Term<U> {
+  step<W extends Record<string, UnitCode>, U extends UnitCode>(
+    f: Formula<W, U>,
+    operands: TermsOf<W>,
+    id: string = f.symbol,
+  ): Term<U> {
     for (const name of f.names) {
       const term = operands[name as keyof W]
       if (term.unit !== f.where[name]) {
@@ -94,9 +108,16 @@ export class Sheet {
     const term = this.#term(f.symbol, f.unit, value, full)
     this.#keep(
       {
-        id: full, kind: 'formula', symbol: f.symbol, name: f.name, formula: f.text,
+        id: full,
+        kind: 'formula',
+        symbol: f.symbol,
+        name: f.name,
+        formula: f.text,
         operands: f.names.map((name) => line(operands[name as keyof W], name)),
-        value, unit: f.unit, quantity: quantityKind(f.unit), source: f.source,
+        value,
+        unit: f.unit,
+        quantity: quantityKind(f.unit),
+        source: f.source,
         ...(f.range && { range: rangeLines(f, operands) }),
       },
       term,
@@ -112,13 +133,24 @@ export class Sheet {
   }
 
   /** Takes the smallest or largest of several candidates and keeps them all. */
-  choice<const U extends UnitCode>(label: Labelled<U>, rule: 'smallest' | 'largest', candidates: readonly Term<U>[], id = label.symbol): Term<U> {
+  choice<const U extends UnitCode>(
+    label: Labelled<U>,
+    rule: 'smallest' | 'largest',
+    candidates: readonly Term<U>[],
+    id = label.symbol,
+  ): Term<U> {
     const best = candidates.reduce((a, b) => ((rule === 'smallest' ? b.value < a.value : b.value > a.value) ? b : a))
     return this.#combined(label, best.value, candidates, id, { kind: 'choice', rule, chosen: best.from })
   }
 
   /** Reads a table (rows in rising order of their argument), linear between rows, held at the ends; the bracketing rows are kept. */
-  lookup<const U extends UnitCode>(label: Labelled<U>, table: readonly (readonly [number, number])[], argument: Term, source: Citation, id = label.symbol): Term<U> {
+  lookup<const U extends UnitCode>(
+    label: Labelled<U>,
+    table: readonly (readonly [number, number])[],
+    argument: Term,
+    source: Citation,
+    id = label.symbol,
+  ): Term<U> {
     const rows = bracket(table, argument.value)
     const [low, high = low] = rows
     const span = high![0] - low![0]
@@ -129,16 +161,41 @@ export class Sheet {
   /** Records the outcome of a numerical solve. */
   solution<const U extends UnitCode>(s: Solution<U>, id = s.symbol): Term<U> {
     const { method, unknowns, residuals, tolerance, source } = s
-    return this.#combined(s, s.value, s.operands, id, { kind: 'solution', method, unknowns, residuals, tolerance, source })
+    return this.#combined(s, s.value, s.operands, id, {
+      kind: 'solution',
+      method,
+      unknowns,
+      residuals,
+      tolerance,
+      source,
+    })
   }
 
-  // biome-ignore lint/suspicious/noExplicitAny: the rest of a step is fixed by its kind at each call above
-  #combined<U extends UnitCode>(label: Labelled<U>, value: number, parts: readonly Term[], id: string, rest: any): Term<U> {
+  #combined<U extends UnitCode>(
+    label: Labelled<U>,
+    value: number,
+    parts: readonly Term[],
+    id: string,
+    // biome-ignore lint/suspicious/noExplicitAny: the rest of a step is fixed by its kind at each call above
+    rest: any,
+  ): Term<U> {
     const { symbol, name, unit } = label
     if (!this.#book) return this.#term(symbol, unit, value, '')
     const full = this.#prefix + id
     const term = this.#term(symbol, unit, value, full)
-    this.#keep({ id: full, symbol, name, operands: parts.map((p) => line(p)), value, unit, quantity: quantityKind(unit), ...rest }, term)
+    this.#keep(
+      {
+        id: full,
+        symbol,
+        name,
+        operands: parts.map((p) => line(p)),
+        value,
+        unit,
+        quantity: quantityKind(unit),
+        ...rest,
+      },
+      term,
+    )
     return term
   }
 

@@ -2,7 +2,12 @@ import type { UnitCode } from '../quantities/units.ts'
 import type { Citation, Source } from '../sources/source.ts'
 
 /** Steps as they stand on the wire. */
-export type OperandLine = { readonly symbol: string; readonly value: number; readonly unit: UnitCode; readonly from: string }
+export type OperandLine = {
+  readonly symbol: string
+  readonly value: number
+  readonly unit: UnitCode
+  readonly from: string
+}
 
 type Line = {
   readonly id: string
@@ -12,8 +17,19 @@ type Line = {
   readonly unit: UnitCode
   readonly quantity: string
 }
-export type RangeLine = { readonly symbol: string; readonly min?: number; readonly max?: number; readonly inside: boolean }
-export type InputStep = Line & { readonly kind: 'input'; readonly from?: string; readonly default?: true; readonly reason?: string; readonly source?: Citation }
+export type RangeLine = {
+  readonly symbol: string
+  readonly min?: number
+  readonly max?: number
+  readonly inside: boolean
+}
+export type InputStep = Line & {
+  readonly kind: 'input'
+  readonly from?: string
+  readonly default?: true
+  readonly reason?: string
+  readonly source?: Citation
+}
 export type FormulaStep = Line & {
   readonly kind: 'formula'
   readonly formula: string
@@ -29,7 +45,12 @@ export type LookupStep = Line & {
   readonly rows: readonly (readonly [number, number])[]
   readonly source: Citation
 }
-export type ChoiceStep = Line & { readonly kind: 'choice'; readonly rule: 'smallest' | 'largest'; readonly operands: readonly OperandLine[]; readonly chosen: string }
+export type ChoiceStep = Line & {
+  readonly kind: 'choice'
+  readonly rule: 'smallest' | 'largest'
+  readonly operands: readonly OperandLine[]
+  readonly chosen: string
+}
 export type SolutionStep = Line & {
   readonly kind: 'solution'
   readonly method: string

@@ -1,0 +1,8 @@
+import type { MethodCard } from './methods/method.ts'
+import { baseMethods, shaftMethods } from './methods/registry.ts'
+
+/** Every method of resistance, as it is listed to users. */
+export const methodCards = (): readonly MethodCard[] =>
+  [shaftMethods.cohesiveShaft, baseMethods.cohesiveBase, shaftMethods.granularShaft, baseMethods.granularBase].flatMap(
+    (table) => Object.values<MethodCard>(table),
+  )
