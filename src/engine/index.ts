@@ -1,4 +1,8 @@
 /** The engine's only door. */
 export { type Answer, calculateBlock, calculateGroup, calculateSinglePile } from './calculators.ts'
 export { methodCards } from './catalogue.ts'
+export { EngineFault } from './faults.ts'
+export { baseMethods, shaftMethods } from './methods/registry.ts'
 export { bibliography } from './sources/bibliography.ts'
+export { sliceTrace } from './trace/slice.ts'
+export { engineVersion } from './version.ts'

@@ -1,0 +1,30 @@
+import fastify, { type FastifyInstance } from 'fastify'
+import type { Config } from './config.ts'
+import { limits } from './contract/limits.ts'
+import { Problem } from './errors.ts'
+import { probes } from './http/probes.ts'
+import { problems, sendProblem } from './http/problems.ts'
+import { calculators } from './http/v1/calculators.ts'
+import { getMethod, listMethods, listSources } from './operations/list-methods.ts'
+
+/** Composes the service, in reading order. */
+export async function buildApp(config: Config): Promise<FastifyInstance> {
+  const app = fastify({
+    logger: { level: config.LOG_LEVEL },
+    bodyLimit: config.BODY_LIMIT,
+    onProtoPoisoning: 'error',
+    onConstructorPoisoning: 'error',
+    // An unreadable URL never reaches the error handler.
+    frameworkErrors: (error, _request, reply) =>
+      sendProblem(reply, new Problem('malformed-url', { reason: error.message })),
+  })
+  app.removeContentTypeParser('text/plain')
+  problems(app, config.BODY_LIMIT)
+  probes(app)
+  calculators(app)
+  app.get('/v1/methods', async () => listMethods())
+  app.get<{ Params: { id: string } }>('/v1/methods/:id', async (request) => getMethod(request.params.id))
+  app.get('/v1/sources', async () => listSources())
+  app.get('/v1/limits', async () => ({ ...limits, bodyBytes: config.BODY_LIMIT }))
+  return app
+}

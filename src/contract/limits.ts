@@ -1,0 +1,2 @@
+/** What one request may hold. Listed at GET /v1/limits. */
+export const limits = { layers: 200, pilesPerCap: 2500, caps: 5000, rows: 500_000 } as const

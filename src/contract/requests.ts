@@ -1,0 +1,41 @@
+import { z } from 'zod'
+import { baseMethods, shaftMethods } from '../engine/index.ts'
+import type { MethodChoices } from '../engine/methods/method-choice.ts'
+import type { GroupRequest, SinglePileRequest } from '../engine/requests.ts'
+import { designBasis, groundProfile, layout, pileType } from './parts.ts'
+import { quantity } from './quantity.ts'
+
+type Card = (typeof shaftMethods)['cohesiveShaft']['rp2geo-2011']
+
+/** A method by id, or by id with its own parameters, each checked. */
+function choice<Id extends string>(table: Readonly<Record<Id, Pick<Card, 'parameters'>>>) {
+  const ids = Object.keys(table) as [Id, ...Id[]]
+  const settings = ids.map((id) => {
+    const fields = Object.entries(table[id].parameters).map(([name, p]) => {
+      const field = quantity(p.unit, p.name, { min: p.min, max: p.max })
+      return [name, p.required ? field : field.optional()] as const
+    })
+    return z.strictObject({ method: z.literal(id), ...Object.fromEntries(fields) })
+  })
+  return z.union([z.enum(ids), z.discriminatedUnion('method', settings as [(typeof settings)[0], ...typeof settings])])
+}
+
+const ratio = quantity('1', 'share of the shaft resistance in uplift', { min: 0, max: 1 }).optional()
+export const methodChoices = z.strictObject({
+  cohesiveShaft: choice(shaftMethods.cohesiveShaft).optional(),
+  cohesiveBase: choice(baseMethods.cohesiveBase).optional(),
+  granularShaft: choice(shaftMethods.granularShaft).optional(),
+  granularBase: choice(baseMethods.granularBase).optional(),
+  upliftRatio: z.strictObject({ cohesive: ratio, granular: ratio }).optional(),
+  sublayer: quantity('m', 'longest sublayer of the shaft sum', { min: 0.05, max: 100 }).optional(),
+}) as unknown as z.ZodType<MethodChoices>
+
+const single = {
+  pile: pileType,
+  ground: groundProfile,
+  direction: z.enum(['compression', 'uplift']).optional(),
+  methods: methodChoices.optional(),
+  designBasis: designBasis.optional(),
+}
+export const singlePileRequest = z.strictObject(single) satisfies z.ZodType<SinglePileRequest>
+export const groupRequest = z.strictObject({ ...single, layout }) satisfies z.ZodType<GroupRequest>

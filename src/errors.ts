@@ -1,0 +1,389 @@
+import type { FaultCode } from './engine/faults.ts'
+
+export type ErrorEntry = {
+  readonly title: string
+  readonly status: number
+  readonly cause: string
+  readonly cure: string
+  readonly template: string
+}
+
+type Contract =
+  | 'malformed-json'
+  | 'malformed-url'
+  | 'invalid-request'
+  | 'unknown-field'
+  | 'missing-field'
+  | 'wrong-type'
+  | 'out-of-range'
+  | 'unknown-choice'
+  | 'too-many-items'
+  | 'too-few-items'
+  | 'not-found'
+  | 'method-not-allowed'
+  | 'unsupported-media-type'
+  | 'body-too-large'
+  | 'overloaded'
+  | 'internal-error'
+  | 'csv-malformed'
+  | 'bad-query'
+export type ErrorCode = FaultCode | Contract
+
+const entry = (status: number, title: string, template: string, cause: string, cure: string): ErrorEntry => ({
+  status,
+  title,
+  template,
+  cause,
+  cure,
+})
+
+/** One catalogue: code to title, status and template. `{x}` is a fact of the fault. Codes are never reused. */
+export const catalogue: Readonly<Record<ErrorCode, ErrorEntry>> = {
+  'malformed-json': entry(
+    400,
+    'The body is not JSON',
+    'The body could not be read as JSON: {reason}.',
+    'A comma, quote or bracket is missing, or the body is not JSON at all.',
+    'Send a JSON document.',
+  ),
+  'malformed-url': entry(
+    400,
+    'The URL cannot be read',
+    'The URL could not be read: {reason}.',
+    'The path holds a broken escape sequence.',
+    'Percent-encode the path correctly.',
+  ),
+  'invalid-request': entry(
+    422,
+    'The request is invalid',
+    'Faults found: {count}.',
+    'One or more fields are wrong; `errors` lists them all.',
+    'Mend every field that `errors` points at.',
+  ),
+  'unknown-field': entry(
+    422,
+    'Unknown field',
+    'Unknown field "{field}".',
+    'A field is misspelt or does not belong here.',
+    'Remove or rename the field.',
+  ),
+  'missing-field': entry(
+    422,
+    'Missing field',
+    'The field "{field}" is missing.',
+    'A required field was left out.',
+    'Add the field.',
+  ),
+  'wrong-type': entry(
+    422,
+    'Wrong type',
+    'Expected {expected}, got {got}.',
+    'A value is of another type.',
+    'Send the expected type.',
+  ),
+  'out-of-range': entry(
+    422,
+    'Out of range',
+    'The value must be {relation} {limit} {unit}; got {got}.',
+    'A value lies outside what is physically possible or allowed.',
+    'Send a value within the bounds.',
+  ),
+  'unknown-choice': entry(
+    422,
+    'Unknown choice',
+    'Expected one of {options}; got {got}.',
+    'A name is not in the list.',
+    'Use one of the listed names.',
+  ),
+  'too-many-items': entry(
+    422,
+    'Too many items',
+    'At most {limit} items are accepted; got {got}.',
+    'A list is longer than the limit.',
+    'Split the request.',
+  ),
+  'too-few-items': entry(
+    422,
+    'Too few items',
+    'At least {limit} items are needed; got {got}.',
+    'A list is too short.',
+    'Add items.',
+  ),
+  'not-found': entry(
+    404,
+    'Not found',
+    'There is nothing at {path}.',
+    'The path or id does not exist.',
+    'See /openapi.json for the paths.',
+  ),
+  'method-not-allowed': entry(
+    405,
+    'Method not allowed',
+    '{path} does not answer to {method}.',
+    'The path exists, with another method.',
+    'Use a method that the Allow header lists.',
+  ),
+  'unsupported-media-type': entry(
+    415,
+    'Unsupported media type',
+    'The content type {got} is not accepted here.',
+    'The body is of another type.',
+    'Send application/json.',
+  ),
+  'body-too-large': entry(
+    413,
+    'Body too large',
+    'The body is larger than {limit} bytes.',
+    'The body exceeds the limit of this service.',
+    'Split the request, or ask the operator for a larger BODY_LIMIT.',
+  ),
+  overloaded: entry(
+    503,
+    'Overloaded',
+    'The service is busy. Try again in {seconds} s.',
+    'All workers are busy and the queue is full, or the service is stopping.',
+    'Wait as Retry-After says.',
+  ),
+  'internal-error': entry(
+    500,
+    'Internal error',
+    'Something failed inside the service.',
+    'A defect of the service.',
+    'Report it with the request id.',
+  ),
+  'csv-malformed': entry(
+    422,
+    'The CSV of loads is malformed',
+    '{reason}.',
+    'A column is missing or a cell is not a number.',
+    'Mend the named row and column.',
+  ),
+  'bad-query': entry(
+    422,
+    'Bad query parameter',
+    'The query parameter {field} must be {expected}; got {got}.',
+    'A query parameter has a value that is not known.',
+    'Use a listed value.',
+  ),
+  'wrong-dimension': entry(
+    422,
+    'Wrong dimension',
+    'Read "{got}", expected a quantity in {expected}.',
+    'The unit measures something else.',
+    'Use a unit of the expected dimension.',
+  ),
+  'unknown-unit': entry(
+    422,
+    'Unknown unit',
+    'The unit of "{got}" is not known; expected a quantity in {expected}.',
+    'The unit is misspelt or not supported.',
+    'Use a listed unit.',
+  ),
+  'not-a-number': entry(
+    422,
+    'Not a number',
+    'Read "{got}", expected a number in {expected}.',
+    'Text stands where a number belongs.',
+    'Send a number, or a string such as "600 mm".',
+  ),
+  'unknown-method': entry(
+    422,
+    'Unknown method',
+    'There is no method "{method}" here; known: {known}.',
+    'The id is misspelt or belongs to another part.',
+    'See /v1/methods.',
+  ),
+  'method-not-applicable': entry(
+    422,
+    'Method not applicable',
+    '{reason}.',
+    'The method does not cover this soil or value.',
+    'Choose another method for this layer.',
+  ),
+  'missing-parameter': entry(
+    422,
+    'Missing parameter',
+    'Layer "{layer}" lacks {parameter}, which {method} needs.',
+    'The chosen or default method needs a parameter that the request does not give.',
+    'Give the parameter, or choose another method.',
+  ),
+  'no-layer': entry(
+    422,
+    'No layer',
+    'The ground profile has no layer.',
+    'The list of layers is empty.',
+    'Add at least one layer.',
+  ),
+  'missing-thickness': entry(
+    422,
+    'Missing thickness',
+    'Layer "{layer}" needs a thickness.',
+    'Only the last layer may leave its thickness out, and not where a parameter varies from top to bottom.',
+    'Add the thickness.',
+  ),
+  'pile-below-known-ground': entry(
+    422,
+    'Pile below the known ground',
+    'The toe stands at {toeDepth} m; the ground is known to {knownDepth} m.',
+    'The last layer has a thickness, so the known ground ends there.',
+    'Shorten the pile, add a layer, or leave out the thickness of the last layer.',
+  ),
+  'toe-in-uncovered-soil': entry(
+    422,
+    'Toe in soil that no method covers',
+    'No base method covers {soil}.',
+    'The toe stands in soil without a method.',
+    'Move the toe or choose another soil kind.',
+  ),
+  'section-impossible': entry(
+    422,
+    'Impossible section',
+    '{reason}.',
+    'The dimensions of the section contradict one another.',
+    'Mend the section.',
+  ),
+  'piles-overlap': entry(
+    422,
+    'Piles overlap',
+    'Piles {first} and {second} stand {spacing} m apart and are {width} m wide.',
+    'Two piles would stand in one place.',
+    'Increase the spacing.',
+  ),
+  'too-many-piles': entry(
+    422,
+    'Too many piles',
+    'The layout has {got} piles; at most {limit} are accepted.',
+    'The layout is larger than the limit.',
+    'Split the cap.',
+  ),
+  'unknown-reference': entry(
+    422,
+    'Unknown reference',
+    'There is no {kind} "{name}"; known: {known}.',
+    'A name refers to nothing in the schedule.',
+    'Correct the name or add what it refers to.',
+  ),
+  'duplicate-mark': entry(
+    422,
+    'Duplicate mark',
+    'The mark "{mark}" stands twice.',
+    'Two caps share one mark.',
+    'Give each cap its own mark.',
+  ),
+  'missing-combination': entry(
+    422,
+    'Missing combination',
+    'The design basis is checked with {needed} combinations; the schedule has {found}.',
+    'The limit states do not fit the format of safety.',
+    'Export the combinations that the design basis needs.',
+  ),
+  'missing-load': entry(
+    422,
+    'Missing load',
+    'Cap "{cap}" has no row for combination "{combination}".',
+    'A reaction is missing.',
+    'Export the row.',
+  ),
+  'limit-state-mismatch': entry(
+    422,
+    'Limit state does not fit the design basis',
+    '{reason}.',
+    'Factored loads against an overall factor count safety twice; unfactored ones against partial factors not at all.',
+    'Send combinations of the needed limit state.',
+  ),
+  'line-cannot-take-moment': entry(
+    422,
+    'A line of piles cannot take this moment',
+    'The piles stand in one line and cannot take a moment of {moment} kN.m about it.',
+    'A moment acts about the axis of a single line of piles.',
+    'Add piles beside the line, or take the moment by other means.',
+  ),
+  'no-design-basis-support': entry(
+    422,
+    'Design basis not supported',
+    '{format} is not supported yet.',
+    'The format of safety has no factor set here.',
+    'Use a supported format.',
+  ),
+  'wrong-load-components': entry(
+    422,
+    'Wrong load components',
+    'With signs "{signs}" a row has {expected}.',
+    'The row has the components of another sign convention.',
+    'Send the components that the signs ask for.',
+  ),
+  'not-finite': entry(
+    422,
+    'The numbers run away',
+    'The value of {symbol} is not finite.',
+    'The given numbers lead to a division by zero or an overflow.',
+    'Check the magnitude of the input.',
+  ),
+}
+
+export type ProblemError = {
+  readonly pointer: string
+  readonly code: ErrorCode
+  readonly detail: string
+  readonly [fact: string]: unknown
+}
+
+const shown = (fact: unknown): string =>
+  Array.isArray(fact)
+    ? fact.join(', ')
+    : typeof fact === 'number'
+      ? String(Number(fact.toPrecision(6)))
+      : fact === undefined
+        ? ''
+        : String(fact)
+
+/** The sentence of a fault: the template with its facts. */
+export const detailOf = (code: ErrorCode, facts: Readonly<Record<string, unknown>>): string =>
+  catalogue[code].template
+    .replaceAll(/\{(\w+)\}/g, (_, name: string) => shown(facts[name]))
+    .replaceAll(/ +([;.])/g, '$1')
+
+/** A problem that is told to the caller (RFC 9457). */
+export class Problem extends Error {
+  readonly code: ErrorCode
+  readonly errors: readonly ProblemError[]
+  readonly facts: Readonly<Record<string, unknown>>
+  constructor(code: ErrorCode, facts: Readonly<Record<string, unknown>> = {}, errors: readonly ProblemError[] = []) {
+    super(detailOf(code, facts))
+    this.name = 'Problem'
+    this.code = code
+    this.facts = facts
+    this.errors = errors
+  }
+
+  get status(): number {
+    return catalogue[this.code].status
+  }
+
+  get document() {
+    const { title, status } = catalogue[this.code]
+    return {
+      type: `/problems/${this.code}`,
+      title,
+      status,
+      detail: this.message,
+      ...(this.errors.length > 0 && { errors: this.errors }),
+    }
+  }
+}
+
+export const problemError = (
+  pointer: string,
+  code: ErrorCode,
+  facts: Readonly<Record<string, unknown>> = {},
+): ProblemError => ({
+  pointer,
+  code,
+  detail: detailOf(code, facts),
+  ...facts,
+})
+
+/** One problem of several faults: the single code where there is one fault, `invalid-request` otherwise. */
+export function problemOf(errors: readonly ProblemError[]): Problem {
+  return new Problem('invalid-request', { count: errors.length }, errors)
+}
