@@ -2,6 +2,7 @@ import fastify, { type FastifyInstance } from 'fastify'
 import type { Config } from './config.ts'
 import { limits } from './contract/limits.ts'
 import { Problem } from './errors.ts'
+import { graphqlPlugin } from './graphql/plugin.ts'
 import { probes } from './http/probes.ts'
 import { problems, sendProblem } from './http/problems.ts'
 import { calculators } from './http/v1/calculators.ts'
@@ -26,5 +27,6 @@ export async function buildApp(config: Config): Promise<FastifyInstance> {
   app.get<{ Params: { id: string } }>('/v1/methods/:id', async (request) => getMethod(request.params.id))
   app.get('/v1/sources', async () => listSources())
   app.get('/v1/limits', async () => ({ ...limits, bodyBytes: config.BODY_LIMIT }))
+  await graphqlPlugin(app, { production: config.NODE_ENV === 'production' })
   return app
 }

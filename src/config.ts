@@ -8,6 +8,7 @@ const schema = z.object({
   PORT: whole(8080, 0, 65535),
   LOG_LEVEL: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent']).default('info'),
   BODY_LIMIT: whole(64 * 1024 * 1024, 1024, 2 ** 31),
+  NODE_ENV: z.string().default('development'),
   SHUTDOWN_TIMEOUT: whole(10, 1, 3600),
 })
 

@@ -11,6 +11,7 @@ export type ErrorEntry = {
 type Contract =
   | 'malformed-json'
   | 'malformed-url'
+  | 'not-acceptable'
   | 'invalid-request'
   | 'unknown-field'
   | 'missing-field'
@@ -45,6 +46,13 @@ export const catalogue: Readonly<Record<ErrorCode, ErrorEntry>> = {
     'The body could not be read as JSON: {reason}.',
     'A comma, quote or bracket is missing, or the body is not JSON at all.',
     'Send a JSON document.',
+  ),
+  'not-acceptable': entry(
+    406,
+    'Not acceptable',
+    'No answer of this path is of the accepted types.',
+    'The Accept header names types that this path does not answer in.',
+    'Accept application/json.',
   ),
   'malformed-url': entry(
     400,

@@ -1,7 +1,7 @@
 import { z } from 'zod'
 import { baseMethods, shaftMethods } from '../engine/index.ts'
 import type { MethodChoices } from '../engine/methods/method-choice.ts'
-import type { GroupRequest, SinglePileRequest } from '../engine/requests.ts'
+import type { GroupRequest, SettlementRequest, SinglePileRequest } from '../engine/requests.ts'
 import { designBasis, groundProfile, layout, pileType } from './parts.ts'
 import { quantity } from './quantity.ts'
 
@@ -39,3 +39,18 @@ const single = {
 }
 export const singlePileRequest = z.strictObject(single) satisfies z.ZodType<SinglePileRequest>
 export const groupRequest = z.strictObject({ ...single, layout }) satisfies z.ZodType<GroupRequest>
+
+const force = (description: string) => quantity('kN', description, { min: -1e8, max: 1e8 })
+const moment = (description: string) => quantity('kN.m', description, { min: -1e9, max: 1e9 }).optional()
+export const settlementRequest = z.strictObject({
+  pile: pileType,
+  ground: groundProfile,
+  layout: layout.optional(),
+  load: z.strictObject({
+    V: force('vertical load, positive downward'),
+    Mx: moment('moment that presses piles at +y'),
+    My: moment('moment that presses piles at +x'),
+  }),
+  cap: z.enum(['rigid', 'flexible']).optional(),
+  method: z.enum(['randolph-wroth-1978']).optional(),
+}) satisfies z.ZodType<SettlementRequest>

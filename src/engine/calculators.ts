@@ -1,10 +1,11 @@
 import { applyBasis } from './design-basis/design-resistance.ts'
 import { type Notice, usualCautions } from './notice.ts'
-import type { GroupRequest, SinglePileRequest } from './requests.ts'
+import type { GroupRequest, SettlementRequest, SinglePileRequest } from './requests.ts'
 import { type BlockTerms, block } from './resistance/block.ts'
 import { group, sumOfPilesFormula } from './resistance/group.ts'
 import { calculatorPlaces, type ResistanceJob } from './resistance/job.ts'
 import { type PileTerms, singlePile } from './resistance/single-pile.ts'
+import { settlement } from './settlement/settlement.ts'
 import { type Plain, settleTerms, traceOf } from './trace/outcome.ts'
 import { Sheet } from './trace/sheet.ts'
 import type { Trace } from './trace/step.ts'
@@ -94,3 +95,8 @@ export const calculateGroup = (request: GroupRequest, option: TraceOption) =>
       allowableLoad: smaller('allowableLoad', 'R_a', 'allowable load of the group'),
     }
   })
+
+const settlementPlaces = { pile: '/pile', ground: '/ground', layout: '/layout', load: '/load' }
+
+export const calculateSettlement = (request: SettlementRequest, option: TraceOption) =>
+  answer(option, (sheet, notice) => settlement(sheet, request, settlementPlaces, notice))

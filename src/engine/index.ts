@@ -1,5 +1,5 @@
 /** The engine's only door. */
-export { type Answer, calculateBlock, calculateGroup, calculateSinglePile } from './calculators.ts'
+export { type Answer, calculateBlock, calculateGroup, calculateSettlement, calculateSinglePile } from './calculators.ts'
 export { methodCards } from './catalogue.ts'
 export { EngineFault } from './faults.ts'
 export { baseMethods, shaftMethods } from './methods/registry.ts'

@@ -69,6 +69,8 @@ export type SectionTerms = {
   /** Area that the base bears on: the enlarged base where there is one. */
   readonly baseArea: Term<'m2'>
   readonly baseWidth: Term<'m'>
+  /** Whole area within the outline of the shaft. */
+  readonly outline: Term<'m2'>
   /** Area of material, for weight and axial stiffness. */
   readonly material: Term<'m2'>
   readonly wall?: { readonly area: Term<'m2'>; readonly thickness: Term<'m'> }
@@ -88,7 +90,7 @@ export function sectionTerms(root: Sheet, pile: PileType, pointer: string): Sect
   const { section } = pile
   const at = `${pointer}/section`
   const own = shaftTerms(sheet, section, at)
-  if (pile.baseDiameter === undefined) return { ...own, baseArea: own.boxArea, baseWidth: own.width }
+  if (pile.baseDiameter === undefined) return { ...own, baseArea: own.outline, baseWidth: own.width }
   const baseWidth = sheet.input(
     { symbol: 'd_b', name: 'diameter of the enlarged base', unit: 'm' },
     pile.baseDiameter,
@@ -101,28 +103,28 @@ function shaftTerms(
   sheet: Sheet,
   section: Section,
   at: string,
-): Omit<SectionTerms, 'baseArea' | 'baseWidth'> & { boxArea: Term<'m2'> } {
+): Omit<SectionTerms, 'baseArea' | 'baseWidth'> & { outline: Term<'m2'> } {
   if (section.shape === 'h') {
     const h = sheet.input({ symbol: 'h', name: 'section depth', unit: 'm' }, section.depth, `${at}/depth`)
     const b = sheet.input({ symbol: 'b', name: 'flange width', unit: 'm' }, section.flangeWidth, `${at}/flangeWidth`)
     const width = sheet.choice({ symbol: 'd', name: 'width of the enclosing box', unit: 'm' }, 'largest', [h, b])
     const material = sheet.input({ symbol: 'A_s', name: 'steel area', unit: 'm2' }, section.area, `${at}/area`)
-    return { width, perimeter: sheet.step(boxPerimeter, { h, b }), boxArea: sheet.step(boxArea, { h, b }), material }
+    return { width, perimeter: sheet.step(boxPerimeter, { h, b }), outline: sheet.step(boxArea, { h, b }), material }
   }
   if (section.shape === 'square') {
     const width = sheet.input({ symbol: 'd', name: 'pile width', unit: 'm' }, section.width, `${at}/width`)
     const area = sheet.step(squareArea, { d: width })
-    return { width, perimeter: sheet.step(squarePerimeter, { d: width }), boxArea: area, material: area }
+    return { width, perimeter: sheet.step(squarePerimeter, { d: width }), outline: area, material: area }
   }
   const width = sheet.input({ symbol: 'd', name: 'pile diameter', unit: 'm' }, section.diameter, `${at}/diameter`)
   const perimeter = sheet.step(circlePerimeter, { d: width })
   const area = sheet.step(circleArea, { d: width })
-  if (section.shape === 'circular') return { width, perimeter, boxArea: area, material: area }
+  if (section.shape === 'circular') return { width, perimeter, outline: area, material: area }
   const thickness = sheet.input(
     { symbol: 't', name: 'wall thickness', unit: 'm' },
     section.wallThickness,
     `${at}/wallThickness`,
   )
   const wall = { area: sheet.step(wallArea, { d: width, t: thickness }), thickness }
-  return { width, perimeter, boxArea: area, material: wall.area, wall }
+  return { width, perimeter, outline: area, material: wall.area, wall }
 }

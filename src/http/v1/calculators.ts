@@ -3,6 +3,7 @@ import { Problem } from '../../errors.ts'
 import type { Options } from '../../operations/calculate.ts'
 import { calculateBlock } from '../../operations/calculate-block.ts'
 import { calculateGroup } from '../../operations/calculate-group.ts'
+import { calculateSettlement } from '../../operations/calculate-settlement.ts'
 import { calculateSinglePile } from '../../operations/calculate-single-pile.ts'
 
 /** `?trace=none` leaves the trace out; `?of=<pointer>` gives only the steps behind one part of the result. */
@@ -13,7 +14,12 @@ function optionsOf(request: FastifyRequest): Options {
   return { trace: trace === 'full', of }
 }
 
-const routes = { '/v1/single-pile': calculateSinglePile, '/v1/block': calculateBlock, '/v1/group': calculateGroup }
+const routes = {
+  '/v1/single-pile': calculateSinglePile,
+  '/v1/block': calculateBlock,
+  '/v1/group': calculateGroup,
+  '/v1/settlement': calculateSettlement,
+}
 
 /** The calculators: pure, nothing is stored. Plain JSON.stringify is the fastest serializer for replies of this size. */
 export function calculators(app: FastifyInstance): void {
