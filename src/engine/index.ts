@@ -1,4 +1,5 @@
 /** The engine's only door. */
+export { assess } from './assessment/assess.ts'
 export { type Answer, calculateBlock, calculateGroup, calculateSettlement, calculateSinglePile } from './calculators.ts'
 export { methodCards } from './catalogue.ts'
 export { EngineFault } from './faults.ts'

@@ -1,5 +1,6 @@
 import type { FastifyInstance, FastifyRequest } from 'fastify'
 import { Problem } from '../../errors.ts'
+import { assessSchedule } from '../../operations/assess-schedule.ts'
 import type { Options } from '../../operations/calculate.ts'
 import { calculateBlock } from '../../operations/calculate-block.ts'
 import { calculateGroup } from '../../operations/calculate-group.ts'
@@ -19,6 +20,7 @@ const routes = {
   '/v1/block': calculateBlock,
   '/v1/group': calculateGroup,
   '/v1/settlement': calculateSettlement,
+  '/v1/assessments': assessSchedule,
 }
 
 /** The calculators: pure, nothing is stored. Plain JSON.stringify is the fastest serializer for replies of this size. */

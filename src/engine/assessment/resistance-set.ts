@@ -1,0 +1,103 @@
+import { applyBasis } from '../design-basis/design-resistance.ts'
+import type { Notice } from '../notice.ts'
+import { type Point, positions } from '../piles/layout.ts'
+import { type RigidCap, rigidCap } from '../piles/rigid-cap.ts'
+import type { BlockTerms } from '../resistance/block.ts'
+import { group, sumOfPilesFormula } from '../resistance/group.ts'
+import type { GroupJob } from '../resistance/job.ts'
+import type { PileTerms } from '../resistance/single-pile.ts'
+import { type ElasticGroup, elasticGroup } from '../settlement/group.ts'
+import { randolphWroth } from '../settlement/randolph-wroth-1978.ts'
+import { interactionOf } from '../settlement/settlement.ts'
+import type { Sheet } from '../trace/sheet.ts'
+import type { Term } from '../trace/term.ts'
+import type { Cap, Schedule } from './schedule.ts'
+
+/** Resistances that a combination is checked against, after the design basis. */
+export type Safe = { readonly pile: Term<'kN'>; readonly piles: Term<'kN'>; readonly block: Term<'kN'> }
+
+/** What one pile type in one ground under one layout resists and how it moves: computed once, used by every cap and combination. */
+export type ResistanceSet = {
+  readonly points: readonly Point[]
+  readonly pileCount: Term<'1'>
+  readonly single: PileTerms
+  readonly block: BlockTerms
+  readonly compression: Safe
+  /** Computed when the first cap is pulled. */
+  readonly uplift: () => Safe
+  readonly statics: RigidCap
+  readonly elastic: ElasticGroup
+  readonly pileStiffness: Term<'kN/m'>
+  readonly notices: readonly Notice[]
+}
+
+export function resistanceSet(root: Sheet, schedule: Schedule, cap: Cap, index: number, id: number): ResistanceSet {
+  const sheet = root.within(`resistance/${id}`)
+  const notices = new Map<string, Notice>()
+  const notice = (n: Notice) => notices.set(n.text + (n.pointer ?? ''), n)
+  const pile = schedule.pileTypes[cap.pileType]!
+  const ground = schedule.ground[cap.ground]!
+  const escaped = (name: string) => name.replaceAll('~', '~0').replaceAll('/', '~1')
+  const at = {
+    pile: `/pileTypes/${escaped(cap.pileType)}`,
+    ground: `/ground/${escaped(cap.ground)}`,
+    layout: `/caps/${index}/layout`,
+    methods: '/methods',
+    designBasis: '/designBasis',
+  }
+  const basis = schedule.designBasis
+  const job = (direction: 'compression' | 'uplift'): GroupJob => ({
+    pile,
+    ground,
+    methods: schedule.methods ?? {},
+    direction,
+    designBasis: basis,
+    layout: cap.layout,
+    at,
+    notice,
+  })
+  const safe = (here: Sheet, direction: 'compression' | 'uplift') => {
+    const terms = group(here, job(direction))
+    const { single, block } = terms
+    const part = (
+      kind: 'pile' | 'block',
+      shaft: Term<'kN'>,
+      base: Term<'kN'>,
+      ultimate: Term<'kN'>,
+      weight: Term<'kN'> | undefined,
+    ): Term<'kN'> => {
+      const s = applyBasis(
+        here.within(`design/${kind}`),
+        basis,
+        { part: `${kind}-${direction}`, shaft, base, ultimate, weight, installation: pile.installation },
+        at.designBasis,
+      )
+      return (s.designResistance ?? s.allowableLoad)!
+    }
+    const one = part('pile', single.shaftResistance, single.baseResistance, single.ultimateResistance, single.weight)
+    const whole = part('block', block.sideResistance, block.baseResistance, block.ultimateResistance, block.weight)
+    const piles = here.within('design').step(sumOfPilesFormula, { n: terms.pileCount, R: one }, 'sum')
+    return { terms, safe: { pile: one, piles, block: whole } }
+  }
+  const compression = safe(sheet, 'compression')
+  let uplift: Safe | undefined
+  const stiff = randolphWroth(sheet.within('settlement'), pile, ground, { ...at, load: '/loads' }, notice)
+  const points = positions(cap.layout)
+  return {
+    points,
+    pileCount: compression.terms.pileCount,
+    single: compression.terms.single,
+    block: compression.terms.block,
+    compression: compression.safe,
+    uplift: () => {
+      uplift ??= safe(sheet.within('uplift'), 'uplift').safe
+      return uplift
+    },
+    statics: rigidCap(points),
+    elastic: elasticGroup(points, stiff.stiffness.value, interactionOf(stiff)),
+    pileStiffness: stiff.stiffness,
+    get notices() {
+      return [...notices.values()]
+    },
+  }
+}
