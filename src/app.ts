@@ -7,6 +7,7 @@ import { probes } from './http/probes.ts'
 import { problems, sendProblem } from './http/problems.ts'
 import { calculators } from './http/v1/calculators.ts'
 import { getMethod, listMethods, listSources } from './operations/list-methods.ts'
+import { replayTrace } from './operations/replay-trace.ts'
 
 /** Composes the service, in reading order. */
 export async function buildApp(config: Config): Promise<FastifyInstance> {
@@ -23,6 +24,7 @@ export async function buildApp(config: Config): Promise<FastifyInstance> {
   problems(app, config.BODY_LIMIT)
   probes(app)
   calculators(app)
+  app.post('/v1/replay', async (request) => replayTrace(request.body))
   app.get('/v1/methods', async () => listMethods())
   app.get<{ Params: { id: string } }>('/v1/methods/:id', async (request) => getMethod(request.params.id))
   app.get('/v1/sources', async () => listSources())

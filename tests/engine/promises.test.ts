@@ -2,7 +2,7 @@ import fc from 'fast-check'
 import { expect, test } from 'vitest'
 import { EngineFault } from '../../src/engine/faults.ts'
 import type { Answer } from '../../src/engine/index.ts'
-import { calculateBlock, calculateGroup, calculateSinglePile } from '../../src/engine/index.ts'
+import { calculateBlock, calculateGroup, calculateSinglePile, replay } from '../../src/engine/index.ts'
 import type { GroupRequest } from '../../src/engine/requests.ts'
 
 /** Ground that every method can answer: all parameters given. */
@@ -154,6 +154,7 @@ test('closed, complete, replayable, and the same with the trace off: 1000 genera
       complete(answer)
       expect(calculate(input, { trace: false }).result).toEqual(answer.result)
       expect(JSON.stringify(calculate(input, { trace: true }))).toBe(JSON.stringify(answer))
+      expect(replay(answer.trace!, input).steps.filter((step) => !step.holds)).toEqual([])
     }),
     { numRuns: 1000 },
   )

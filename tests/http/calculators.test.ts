@@ -211,3 +211,14 @@ test('2000 mutated requests: never a 5xx, each pointer resolves', { timeout: 120
     { numRuns: 2000 },
   )
 })
+
+test('a trace sent back holds, and a bent one names its step', async () => {
+  const { trace } = (await post('/v1/single-pile', request)).json()
+  const whole = (await post('/v1/replay', { trace, request })).json().result
+  expect(whole).toMatchObject({ holds: true, count: trace.steps.length })
+  const bent = trace.steps.findIndex((s: { kind: string }) => s.kind === 'formula')
+  trace.steps[bent].value *= 1.001
+  const { result } = (await post('/v1/replay', { trace, request })).json()
+  expect(result.steps.filter((s: { holds: boolean }) => !s.holds)).toHaveLength(1)
+  expect(result.steps[bent].holds).toBe(false)
+})
