@@ -1,6 +1,7 @@
 import fastify, { type FastifyInstance } from 'fastify'
 import type { Config } from './config.ts'
 import { limits } from './contract/limits.ts'
+import { openapi } from './contract/openapi.ts'
 import { Problem } from './errors.ts'
 import { graphqlPlugin } from './graphql/plugin.ts'
 import { probes } from './http/probes.ts'
@@ -24,6 +25,8 @@ export async function buildApp(config: Config): Promise<FastifyInstance> {
   problems(app, config.BODY_LIMIT)
   probes(app)
   calculators(app)
+  const document = JSON.stringify(openapi())
+  app.get('/openapi.json', async (_, reply) => reply.type('application/json; charset=utf-8').send(document))
   app.post('/v1/replay', async (request) => replayTrace(request.body))
   app.get('/v1/methods', async () => listMethods())
   app.get<{ Params: { id: string } }>('/v1/methods/:id', async (request) => getMethod(request.params.id))

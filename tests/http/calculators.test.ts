@@ -222,3 +222,16 @@ test('a trace sent back holds, and a bent one names its step', async () => {
   expect(result.steps.filter((s: { holds: boolean }) => !s.holds)).toHaveLength(1)
   expect(result.steps[bent].holds).toBe(false)
 })
+
+test('the OpenAPI document states the unit and bounds of quantities, and every route of version 1', async () => {
+  const document = (await app.inject('/openapi.json')).json()
+  expect(document.openapi).toMatch(/^3\.1/)
+  const registered = app
+    .printRoutes({ commonPrefix: false })
+    .match(/v1\/[a-z-]+/g)!
+    .map((path) => `/${path}`)
+  expect(registered.length).toBeGreaterThan(8)
+  for (const path of registered) expect(Object.keys(document.paths)).toContain(path)
+  const pile = document.paths['/v1/single-pile'].post.requestBody.content['application/json'].schema.properties.pile
+  expect(pile.properties.length).toMatchObject({ 'x-unit': 'm', exclusiveMinimum: 0, maximum: 500 })
+})
