@@ -7,6 +7,7 @@ import { graphqlPlugin } from './graphql/plugin.ts'
 import { probes } from './http/probes.ts'
 import { problems, sendProblem } from './http/problems.ts'
 import { calculators } from './http/v1/calculators.ts'
+import { acceptMultipart } from './http/v1/schedule-body.ts'
 import { getMethod, listMethods, listSources } from './operations/list-methods.ts'
 import { replayTrace } from './operations/replay-trace.ts'
 
@@ -24,6 +25,7 @@ export async function buildApp(config: Config): Promise<FastifyInstance> {
   app.removeContentTypeParser('text/plain')
   problems(app, config.BODY_LIMIT)
   probes(app)
+  await acceptMultipart(app, config.BODY_LIMIT)
   calculators(app)
   const document = JSON.stringify(openapi())
   app.get('/openapi.json', async (_, reply) => reply.type('application/json; charset=utf-8').send(document))

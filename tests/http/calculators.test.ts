@@ -18,7 +18,7 @@ const { cases } = JSON.parse(readFileSync(new URL('../published/capacity.json', 
 
 let app: FastifyInstance
 beforeAll(async () => {
-  app = await buildApp(readConfig({ LOG_LEVEL: 'silent', BODY_LIMIT: '100000' }))
+  app = await buildApp(readConfig({ LOG_LEVEL: 'silent', BODY_LIMIT: '150000' }))
 })
 afterAll(() => app.close())
 
@@ -234,4 +234,35 @@ test('the OpenAPI document states the unit and bounds of quantities, and every r
   for (const path of registered) expect(Object.keys(document.paths)).toContain(path)
   const pile = document.paths['/v1/single-pile'].post.requestBody.content['application/json'].schema.properties.pile
   expect(pile.properties.length).toMatchObject({ 'x-unit': 'm', exclusiveMinimum: 0, maximum: 500 })
+})
+
+const example = JSON.parse(readFileSync(new URL('../../schema/examples/assessment.json', import.meta.url), 'utf8'))
+function form(csv: string) {
+  const { rows: _, ...loads } = example.loads
+  const data = new FormData()
+  data.set('schedule', JSON.stringify({ ...example, loads }))
+  data.set('loads', new Blob([csv], { type: 'text/csv' }), 'loads.csv')
+  return app.inject({ method: 'POST', url: '/v1/assessments?trace=none', payload: data as never })
+}
+const columns = ['cap', 'combination', 'Fx', 'Fy', 'Fz', 'Mx', 'My', 'Mz']
+const lines = example.loads.rows.map((row: Record<string, unknown>) => columns.map((c) => row[c]).join(','))
+
+test('loads as CSV give the answer of the same rows in JSON', async () => {
+  const [csv, json] = [
+    await form([columns.join(','), ...lines].join('\n')),
+    await post('/v1/assessments?trace=none', example),
+  ]
+  expect(csv.statusCode, csv.body).toBe(200)
+  expect(csv.json()).toEqual(json.json())
+})
+
+test('text where a number stands, and a missing column, are told with line and column', async () => {
+  const bent = [...lines]
+  bent[3] = bent[3].replace(/,[^,]*$/, ',oops')
+  expect((await form([columns.join(','), ...bent].join('\n'))).json().errors).toMatchObject([
+    { pointer: '/loads/rows/3/Mz', code: 'csv-malformed', line: 5, column: 'Mz' },
+  ])
+  expect((await form(['cap,combination,Fx,Fy,Mx,My,Mz', 'A1,W1,0,0,1,1,1'].join('\n'))).json().errors).toMatchObject([
+    { code: 'csv-malformed', column: 'Fz' },
+  ])
 })

@@ -6,6 +6,7 @@ import { calculateBlock } from '../../operations/calculate-block.ts'
 import { calculateGroup } from '../../operations/calculate-group.ts'
 import { calculateSettlement } from '../../operations/calculate-settlement.ts'
 import { calculateSinglePile } from '../../operations/calculate-single-pile.ts'
+import { scheduleBody } from './schedule-body.ts'
 
 /** `?trace=none` leaves the trace out; `?of=<pointer>` gives only the steps behind one part of the result. */
 function optionsOf(request: FastifyRequest): Options {
@@ -27,7 +28,9 @@ const routes = {
 export function calculators(app: FastifyInstance): void {
   for (const [url, operation] of Object.entries(routes)) {
     app.post(url, async (request, reply) =>
-      reply.type('application/json; charset=utf-8').send(JSON.stringify(operation(request.body, optionsOf(request)))),
+      reply
+        .type('application/json; charset=utf-8')
+        .send(JSON.stringify(operation(await scheduleBody(request), optionsOf(request)))),
     )
   }
 }

@@ -1,0 +1,72 @@
+import { parse } from 'csv-parse/sync'
+import { type ProblemError, problemError, problemOf } from '../errors.ts'
+
+const names = ['cap', 'combination'] as const
+const components = { pressing: ['V', 'Mx', 'My'], model: ['Fx', 'Fy', 'Fz', 'Mx', 'My', 'Mz'] } as const
+/** So many faults are told one by one; a file that is wrong throughout needs no longer list. */
+const MOST_FAULTS = 100
+
+/**
+ * Rows of loads from CSV with a header. Cells become numbers; other columns are refused.
+ * Throws one problem with every fault, each with its line in the file (the header is line 1) and its column.
+ */
+export function csvRows(text: string, signs: unknown): Record<string, string | number>[] {
+  const wanted = components[signs === 'pressing' ? 'pressing' : 'model']
+  let records: string[][]
+  try {
+    records = parse(text, { bom: true, skip_empty_lines: true, trim: true, relax_column_count: true })
+  } catch (fault) {
+    throw problemOf([problemError('/loads', 'csv-malformed', { reason: (fault as Error).message })])
+  }
+  const header = records[0] ?? []
+  const expected = [...names, ...wanted]
+  const faults: ProblemError[] = [
+    ...expected
+      .filter((c) => !header.includes(c))
+      .map((column) =>
+        problemError('/loads', 'csv-malformed', {
+          reason: `The column ${column} is missing; the header has ${header.join(', ') || 'nothing'}`,
+          column,
+        }),
+      ),
+    ...header
+      .filter((c) => !(expected as string[]).includes(c))
+      .map((column) =>
+        problemError('/loads', 'csv-malformed', {
+          reason: `The column ${column} is not known; expected ${expected.join(', ')}`,
+          column,
+        }),
+      ),
+  ]
+  if (faults.length > 0) throw problemOf(faults)
+  const rows = records.slice(1).map((cells, index) => {
+    const line = index + 2
+    const row: Record<string, string | number> = {}
+    for (const [i, column] of header.entries()) {
+      const cell = cells[i] ?? ''
+      const isName = column === 'cap' || column === 'combination'
+      const value = isName ? cell : Number(cell)
+      if (cell === '' || (!isName && !Number.isFinite(value))) {
+        faults.push(
+          problemError(`/loads/rows/${index}/${column}`, 'csv-malformed', {
+            reason: `Line ${line}, column ${column}: read "${cell}", expected ${isName ? 'a name' : 'a number'}`,
+            line,
+            column,
+            got: cell,
+          }),
+        )
+      }
+      row[column] = value
+    }
+    if (cells.length !== header.length)
+      faults.push(
+        problemError(`/loads/rows/${index}`, 'csv-malformed', {
+          reason: `Line ${line} has ${cells.length} cells, the header ${header.length}`,
+          line,
+        }),
+      )
+    return row
+  })
+  if (faults.length > 0) throw problemOf(faults.slice(0, MOST_FAULTS))
+  return rows
+}
