@@ -1,5 +1,5 @@
-import { refuse } from '../faults.ts'
-import { SAME_DEPTH, type Stratum, strata } from '../ground/depths.ts'
+import { EngineFault, refuse } from '../faults.ts'
+import { SAME_DEPTH, type Stratum, strata, stratumAt } from '../ground/depths.ts'
 import { layerParameter } from '../ground/parameters.ts'
 import type { GroundProfile } from '../ground/profile-types.ts'
 import { layerBoundary } from '../ground/stress.ts'
@@ -34,8 +34,30 @@ export const weighted = formula({
   source: statics('mean'),
 })
 
+const METHOD = 'randolph-wroth-1978'
+
+/** Names every layer along the shaft and under the toe that lacks its modulus, all at once. */
+function demandModulus(layers: readonly Stratum[], reach: { head: number; toe: number }, pointer: string): void {
+  const under = stratumAt(layers, reach.toe)
+  const lacking = layers.filter(
+    (s) =>
+      s.layer.youngsModulus === undefined &&
+      (s === under || Math.min(s.bottom, reach.toe) - Math.max(s.top, reach.head) > SAME_DEPTH),
+  )
+  const byIndex = new Map(lacking.map((s) => [s.index, s]))
+  if (byIndex.size === 0) return
+  throw new EngineFault(
+    [...byIndex.values()].map((s) => ({
+      pointer: `${pointer}/layers/${s.index}`,
+      code: 'missing-parameter' as const,
+      facts: { layer: s.layer.name, parameter: 'youngsModulus', method: METHOD },
+    })),
+  )
+}
+
 export type Stiffness = { readonly E: Term<'kPa'>; readonly nu: Term<'1'>; readonly G: Term<'kPa'> }
 export type ElasticGround = {
+  /** Top down; a layer that is carried on stands a second time, below its own bottom. */
   readonly layers: readonly Stratum[]
   /** Stiffness at a depth within a stratum. */
   readonly at: (here: Sheet, stratum: Stratum, depth: Term<'m'>) => Stiffness
@@ -43,29 +65,44 @@ export type ElasticGround = {
   readonly bottom: (index: number) => Term<'m'>
 }
 
-/** The elastic side of a ground profile. A last layer with a thickness is carried on, with a notice. */
+/** The elastic side of a ground profile. A last layer with a thickness is carried on, with a notice; it keeps the modulus of its bottom. */
 export function elasticGround(
   root: Sheet,
   profile: GroundProfile,
-  pointer: string,
-  toe: number,
+  at: { readonly pile: string; readonly ground: string },
+  reach: { readonly head: number; readonly toe: number },
   notice: (n: Notice) => void,
 ): ElasticGround {
+  const pointer = at.ground
   const known = strata(profile, pointer)
   const last = known.at(-1)!
-  if (toe > last.bottom + SAME_DEPTH)
-    refuse('pile-below-known-ground', '/pile/length', { toeDepth: toe, knownDepth: last.bottom, unit: 'm' })
-  if (Number.isFinite(last.bottom) && !profile.rigidBase) {
+  const ends = Number.isFinite(last.bottom)
+  if (profile.rigidBase && reach.toe > last.bottom + SAME_DEPTH)
+    refuse('pile-below-known-ground', `${at.pile}/length`, {
+      toeDepth: reach.toe,
+      knownDepth: last.bottom,
+      unit: 'm',
+    })
+  if (ends && !profile.rigidBase) {
     notice({
       code: 'ground-carried-on',
-      level: 'info',
+      level: reach.toe > last.bottom + SAME_DEPTH ? 'warning' : 'info',
       pointer: `${pointer}/layers/${last.index}`,
       text: `${last.layer.name} was carried on below ${last.bottom.toFixed(1)} m for the settlement.`,
     })
   }
-  const layers = profile.rigidBase
-    ? known
-    : known.map((s) => (s === last ? { ...s, bottom: Number.POSITIVE_INFINITY } : s))
+  if (profile.rigidBase) {
+    notice({
+      code: 'approximation',
+      level: 'caution',
+      pointer: `${pointer}/rigidBase`,
+      text: 'randolph-wroth-1978 knows no rigid base: the settlement leaves out its restraint and is on the high side.',
+    })
+  }
+  const carried: Stratum | undefined =
+    ends && !profile.rigidBase ? { ...last, top: last.bottom, bottom: Number.POSITIVE_INFINITY } : undefined
+  const layers = carried ? [...known, carried] : known
+  demandModulus(layers, reach, pointer)
   const sheet = root.within('ground')
   const bottom = (index: number): Term<'m'> => {
     const { layer } = known[index]!
@@ -91,15 +128,16 @@ export function elasticGround(
   return {
     layers,
     bottom: (index) => bottoms[index]!,
-    at: (here, stratum, depth) => {
-      const at = `${pointer}/layers/${stratum.index}`
+    at: (here, stratum, asked) => {
+      const place = `${pointer}/layers/${stratum.index}`
+      const beyond = stratum === carried
       const E = layerParameter(
         root,
         here,
-        stratum,
-        at,
-        depth,
-        { name: 'youngsModulus', symbol: 'E', unit: 'kPa', method: 'randolph-wroth-1978' },
+        beyond ? last : stratum,
+        place,
+        beyond ? bottoms[last.index]! : asked,
+        { name: 'youngsModulus', symbol: 'E', unit: 'kPa', method: METHOD },
         undefined,
       )
       const label = { symbol: 'nu', name: `Poisson's ratio of ${stratum.layer.name}`, unit: '1' } as const
@@ -113,7 +151,7 @@ export function elasticGround(
               practice("Poisson's ratio, undrained clay 0.5, else 0.3"),
               `${stratum.index}/nu`,
             )
-          : sheet.input(label, poissonsRatio, `${at}/poissonsRatio`, `${stratum.index}/nu`)
+          : sheet.input(label, poissonsRatio, `${place}/poissonsRatio`, `${stratum.index}/nu`)
       return { E, nu, G: here.step(shearModulus, { E, nu }) }
     },
   }

@@ -18,6 +18,8 @@ export type ElasticGroup = {
   /** Settlements of piles under given loads, m. */
   readonly settlements: (loads: Float64Array) => Float64Array
   readonly plane: (load: CapLoad, pointer: string) => Plane
+  /** Refuses a moment about an axis across which no pile stands. */
+  readonly assertTaken: (load: CapLoad, pointer: string) => void
 }
 
 /** Second moments below this share of the larger one mean a single line of piles. */
@@ -73,6 +75,17 @@ export function elasticGroup(
   }
   const settlements = (loads: Float64Array) =>
     Float64Array.from({ length: n }, (_, i) => dot(matrix.subarray(i * n, (i + 1) * n), loads))
+  const atCentroid = (load: CapLoad) => ({ Mx: load.Mx - load.V * centroid.y, My: load.My - load.V * centroid.x })
+  const reach = Math.max(...points.map((p) => Math.hypot(p.x, p.y)))
+  const assertTaken = (load: CapLoad, pointer: string) => {
+    if (axes.length === 2) return
+    const { Mx, My } = atCentroid(load)
+    const [u] = axes
+    const left = u ? Math.abs(My * -u.y + Mx * u.x) : Math.hypot(Mx, My)
+    // V on a line that passes the origin by rounding only leaves a moment of rounding.
+    const size = Math.hypot(load.Mx, load.My) + Math.abs(load.V) * reach
+    if (left > 1e-9 * size) refuse('line-cannot-take-moment', pointer, { moment: left, piles: n })
+  }
   return {
     points,
     centroid,
@@ -83,13 +96,10 @@ export function elasticGroup(
       solveFactored(factored, n, b)
       return b
     },
+    assertTaken,
     plane: (load, pointer) => {
-      const My = load.My - load.V * centroid.x
-      const Mx = load.Mx - load.V * centroid.y
-      const taken = axes.reduce((sum, u) => sum + (My * u.x + Mx * u.y) ** 2, 0)
-      const left = My ** 2 + Mx ** 2 - taken
-      if (left > 1e-12 * (My ** 2 + Mx ** 2) + 1e-12)
-        refuse('line-cannot-take-moment', pointer, { moment: Math.sqrt(left), piles: n })
+      assertTaken(load, pointer)
+      const { Mx, My } = atCentroid(load)
       const f = (r: number) =>
         flexibility[r * 3]! * load.V + flexibility[r * 3 + 1]! * My + flexibility[r * 3 + 2]! * Mx
       return { centre: f(0), alongX: f(1), alongY: f(2) }

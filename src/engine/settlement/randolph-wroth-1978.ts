@@ -1,3 +1,4 @@
+import { refuse } from '../faults.ts'
 import { SAME_DEPTH, stratumAt } from '../ground/depths.ts'
 import type { GroundProfile } from '../ground/profile-types.ts'
 import type { Notice } from '../notice.ts'
@@ -148,6 +149,19 @@ export type SettlementPlaces = {
   readonly load: string
 }
 
+/** Rounding of thickness sums must not raise a notice. */
+const SLACK = 1e-6
+
+/** The paper treats ground whose stiffness is even or grows with depth, on a base as stiff or stiffer. */
+function judgeGround(xi: number, rho: number, pointer: string, notice: (n: Notice) => void): void {
+  const say = (text: string) =>
+    notice({ code: 'outside-range', level: 'caution', pointer, text: `randolph-wroth-1978: ${text}` })
+  if (xi > 1 + SLACK)
+    say('the ground below the toe is softer than at the toe; the paper treats equal or stiffer ground.')
+  if (rho < 0.5 - SLACK || rho > 1 + SLACK)
+    say(`the inhomogeneity ratio is ${rho.toFixed(2)}; the paper treats 0.5 to 1.`)
+}
+
 /**
  * Stiffness of one pile in layered elastic ground by the closed form of Randolph & Wroth (1978).
  * An approximation: against converged solutions it lies 7 to 10 % low in settlement at L/d = 10 and up to 18 % high for long compressible piles.
@@ -179,17 +193,17 @@ export function randolphWroth(
           practice("Young's modulus of the material"),
         )
       : own.input(modulus, pile.youngsModulus, `${at.pile}/youngsModulus`)
-  const elastic = elasticGround(sheet, ground, at.ground, D.value, notice)
+  const elastic = elasticGround(sheet, ground, at, { head: z_h.value, toe: D.value }, notice)
   const here = sheet.within('stiffness')
   const parts: Term<'kN/m'>[] = []
   let toe: ReturnType<typeof elastic.at> | undefined
-  for (const stratum of elastic.layers) {
+  for (const [place, stratum] of elastic.layers.entries()) {
     const from = Math.max(stratum.top, z_h.value)
     const to = Math.min(stratum.bottom, D.value)
     if (to - from <= SAME_DEPTH) continue
-    const part = here.within(`${stratum.index}`)
-    const z_t = from === z_h.value ? z_h : elastic.bottom(stratum.index - 1)
-    const z_b = to === D.value ? D : elastic.bottom(stratum.index)
+    const part = here.within(`${place}`)
+    const z_t = from === z_h.value ? z_h : elastic.bottom(place - 1)
+    const z_b = to === D.value ? D : elastic.bottom(place)
     const mean = elastic.at(part, stratum, part.step(middle, { z_t, z_b }))
     parts.push(part.step(weighted, { G: mean.G, z_b, z_t }))
     if (D.value <= stratum.bottom + SAME_DEPTH) toe = elastic.at(here.within('toe'), stratum, D)
@@ -211,6 +225,13 @@ export function randolphWroth(
     G_L,
   })
   const r_m = here.step(influenceRadius, { xi, rho, nu, L })
+  judgeGround(xi.value, rho.value, at.ground, notice)
+  if (r_m.value <= r_0.value)
+    refuse('method-not-applicable', at.ground, {
+      method: 'randolph-wroth-1978',
+      reason:
+        'randolph-wroth-1978 finds no zone of influence around the shaft: the ground at the toe is too much stiffer than along the shaft',
+    })
   const zeta = here.step(zetaFormula, { r_m, r_0 })
   const mu_L = here.step(muFormula, { zeta, lambda, L, r_0 })
   const b = here.step(baseNumber, { eta, nu, xi })
