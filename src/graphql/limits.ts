@@ -12,7 +12,7 @@ export const limits = {
 } as const
 
 /** Cost of a field at the root, about its computing time; one that is not listed costs 1. */
-export const rootCosts: Readonly<Record<string, number>> = { singlePile: 5, block: 5, group: 10 }
+export const rootCosts: Readonly<Record<string, number>> = { singlePile: 5, block: 5, group: 10, settlement: 10 }
 
 /** Parsed and compiled documents that are kept. */
 export const cachedDocuments = 256

@@ -34,6 +34,8 @@ export type Query = {
   readonly block: BlockAnswer;
   /** Sum of the single piles against the block: what governs. */
   readonly group: GroupAnswer;
+  /** Settlement of one pile and of a group: tilt, pile loads, stiffness. */
+  readonly settlement: SettlementAnswer;
   /** Every method, with its source and range of validity. */
   readonly methods: ReadonlyArray<Method>;
   /** One method; null where the id is unknown. An id may stand for several roles (shaft and base): kind tells them apart, else the first is given. */
@@ -57,6 +59,11 @@ export type QueryBlockArgs = {
 
 export type QueryGroupArgs = {
   request: GroupRequestInput;
+};
+
+
+export type QuerySettlementArgs = {
+  request: SettlementRequestInput;
 };
 
 
@@ -422,7 +429,8 @@ export type GroupSettlement = {
   readonly __typename?: 'GroupSettlement';
   /** mm, at the centroid of the piles; of a flexible cap the mean */
   readonly settlement: Scalars['Float']['output'];
-  readonly settlementRatio: Scalars['Float']['output'];
+  /** left out where there is no vertical load */
+  readonly settlementRatio?: Maybe<Scalars['Float']['output']>;
   readonly tilt: Tilt;
   /** In the order of the layout. */
   readonly piles: ReadonlyArray<PileSettlement>;
@@ -832,6 +840,7 @@ export type QueryResolvers<ContextType = MercuriusContext, ParentType extends Re
   singlePile?: Resolver<ResolversTypes['SinglePileAnswer'], ParentType, ContextType, RequireFields<QuerySinglePileArgs, 'request'>>;
   block?: Resolver<ResolversTypes['BlockAnswer'], ParentType, ContextType, RequireFields<QueryBlockArgs, 'request'>>;
   group?: Resolver<ResolversTypes['GroupAnswer'], ParentType, ContextType, RequireFields<QueryGroupArgs, 'request'>>;
+  settlement?: Resolver<ResolversTypes['SettlementAnswer'], ParentType, ContextType, RequireFields<QuerySettlementArgs, 'request'>>;
   methods?: Resolver<ReadonlyArray<ResolversTypes['Method']>, ParentType, ContextType>;
   method?: Resolver<Maybe<ResolversTypes['Method']>, ParentType, ContextType, RequireFields<QueryMethodArgs, 'id'>>;
   sources?: Resolver<ReadonlyArray<ResolversTypes['Source']>, ParentType, ContextType>;
@@ -947,7 +956,7 @@ export type SinglePileSettlementResolvers<ContextType = MercuriusContext, Parent
 
 export type GroupSettlementResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['GroupSettlement'] = ResolversParentTypes['GroupSettlement']> = {
   settlement?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
-  settlementRatio?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
+  settlementRatio?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
   tilt?: Resolver<ResolversTypes['Tilt'], ParentType, ContextType>;
   piles?: Resolver<ReadonlyArray<ResolversTypes['PileSettlement']>, ParentType, ContextType>;
   stiffness?: Resolver<ResolversTypes['GroupStiffness'], ParentType, ContextType>;

@@ -23,6 +23,7 @@ export function resolvers(bodyBytes: number): Resolvers {
       singlePile: calculator(calculators.singlePile),
       block: calculator(calculators.block),
       group: calculator(calculators.group),
+      settlement: calculator(calculators.settlement),
       methods,
       method: (_parent, { id, kind }) =>
         methods().find((method) => method.id === id && (!kind || method.kind === kind)) ?? null,
