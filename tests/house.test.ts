@@ -270,6 +270,14 @@ test('only main.ts reads the environment', () => {
   expect(sources.filter((s) => /\bprocess\.env\b/.test(s.text)).map((s) => s.path)).toEqual(['main.ts'])
 })
 
+test('what src/ imports is a runtime dependency: the container installs nothing else', () => {
+  const { dependencies } = JSON.parse(readFileSync(`${root}../package.json`, 'utf8')) as { dependencies: object }
+  const packages = imports.filter((i) => !isLocal(i.to) && !i.typeOnly && !i.to.startsWith('node:')).map((i) => i.to)
+  expect(packages).toContain('fastify')
+  const names = packages.map((to) => to.match(/^(@[^/]+\/)?[^/]+/)![0])
+  expect([...new Set(names)].filter((name) => !Object.hasOwn(dependencies, name))).toEqual([])
+})
+
 /** Too long today: to be split. Exact, like the debts above. */
 const toSplit = ['engine/assessment/assess-cap.ts']
 /** Data, and what is generated. */

@@ -15,7 +15,12 @@ export async function scheduleBody(request: FastifyRequest): Promise<unknown> {
   if (!request.isMultipart()) return request.body
   const parts: Record<string, string> = {}
   for await (const part of request.parts())
-    parts[part.fieldname] = part.type === 'file' ? (await part.toBuffer()).toString('utf8') : String(part.value)
+    parts[part.fieldname] =
+      part.type === 'file'
+        ? (await part.toBuffer()).toString('utf8')
+        : typeof part.value === 'string'
+          ? part.value
+          : JSON.stringify(part.value)
   const missing = ['schedule', 'loads'].filter((name) => parts[name] === undefined)
   if (missing.length > 0) throw problemOf(missing.map((field) => problemError('', 'missing-field', { field })))
   let schedule: { loads?: { signs?: unknown } }
