@@ -17,7 +17,7 @@ const written: Readonly<Record<string, string>> = {
   'kN/m3': 'kN/m^3',
   'kN.m': 'kN m',
   'kN.m/rad': 'kN m',
-  'rad/(kN.m)': '(kN m)^-1',
+  'rad/(kN.m)': 'kN^-1 m^-1',
   'm/kN': 'm/kN',
   deg: 'deg',
   rad: 'rad',

@@ -1,3 +1,4 @@
+import { quantityKind } from '../quantities/quantity-kind.ts'
 import type { OperandLine, Step } from '../trace/step.ts'
 import { evaluateFormula } from './evaluator.ts'
 
@@ -56,10 +57,11 @@ function closed(step: Step, origins: ReadonlyMap<string, { step: Step; holds: bo
 
 function verdict(step: Step, uses: readonly OperandLine[], request: unknown): string | { found: number } | undefined {
   if (!Number.isFinite(step.value)) return 'the value is not a finite number'
+  if (quantityKind(step.unit) !== step.quantity) return `the unit ${step.unit} does not measure a ${step.quantity}`
   try {
     switch (step.kind) {
       case 'formula':
-        return match(step.value, evaluateFormula(step.formula, step.operands, step.unit))
+        return match(step.value, evaluateFormula(step.formula, step.operands, step.unit), roundingOf(step))
       case 'sum':
         return step.operands.some((o) => o.unit !== step.unit)
           ? 'the parts are in other units'
@@ -85,7 +87,14 @@ function verdict(step: Step, uses: readonly OperandLine[], request: unknown): st
   }
 }
 
-const match = (printed: number, found: number) => (same(printed, found) ? undefined : { found })
+const match = (printed: number, found: number, rounding = 0) =>
+  same(printed, found) || Math.abs(printed - found) <= rounding ? undefined : { found }
+
+/** What rounding leaves where operands cancel to nothing: a few units in the last place of the largest operand of the step's own unit. */
+const roundingOf = (step: Step & { kind: 'formula' }): number =>
+  step.operands.reduce((most, o) => (o.unit === step.unit ? Math.max(most, Math.abs(o.value)) : most), 0) *
+  64 *
+  Number.EPSILON
 
 /** A value that nothing re-computes: wrong where all its users printed another one alike. */
 function given(step: Step, uses: readonly OperandLine[]): string | undefined {

@@ -241,7 +241,11 @@ const unknownsOf = (plane: Plane) => [
 /** What the pile loads leave of V, My, Mx, relative to the loads and their levers. */
 function equilibrium(loads: Float64Array, { places, load }: GroupJob) {
   const total = (weight: (i: number) => number) => loads.reduce((sum, p, i) => sum + p * weight(i), 0)
-  const size = (weight: (i: number) => number) => loads.reduce((sum, p, i) => sum + Math.abs(p * weight(i)), 1e-30)
+  // Against the loads times the largest arm: moments that all vanish would leave nothing to compare with.
+  const size = (weight: (i: number) => number) => {
+    const arm = places.reduce((most, _, i) => Math.max(most, Math.abs(weight(i))), 0)
+    return loads.reduce((sum, p) => sum + Math.abs(p), 0) * arm + 1e-30
+  }
   const left = (name: string, weight: (i: number) => number, given: number) => ({
     name: `${name}, relative`,
     value: Math.abs(total(weight) - given) / (size(weight) + Math.abs(given)),

@@ -1,0 +1,4 @@
+import fc from 'fast-check'
+
+/** One seed for every run, so that the same commit always gives the same verdict; `SEED=… npm test` explores others. */
+fc.configureGlobal({ seed: Number(process.env.SEED ?? 20_261_201) })
