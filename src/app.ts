@@ -6,8 +6,10 @@ import { Problem } from './errors.ts'
 import { graphqlPlugin } from './graphql/plugin.ts'
 import { probes } from './http/probes.ts'
 import { problems, sendProblem } from './http/problems.ts'
+import { assessments } from './http/v1/assessments.ts'
 import { calculators } from './http/v1/calculators.ts'
-import { acceptMultipart } from './http/v1/schedule-body.ts'
+import { WorkerPool } from './jobs/pool.ts'
+import type { AssessTask } from './operations/assess-in-thread.ts'
 import { getMethod, listMethods, listSources } from './operations/list-methods.ts'
 import { replayTrace } from './operations/replay-trace.ts'
 
@@ -16,17 +18,27 @@ export async function buildApp(config: Config): Promise<FastifyInstance> {
   const app = fastify({
     logger: { level: config.LOG_LEVEL },
     bodyLimit: config.BODY_LIMIT,
-    onProtoPoisoning: 'error',
-    onConstructorPoisoning: 'error',
+    // The strict schemas name these fields like any other unknown one.
+    onProtoPoisoning: 'ignore',
+    onConstructorPoisoning: 'ignore',
     // An unreadable URL never reaches the error handler.
     frameworkErrors: (error, _request, reply) =>
       sendProblem(reply, new Problem('malformed-url', { reason: error.message })),
   })
   app.removeContentTypeParser('text/plain')
+  const entry = new URL('./operations/assess-in-thread.ts', import.meta.url)
+  const pool = new WorkerPool<AssessTask>({
+    entry,
+    name: 'assessInThread',
+    workers: config.WORKERS,
+    queue: config.WORK_QUEUE,
+    seconds: config.WORK_TIMEOUT,
+  })
+  app.addHook('onClose', () => pool.close())
   problems(app, config.BODY_LIMIT)
   probes(app)
-  await acceptMultipart(app, config.BODY_LIMIT)
   calculators(app)
+  await app.register(assessments, { assess: (task, gone) => pool.run(task, gone), bodyLimit: config.BODY_LIMIT })
   const document = JSON.stringify(openapi())
   app.get('/openapi.json', async (_, reply) => reply.type('application/json; charset=utf-8').send(document))
   app.post('/v1/replay', async (request) => replayTrace(request.body))

@@ -1,4 +1,5 @@
 import { readFileSync } from 'node:fs'
+import { availableParallelism } from 'node:os'
 import { z } from 'zod'
 
 const whole = (fallback: number, min: number, max: number) =>
@@ -8,6 +9,9 @@ const schema = z.object({
   PORT: whole(8080, 0, 65535),
   LOG_LEVEL: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent']).default('info'),
   BODY_LIMIT: whole(64 * 1024 * 1024, 1024, 2 ** 31),
+  WORKERS: whole(availableParallelism(), 1, 256),
+  WORK_QUEUE: whole(32, 0, 10_000),
+  WORK_TIMEOUT: whole(120, 1, 3600),
   NODE_ENV: z.string().default('development'),
   SHUTDOWN_TIMEOUT: whole(10, 1, 3600),
 })

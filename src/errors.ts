@@ -12,6 +12,8 @@ type Contract =
   | 'malformed-json'
   | 'malformed-url'
   | 'not-acceptable'
+  | 'timed-out'
+  | 'worker-died'
   | 'invalid-request'
   | 'unknown-field'
   | 'missing-field'
@@ -46,6 +48,20 @@ export const catalogue: Readonly<Record<ErrorCode, ErrorEntry>> = {
     'The body could not be read as JSON: {reason}.',
     'A comma, quote or bracket is missing, or the body is not JSON at all.',
     'Send a JSON document.',
+  ),
+  'timed-out': entry(
+    504,
+    'Timed out',
+    'The work took longer than {seconds} s and was ended.',
+    'The request is larger than this service finishes in its time.',
+    'Split the schedule, or ask the operator for a larger WORK_TIMEOUT.',
+  ),
+  'worker-died': entry(
+    503,
+    'The worker was lost',
+    'The thread that worked on this request ended before it was done.',
+    'A defect or a lack of memory.',
+    'Try again; report it if it stays.',
   ),
   'not-acceptable': entry(
     406,

@@ -1,15 +1,13 @@
 import type { FastifyInstance, FastifyRequest } from 'fastify'
 import { Problem } from '../../errors.ts'
-import { assessSchedule } from '../../operations/assess-schedule.ts'
 import type { Options } from '../../operations/calculate.ts'
 import { calculateBlock } from '../../operations/calculate-block.ts'
 import { calculateGroup } from '../../operations/calculate-group.ts'
 import { calculateSettlement } from '../../operations/calculate-settlement.ts'
 import { calculateSinglePile } from '../../operations/calculate-single-pile.ts'
-import { scheduleBody } from './schedule-body.ts'
 
 /** `?trace=none` leaves the trace out; `?of=<pointer>` gives only the steps behind one part of the result. */
-function optionsOf(request: FastifyRequest): Options {
+export function optionsOf(request: FastifyRequest): Options {
   const { trace = 'full', of } = request.query as Record<string, string | undefined>
   if (trace !== 'full' && trace !== 'none')
     throw new Problem('bad-query', { field: 'trace', expected: 'full or none', got: trace })
@@ -21,16 +19,13 @@ const routes = {
   '/v1/block': calculateBlock,
   '/v1/group': calculateGroup,
   '/v1/settlement': calculateSettlement,
-  '/v1/assessments': assessSchedule,
 }
 
 /** The calculators: pure, nothing is stored. Plain JSON.stringify is the fastest serializer for replies of this size. */
 export function calculators(app: FastifyInstance): void {
   for (const [url, operation] of Object.entries(routes)) {
     app.post(url, async (request, reply) =>
-      reply
-        .type('application/json; charset=utf-8')
-        .send(JSON.stringify(operation(await scheduleBody(request), optionsOf(request)))),
+      reply.type('application/json; charset=utf-8').send(JSON.stringify(operation(request.body, optionsOf(request)))),
     )
   }
 }
