@@ -1,9 +1,13 @@
-import fastify, { type FastifyInstance } from 'fastify'
+import fastify, { type FastifyInstance, LogController } from 'fastify'
 import type { Config } from './config.ts'
 import { limits } from './contract/limits.ts'
 import { openapi } from './contract/openapi.ts'
+import { engineVersion } from './engine/index.ts'
 import { Problem } from './errors.ts'
 import { graphqlPlugin } from './graphql/plugin.ts'
+import { accessLog, traceIdOf } from './http/access-log.ts'
+import { type Drain, drain } from './http/drain.ts'
+import { metrics } from './http/metrics.ts'
 import { probes } from './http/probes.ts'
 import { problems, sendProblem } from './http/problems.ts'
 import { assessments } from './http/v1/assessments.ts'
@@ -13,11 +17,16 @@ import type { AssessTask } from './operations/assess-in-thread.ts'
 import { getMethod, listMethods, listSources } from './operations/list-methods.ts'
 import { replayTrace } from './operations/replay-trace.ts'
 
+export type Service = { readonly app: FastifyInstance; readonly stop: Drain }
+
 /** Composes the service, in reading order. */
-export async function buildApp(config: Config): Promise<FastifyInstance> {
+export async function buildService(config: Config): Promise<Service> {
   const app = fastify({
     logger: { level: config.LOG_LEVEL },
     bodyLimit: config.BODY_LIMIT,
+    genReqId: (request) => traceIdOf(request.headers.traceparent),
+    logController: new LogController({ requestIdLogLabel: 'traceId', disableRequestLogging: true }),
+    return503OnClosing: false,
     // The strict schemas name these fields like any other unknown one.
     onProtoPoisoning: 'ignore',
     onConstructorPoisoning: 'ignore',
@@ -36,6 +45,9 @@ export async function buildApp(config: Config): Promise<FastifyInstance> {
   })
   app.addHook('onClose', () => pool.close())
   problems(app, config.BODY_LIMIT)
+  const stop = drain(app)
+  accessLog(app)
+  metrics(app, engineVersion, pool)
   probes(app)
   calculators(app)
   await app.register(assessments, { assess: (task, gone) => pool.run(task, gone), bodyLimit: config.BODY_LIMIT })
@@ -47,5 +59,8 @@ export async function buildApp(config: Config): Promise<FastifyInstance> {
   app.get('/v1/sources', async () => listSources())
   app.get('/v1/limits', async () => ({ ...limits, bodyBytes: config.BODY_LIMIT }))
   await graphqlPlugin(app, { production: config.NODE_ENV === 'production' })
-  return app
+  return { app, stop }
 }
+
+/** The service as one Fastify instance, for those who do not stop it by signal. */
+export const buildApp = async (config: Config): Promise<FastifyInstance> => (await buildService(config)).app

@@ -1,4 +1,4 @@
-import { buildApp } from './app.ts'
+import { buildService } from './app.ts'
 import { type Config, readConfig } from './config.ts'
 
 function settings(): Config {
@@ -11,7 +11,7 @@ function settings(): Config {
 }
 
 const config = settings()
-const app = await buildApp(config)
+const { app, stop } = await buildService(config)
 await app.listen({ host: config.HOST, port: config.PORT })
 
 let stopping = false
@@ -21,6 +21,9 @@ for (const signal of ['SIGTERM', 'SIGINT'] as const) {
     if (stopping) process.exit(1)
     stopping = true
     setTimeout(() => process.exit(1), config.SHUTDOWN_TIMEOUT * 1000).unref()
-    void app.close().then(() => process.exit(0))
+    void stop
+      .begin()
+      .then(() => app.close())
+      .then(() => process.exit(0))
   })
 }

@@ -5,7 +5,11 @@ const TYPE = 'application/problem+json; charset=utf-8'
 
 export function sendProblem(reply: FastifyReply, problem: Problem): FastifyReply {
   if (problem.status === 503) reply.header('retry-after', '1')
-  return reply.code(problem.status).type(TYPE).send(JSON.stringify(problem.document))
+  // The trace id lets an operator find the line of the log that belongs to an answer.
+  return reply
+    .code(problem.status)
+    .type(TYPE)
+    .send(JSON.stringify({ ...problem.document, traceId: reply.request.id }))
 }
 
 /** What Fastify itself refuses, as a problem of ours. */

@@ -1,5 +1,6 @@
 import { cite } from '../../sources/bibliography.ts'
 import { formula } from '../../trace/formula.ts'
+import { noticeInstallation } from '../cohesive-shaft/adhesion.ts'
 import type { BaseMethod } from '../method.ts'
 
 export const oneillReeseNc = formula({
@@ -33,6 +34,7 @@ export const oneillReeseBase1999: BaseMethod = {
   validity: 'Bored piles in clay; above 1.9 m diameter base movement governs.',
   source: 'fhwa-if-99-025',
   unitBaseResistance: (at) => {
+    noticeInstallation(at, oneillReeseBase1999)
     const c_u = at.parameter('undrainedShearStrength', 'c_u', 'kPa')
     if (at.breadth.value > LARGE_BASE)
       at.notice({

@@ -1,0 +1,39 @@
+import type { FastifyInstance } from 'fastify'
+import { collectDefaultMetrics, Gauge, Histogram, Registry } from 'prom-client'
+
+export type Load = { readonly busy: number; readonly queued: number }
+
+/** `/metrics` for Prometheus. Series go by route template, so that ids and typing errors add none. */
+export function metrics(app: FastifyInstance, engine: string, load: Load): void {
+  const register = new Registry()
+  collectDefaultMetrics({ register })
+  const duration = new Histogram({
+    name: 'kentledge_request_duration_seconds',
+    help: 'Time to answer a request, by method, route template and status',
+    labelNames: ['method', 'route', 'status'],
+    buckets: [0.001, 0.005, 0.02, 0.05, 0.1, 0.5, 2, 10, 60],
+    registers: [register],
+  })
+  const gauge = (name: string, help: string, value: () => number) =>
+    new Gauge({
+      name,
+      help,
+      registers: [register],
+      collect: function () {
+        this.set(value())
+      },
+    })
+  gauge('kentledge_workers_busy', 'Worker threads at work', () => load.busy)
+  gauge('kentledge_queue_depth', 'Assessments that wait for a worker thread', () => load.queued)
+  new Gauge({
+    name: 'kentledge_build_info',
+    help: 'Version of the engine',
+    labelNames: ['engine'],
+    registers: [register],
+  }).set({ engine }, 1)
+  app.addHook('onResponse', async (request, reply) => {
+    const route = request.routeOptions.url ?? 'unknown'
+    duration.observe({ method: request.method, route, status: reply.statusCode }, reply.elapsedTime / 1000)
+  })
+  app.get('/metrics', async (_, reply) => reply.type(register.contentType).send(await register.metrics()))
+}
