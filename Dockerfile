@@ -11,6 +11,7 @@ COPY --from=packages /app/node_modules node_modules
 COPY package.json LICENSE ./
 COPY src src
 COPY schema/schema.graphql schema/schema.graphql
+COPY schema/examples schema/examples
 USER node
 VOLUME /data
 EXPOSE 8080

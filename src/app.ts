@@ -1,5 +1,6 @@
 import fastify, { type FastifyInstance, LogController } from 'fastify'
 import type { Config } from './config.ts'
+import { readExamples } from './contract/examples.ts'
 import { limits } from './contract/limits.ts'
 import { openapi } from './contract/openapi.ts'
 import { engineVersion } from './engine/index.ts'
@@ -10,6 +11,7 @@ import { type Drain, drain } from './http/drain.ts'
 import { metrics } from './http/metrics.ts'
 import { probes } from './http/probes.ts'
 import { problems, sendProblem } from './http/problems.ts'
+import { reference } from './http/reference.ts'
 import { assessments } from './http/v1/assessments.ts'
 import { calculators } from './http/v1/calculators.ts'
 import { WorkerPool } from './jobs/pool.ts'
@@ -51,8 +53,7 @@ export async function buildService(config: Config): Promise<Service> {
   probes(app)
   calculators(app)
   await app.register(assessments, { assess: (task, gone) => pool.run(task, gone), bodyLimit: config.BODY_LIMIT })
-  const document = JSON.stringify(openapi())
-  app.get('/openapi.json', async (_, reply) => reply.type('application/json; charset=utf-8').send(document))
+  await app.register(reference, { document: openapi(readExamples()) })
   app.post('/v1/replay', async (request) => replayTrace(request.body))
   app.get('/v1/methods', async () => listMethods())
   app.get<{ Params: { id: string } }>('/v1/methods/:id', async (request) => getMethod(request.params.id))

@@ -1,101 +1,188 @@
 import { z } from 'zod'
 import { engineVersion } from '../engine/index.ts'
-import { replayRequest } from './replay.ts'
-import { groupRequest, settlementRequest, singlePileRequest } from './requests.ts'
+import { designBasis, groundProfile, layout, pileType } from './parts.ts'
+import { replayRequest, step } from './replay.ts'
+import * as replies from './replies.ts'
+import { groupRequest, methodChoices, settlementRequest, singlePileRequest } from './requests.ts'
 import { scheduleRequest } from './schedule.ts'
 
-const calculators: Readonly<Record<string, readonly [operationId: string, summary: string, schema: z.ZodType]>> = {
-  '/v1/single-pile': ['calculateSinglePile', 'Resistance of one pile, compression or uplift', singlePileRequest],
-  '/v1/block': ['calculateBlock', 'Resistance of the block that a layout encloses', groupRequest],
-  '/v1/group': ['calculateGroup', 'Sum of single piles against block: what governs', groupRequest],
-  '/v1/settlement': ['calculateSettlement', 'Settlement, tilt, pile loads and stiffness', settlementRequest],
-  '/v1/assessments': ['assessSchedule', 'Every check of every cap of a schedule; nothing is stored', scheduleRequest],
-  '/v1/replay': ['replayTrace', 'Re-evaluate a trace', replayRequest],
+const requests = {
+  GroundProfile: groundProfile,
+  PileType: pileType,
+  Layout: layout,
+  DesignBasis: designBasis,
+  MethodChoices: methodChoices,
+  SinglePileRequest: singlePileRequest,
+  GroupRequest: groupRequest,
+  SettlementRequest: settlementRequest,
+  Schedule: scheduleRequest,
+  ReplayRequest: replayRequest,
 }
-const lists = {
-  '/v1/methods': ['listMethods', 'Every method'],
-  '/v1/sources': ['listSources', 'The bibliography'],
-  '/v1/limits': ['listLimits', 'What one request may hold'],
-} as const
+const answers = {
+  Step: step,
+  Notice: replies.notice,
+  Trace: replies.trace,
+  SinglePileResult: replies.singlePileResult,
+  BlockResult: replies.blockResult,
+  Check: replies.checkResult,
+  SinglePileAnswer: replies.singlePileAnswer,
+  BlockAnswer: replies.blockAnswer,
+  GroupAnswer: replies.groupAnswer,
+  SettlementAnswer: replies.settlementAnswer,
+  AssessmentAnswer: replies.assessmentAnswer,
+  ReplayAnswer: replies.replayAnswer,
+  Problem: replies.problemReply,
+  MethodList: replies.methodList,
+  MethodReply: replies.methodReply,
+  SourceList: replies.sourceList,
+  LimitList: replies.limitList,
+}
 
-const problem = {
-  description: 'A problem document (RFC 9457)',
-  content: { 'application/problem+json': { schema: { $ref: '#/components/schemas/Problem' } } },
+/** A route of version 1, its example named after the file of `schema/examples/` that is sent in the tests. */
+type Calculator = {
+  readonly operationId: string
+  readonly summary: string
+  readonly request: keyof typeof requests
+  readonly answer: keyof typeof answers
+  readonly example?: string
 }
-const answer = {
-  description: 'The answer',
-  content: { 'application/json': { schema: { $ref: '#/components/schemas/Answer' } } },
-}
-const listed = { description: 'The list', content: { 'application/json': { schema: { type: 'object' } } } }
-const failures = Object.fromEntries(['400', '413', '415', '422', '503'].map((status) => [status, problem]))
-
-const text = { type: 'string' }
-const components = {
-  schemas: {
-    Answer: {
-      type: 'object',
-      required: ['result', 'notices', 'meta'],
-      properties: {
-        result: { type: 'object' },
-        notices: { type: 'array', items: { type: 'object' } },
-        trace: { type: 'object' },
-        meta: { type: 'object', properties: { engine: text, requestHash: text } },
-      },
-    },
-    Problem: {
-      type: 'object',
-      required: ['type', 'title', 'status'],
-      properties: {
-        type: text,
-        title: text,
-        status: { type: 'integer' },
-        detail: text,
-        errors: {
-          type: 'array',
-          items: {
-            type: 'object',
-            required: ['pointer', 'code', 'detail'],
-            properties: { pointer: text, code: text, detail: text },
-          },
-        },
-      },
-    },
+export const calculators: Readonly<Record<string, Calculator>> = {
+  '/v1/single-pile': {
+    operationId: 'calculateSinglePile',
+    summary: 'Resistance of one pile, compression or uplift',
+    request: 'SinglePileRequest',
+    answer: 'SinglePileAnswer',
+    example: 'single-pile',
+  },
+  '/v1/block': {
+    operationId: 'calculateBlock',
+    summary: 'Resistance of the block that a layout encloses',
+    request: 'GroupRequest',
+    answer: 'BlockAnswer',
+    example: 'block',
+  },
+  '/v1/group': {
+    operationId: 'calculateGroup',
+    summary: 'Sum of single piles against block: what governs',
+    request: 'GroupRequest',
+    answer: 'GroupAnswer',
+    example: 'group',
+  },
+  '/v1/settlement': {
+    operationId: 'calculateSettlement',
+    summary: 'Settlement, tilt, pile loads and stiffness',
+    request: 'SettlementRequest',
+    answer: 'SettlementAnswer',
+    example: 'settlement',
+  },
+  '/v1/assessments': {
+    operationId: 'assessSchedule',
+    summary: 'Every check of every cap of a schedule; nothing is stored',
+    request: 'Schedule',
+    answer: 'AssessmentAnswer',
+    example: 'assessment',
+  },
+  '/v1/replay': {
+    operationId: 'replayTrace',
+    summary: 'Re-evaluate a trace',
+    request: 'ReplayRequest',
+    answer: 'ReplayAnswer',
   },
 }
+const lists = {
+  '/v1/methods': ['listMethods', 'Every method with source, validity, parameters and formulas', 'MethodList'],
+  '/v1/sources': ['listSources', 'The bibliography', 'SourceList'],
+  '/v1/limits': ['listLimits', 'What one request may hold', 'LimitList'],
+} as const
 
-/** The OpenAPI 3.1 document. Request schemas come from the schemas that parse requests, so the two cannot differ. */
-export function openapi() {
+function components(): Record<string, unknown> {
+  const named = (schemas: Readonly<Record<string, z.ZodType>>, io: 'input' | 'output') => {
+    const registry = z.registry<{ id: string }>()
+    for (const [id, schema] of Object.entries(schemas)) registry.add(schema, { id })
+    const made = z.toJSONSchema(registry, {
+      io,
+      unrepresentable: 'any',
+      uri: (id) => `#/components/schemas/${id}`,
+    }).schemas
+    return Object.entries(made).map(([id, { $schema, $id, ...schema }]) => [id, schema] as const)
+  }
+  return Object.fromEntries([...named(requests, 'input'), ...named(answers, 'output')])
+}
+
+const schemaRef = (id: string) => ({ $ref: `#/components/schemas/${id}` })
+const json = (id: string, description: string) => ({
+  description,
+  content: { 'application/json': { schema: schemaRef(id) } },
+})
+const problem = (description: string) => ({
+  description,
+  content: { 'application/problem+json': { schema: schemaRef('Problem') } },
+})
+const failures = {
+  '400': problem('The body or URL cannot be read'),
+  '413': problem('The body is larger than the limit'),
+  '415': problem('The content type is not accepted'),
+  '422': problem('The request is invalid or physically impossible; `errors` lists every fault'),
+  '503': problem('The service is busy or stopping'),
+}
+const query = (name: string, description: string) => ({ name, in: 'query', description, schema: { type: 'string' } })
+const options = [
+  query('trace', '`none` leaves the trace out'),
+  query('of', 'JSON Pointer into the result: only the steps behind it'),
+]
+
+/** The OpenAPI 3.1 document. Requests are described by the schemas that parse them, so the two cannot differ. */
+export function openapi(examples: Readonly<Record<string, unknown>>) {
   const paths: Record<string, unknown> = {}
-  for (const [path, [operationId, summary, schema]] of Object.entries(calculators)) {
-    const { $schema, ...body } = z.toJSONSchema(schema, { io: 'input', unrepresentable: 'any' })
+  for (const [path, { operationId, summary, request, answer, example }] of Object.entries(calculators)) {
+    const body = { schema: schemaRef(request), ...(example && { example: examples[example] }) }
+    const content: Record<string, unknown> = { 'application/json': body }
+    if (path === '/v1/assessments') {
+      content['multipart/form-data'] = {
+        schema: {
+          type: 'object',
+          required: ['schedule', 'loads'],
+          properties: {
+            schedule: { description: 'JSON without `loads.rows`', type: 'string' },
+            loads: { description: 'CSV with a header', type: 'string' },
+          },
+        },
+      }
+    }
+    const slow = path === '/v1/assessments' ? { '504': problem('The work took longer than the service allows') } : {}
     paths[path] = {
       post: {
         operationId,
         summary,
-        requestBody: { required: true, content: { 'application/json': { schema: body } } },
-        responses: { '200': answer, ...failures },
+        ...(example && { parameters: options }),
+        requestBody: { required: true, content },
+        responses: { '200': json(answer, 'The answer'), ...failures, ...slow },
       },
     }
   }
-  for (const [path, [operationId, summary]] of Object.entries(lists))
-    paths[path] = { get: { operationId, summary, responses: { '200': listed } } }
-  const id = { name: 'id', in: 'path', required: true, schema: text }
+  for (const [path, [operationId, summary, reply]] of Object.entries(lists))
+    paths[path] = { get: { operationId, summary, responses: { '200': json(reply, 'The list') } } }
+  const id = { name: 'id', in: 'path', required: true, schema: { type: 'string' } }
   paths['/v1/methods/{id}'] = {
     get: {
       operationId: 'getMethod',
       summary: 'The methods of one id',
       parameters: [id],
-      responses: { '200': listed, '404': problem },
+      responses: { '200': json('MethodReply', 'The methods'), '404': problem('No method has this id') },
     },
   }
+  const description =
+    'Axial design of pile foundations. Units: m, kN, kPa, kN/m3, degrees; settlement in mm. Every quantity also takes a string with a unit.'
   return {
     openapi: '3.1.0',
     info: {
       title: 'Kentledge',
       version: engineVersion.split('/')[1],
-      description: 'Axial design of pile foundations. Units: m, kN, kPa, degrees; settlement in mm.',
+      description,
+      license: { name: 'MIT', identifier: 'MIT' },
     },
+    servers: [{ url: '/' }],
     paths,
-    components,
+    components: { schemas: components() },
   }
 }

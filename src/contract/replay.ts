@@ -23,7 +23,7 @@ const line = {
 }
 const unknown = z.strictObject({ symbol: z.string(), value: number, unit: z.string() })
 
-const step = z.discriminatedUnion('kind', [
+export const step = z.discriminatedUnion('kind', [
   z.strictObject({
     ...line,
     kind: z.literal('input'),

@@ -13,8 +13,9 @@ export type Replay = { readonly holds: boolean; readonly count: number; readonly
 
 /** Relative difference up to which a printed and a re-computed value are the same. */
 const TOLERANCE = 1e-9
+/** Infinity would be within tolerance of everything, so only finite numbers are ever the same. */
 const same = (a: number, b: number) =>
-  a === b || Math.abs(a - b) <= TOLERANCE * Math.max(Math.abs(a), Math.abs(b), 1e-12)
+  Number.isFinite(a) && Number.isFinite(b) && Math.abs(a - b) <= TOLERANCE * Math.max(Math.abs(a), Math.abs(b), 1e-12)
 
 /**
  * Re-computes each step of a printed trace from its printed operands, by an evaluator that shares nothing with the engine's compiler.
@@ -87,8 +88,11 @@ function verdict(step: Step, uses: readonly OperandLine[], request: unknown): st
   }
 }
 
-const match = (printed: number, found: number, rounding = 0) =>
-  same(printed, found) || Math.abs(printed - found) <= rounding ? undefined : { found }
+/** What was found is printed in the answer, which holds no NaN and no Infinity. */
+function match(printed: number, found: number, rounding = 0): string | { found: number } | undefined {
+  if (!Number.isFinite(found)) return 'the operands give no finite number'
+  return same(printed, found) || Math.abs(printed - found) <= rounding ? undefined : { found }
+}
 
 /** What rounding leaves where operands cancel to nothing: a few units in the last place of the largest operand of the step's own unit. */
 const roundingOf = (step: Step & { kind: 'formula' }): number =>

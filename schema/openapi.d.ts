@@ -1,0 +1,2481 @@
+// Generated from schema/openapi.json by schema/generate.ts. Do not edit.
+export interface paths {
+    readonly "/v1/single-pile": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /** Resistance of one pile, compression or uplift */
+        readonly post: operations["calculateSinglePile"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/block": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /** Resistance of the block that a layout encloses */
+        readonly post: operations["calculateBlock"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/group": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /** Sum of single piles against block: what governs */
+        readonly post: operations["calculateGroup"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/settlement": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /** Settlement, tilt, pile loads and stiffness */
+        readonly post: operations["calculateSettlement"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/assessments": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /** Every check of every cap of a schedule; nothing is stored */
+        readonly post: operations["assessSchedule"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/replay": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /** Re-evaluate a trace */
+        readonly post: operations["replayTrace"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/methods": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** Every method with source, validity, parameters and formulas */
+        readonly get: operations["listMethods"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/sources": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** The bibliography */
+        readonly get: operations["listSources"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/limits": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** What one request may hold */
+        readonly get: operations["listLimits"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/methods/{id}": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** The methods of one id */
+        readonly get: operations["getMethod"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+}
+export type webhooks = Record<string, never>;
+export interface components {
+    schemas: {
+        readonly GroundProfile: {
+            readonly name?: string;
+            /** @description depth of the water table; left out: below all */
+            readonly waterTableDepth?: number | string;
+            readonly layers: readonly ({
+                readonly name: string;
+                /** @description thickness; may be left out on the last layer */
+                readonly thickness?: number | string;
+                /** @description bulk unit weight; below water: saturated */
+                readonly unitWeight: number | string;
+                /** @description SPT blow count N60 */
+                readonly sptN60?: number | string;
+                readonly coneResistance?: (number | string) | {
+                    /** @description cone resistance, at the top */
+                    readonly top: number | string;
+                    /** @description cone resistance, at the bottom */
+                    readonly bottom: number | string;
+                };
+                readonly youngsModulus?: (number | string) | {
+                    /** @description Young's modulus, at the top */
+                    readonly top: number | string;
+                    /** @description Young's modulus, at the bottom */
+                    readonly bottom: number | string;
+                };
+                /** @description Poisson's ratio */
+                readonly poissonsRatio?: number | string;
+                /** @constant */
+                readonly soil: "cohesive";
+                readonly undrainedShearStrength?: (number | string) | {
+                    /** @description undrained shear strength, at the top */
+                    readonly top: number | string;
+                    /** @description undrained shear strength, at the bottom */
+                    readonly bottom: number | string;
+                };
+                /** @description plasticity index, percent */
+                readonly plasticityIndex?: number | string;
+                /** @description overconsolidation ratio */
+                readonly overconsolidationRatio?: number | string;
+                /** @description effective friction angle */
+                readonly effectiveFrictionAngle?: number | string;
+            } | {
+                readonly name: string;
+                /** @description thickness; may be left out on the last layer */
+                readonly thickness?: number | string;
+                /** @description bulk unit weight; below water: saturated */
+                readonly unitWeight: number | string;
+                /** @description SPT blow count N60 */
+                readonly sptN60?: number | string;
+                readonly coneResistance?: (number | string) | {
+                    /** @description cone resistance, at the top */
+                    readonly top: number | string;
+                    /** @description cone resistance, at the bottom */
+                    readonly bottom: number | string;
+                };
+                readonly youngsModulus?: (number | string) | {
+                    /** @description Young's modulus, at the top */
+                    readonly top: number | string;
+                    /** @description Young's modulus, at the bottom */
+                    readonly bottom: number | string;
+                };
+                /** @description Poisson's ratio */
+                readonly poissonsRatio?: number | string;
+                /** @constant */
+                readonly soil: "granular";
+                /** @description friction angle */
+                readonly frictionAngle?: number | string;
+                /** @description relative density, percent */
+                readonly relativeDensity?: number | string;
+            } | {
+                readonly name: string;
+                /** @description thickness; may be left out on the last layer */
+                readonly thickness?: number | string;
+                /** @description bulk unit weight; below water: saturated */
+                readonly unitWeight: number | string;
+                /** @description SPT blow count N60 */
+                readonly sptN60?: number | string;
+                readonly coneResistance?: (number | string) | {
+                    /** @description cone resistance, at the top */
+                    readonly top: number | string;
+                    /** @description cone resistance, at the bottom */
+                    readonly bottom: number | string;
+                };
+                readonly youngsModulus?: (number | string) | {
+                    /** @description Young's modulus, at the top */
+                    readonly top: number | string;
+                    /** @description Young's modulus, at the bottom */
+                    readonly bottom: number | string;
+                };
+                /** @description Poisson's ratio */
+                readonly poissonsRatio?: number | string;
+                /** @constant */
+                readonly soil: "rock";
+                readonly unconfinedCompressiveStrength?: (number | string) | {
+                    /** @description unconfined compressive strength, at the top */
+                    readonly top: number | string;
+                    /** @description unconfined compressive strength, at the bottom */
+                    readonly bottom: number | string;
+                };
+                /** @description rock quality designation, percent */
+                readonly rqd?: number | string;
+            })[];
+            readonly rigidBase?: boolean;
+        };
+        readonly PileType: {
+            readonly section: {
+                /** @constant */
+                readonly shape: "circular";
+                /** @description diameter */
+                readonly diameter: number | string;
+            } | {
+                /** @constant */
+                readonly shape: "square";
+                /** @description width */
+                readonly width: number | string;
+            } | {
+                /** @constant */
+                readonly shape: "tubular";
+                /** @description outer diameter */
+                readonly diameter: number | string;
+                /** @description wall thickness */
+                readonly wallThickness: number | string;
+                /** @enum {string} */
+                readonly toe: "open" | "closed";
+            } | {
+                /** @constant */
+                readonly shape: "h";
+                /** @description section depth */
+                readonly depth: number | string;
+                /** @description flange width */
+                readonly flangeWidth: number | string;
+                /** @description steel area */
+                readonly area: number | string;
+            };
+            /** @description length */
+            readonly length: number | string;
+            /** @description depth of the head below the surface */
+            readonly headDepth?: number | string;
+            /** @enum {string} */
+            readonly installation: "driven" | "bored" | "continuous-flight-auger";
+            /** @description Young's modulus of the pile */
+            readonly youngsModulus?: number | string;
+            /** @description diameter of an enlarged base */
+            readonly baseDiameter?: number | string;
+            /** @description unit weight of the pile */
+            readonly unitWeight?: number | string;
+            readonly sectionResistance?: {
+                /** @description design resistance of the section */
+                readonly compression?: number | string;
+                /** @description design resistance of the section */
+                readonly tension?: number | string;
+            };
+        };
+        readonly Layout: {
+            /** @constant */
+            readonly kind: "grid";
+            readonly columns: number;
+            readonly rows: number;
+            /** @description spacing of the pile axes */
+            readonly spacing?: number | string;
+            /** @description spacing of the pile axes */
+            readonly spacingX?: number | string;
+            /** @description spacing of the pile axes */
+            readonly spacingY?: number | string;
+        } | {
+            /** @constant */
+            readonly kind: "ring";
+            readonly count: number;
+            /** @description radius */
+            readonly radius: number | string;
+        } | {
+            /** @constant */
+            readonly kind: "points";
+            readonly points: readonly {
+                /** @description position along x */
+                readonly x: number | string;
+                /** @description position along y */
+                readonly y: number | string;
+            }[];
+        };
+        readonly DesignBasis: {
+            /** @constant */
+            readonly format: "overall-factor";
+            /** @description overall factor */
+            readonly factor: number | string;
+            /** @description overall factor of the block */
+            readonly blockFactor?: number | string;
+            /** @description overall factor in uplift */
+            readonly upliftFactor?: number | string;
+            readonly split?: {
+                /** @description factor on the shaft */
+                readonly shaft: number | string;
+                /** @description factor on the base */
+                readonly base: number | string;
+            };
+        } | {
+            /** @constant */
+            readonly format: "en1997-1-2004";
+            /** @enum {string} */
+            readonly approach: "DA1-1" | "DA1-2" | "DA2" | "DA3";
+            readonly characteristic: {
+                /** @constant */
+                readonly route: "model-factor";
+                /** @description model factor */
+                readonly value: number | string;
+            } | {
+                /** @constant */
+                readonly route: "profiles";
+                readonly count: number;
+                readonly stiffStructure?: boolean;
+            };
+        } | {
+            /** @constant */
+            readonly format: "custom";
+            /** @description factor on the shaft */
+            readonly shaft: number | string;
+            /** @description factor on the base */
+            readonly base: number | string;
+            /** @description factor on the block */
+            readonly block: number | string;
+            /** @description factor in uplift */
+            readonly uplift: number | string;
+        };
+        readonly MethodChoices: {
+            readonly cohesiveShaft?: ("rp2geo-2011" | "rp2a-1984" | "randolph-murphy-1985" | "kolk-van-der-velde-1996" | "skempton-1959" | "oneill-reese-1999" | "gec10-2018" | "burland-1973" | "specified-alpha") | ({
+                /** @constant */
+                readonly method: "rp2geo-2011";
+            } | {
+                /** @constant */
+                readonly method: "rp2a-1984";
+            } | {
+                /** @constant */
+                readonly method: "randolph-murphy-1985";
+                /** @description normally consolidated strength ratio */
+                readonly normallyConsolidatedRatio?: number | string;
+            } | {
+                /** @constant */
+                readonly method: "kolk-van-der-velde-1996";
+            } | {
+                /** @constant */
+                readonly method: "skempton-1959";
+            } | {
+                /** @constant */
+                readonly method: "oneill-reese-1999";
+            } | {
+                /** @constant */
+                readonly method: "gec10-2018";
+            } | {
+                /** @constant */
+                readonly method: "burland-1973";
+            } | {
+                /** @constant */
+                readonly method: "specified-alpha";
+                /** @description adhesion factor */
+                readonly alpha: number | string;
+            });
+            readonly cohesiveBase?: ("skempton-1951" | "linear-depth" | "nhi-2006" | "oneill-reese-1999" | "specified-nc") | ({
+                /** @constant */
+                readonly method: "skempton-1951";
+            } | {
+                /** @constant */
+                readonly method: "linear-depth";
+            } | {
+                /** @constant */
+                readonly method: "nhi-2006";
+            } | {
+                /** @constant */
+                readonly method: "oneill-reese-1999";
+            } | {
+                /** @constant */
+                readonly method: "specified-nc";
+                /** @description bearing factor */
+                readonly bearingFactor: number | string;
+            });
+            readonly granularShaft?: ("beta-effective-stress" | "navfac-1986" | "rp2geo-2011" | "oneill-reese-1999" | "specified-beta") | ({
+                /** @constant */
+                readonly method: "beta-effective-stress";
+                /** @description earth pressure coefficient */
+                readonly earthPressure?: number | string;
+                /** @description interface angle over friction angle */
+                readonly interfaceRatio?: number | string;
+                /** @description limit of the unit shaft resistance */
+                readonly limit?: number | string;
+            } | {
+                /** @constant */
+                readonly method: "navfac-1986";
+            } | {
+                /** @constant */
+                readonly method: "rp2geo-2011";
+                /** @description sand-silt (1) instead of sand (0) */
+                readonly silty?: number | string;
+            } | {
+                /** @constant */
+                readonly method: "oneill-reese-1999";
+            } | {
+                /** @constant */
+                readonly method: "specified-beta";
+                /** @description shaft factor */
+                readonly beta: number | string;
+            });
+            readonly granularBase?: ("navfac-1986" | "janbu-1976" | "rp2geo-2011" | "oneill-reese-1999") | ({
+                /** @constant */
+                readonly method: "navfac-1986";
+            } | {
+                /** @constant */
+                readonly method: "janbu-1976";
+                /** @description plastification angle */
+                readonly plastificationAngle?: number | string;
+            } | {
+                /** @constant */
+                readonly method: "rp2geo-2011";
+                /** @description sand-silt (1) instead of sand (0) */
+                readonly silty?: number | string;
+            } | {
+                /** @constant */
+                readonly method: "oneill-reese-1999";
+            });
+            readonly upliftRatio?: {
+                /** @description share of the shaft resistance in uplift */
+                readonly cohesive?: number | string;
+                /** @description share of the shaft resistance in uplift */
+                readonly granular?: number | string;
+            };
+            /** @description longest sublayer of the shaft sum */
+            readonly sublayer?: number | string;
+        };
+        readonly SinglePileRequest: {
+            readonly pile: components["schemas"]["PileType"];
+            readonly ground: components["schemas"]["GroundProfile"];
+            /** @enum {string} */
+            readonly direction?: "compression" | "uplift";
+            readonly methods?: components["schemas"]["MethodChoices"];
+            readonly designBasis?: components["schemas"]["DesignBasis"];
+        };
+        readonly GroupRequest: {
+            readonly pile: components["schemas"]["PileType"];
+            readonly ground: components["schemas"]["GroundProfile"];
+            /** @enum {string} */
+            readonly direction?: "compression" | "uplift";
+            readonly methods?: components["schemas"]["MethodChoices"];
+            readonly designBasis?: components["schemas"]["DesignBasis"];
+            readonly layout: components["schemas"]["Layout"];
+        };
+        readonly SettlementRequest: {
+            readonly pile: components["schemas"]["PileType"];
+            readonly ground: components["schemas"]["GroundProfile"];
+            readonly layout?: components["schemas"]["Layout"];
+            readonly load: {
+                /** @description vertical load, positive downward */
+                readonly V: number | string;
+                /** @description moment that presses piles at +y */
+                readonly Mx?: number | string;
+                /** @description moment that presses piles at +x */
+                readonly My?: number | string;
+            };
+            /** @enum {string} */
+            readonly cap?: "rigid" | "flexible";
+            /** @enum {string} */
+            readonly method?: "randolph-wroth-1978";
+        };
+        readonly Schedule: {
+            readonly title: string;
+            readonly designBasis: components["schemas"]["DesignBasis"];
+            readonly methods?: components["schemas"]["MethodChoices"];
+            /** @enum {string} */
+            readonly settlementMethod?: "randolph-wroth-1978";
+            readonly ground: {
+                readonly [key: string]: components["schemas"]["GroundProfile"];
+            };
+            readonly pileTypes: {
+                readonly [key: string]: components["schemas"]["PileType"];
+            };
+            readonly caps: readonly {
+                readonly mark: string;
+                /** @description position along x */
+                readonly x: number | string;
+                /** @description position along y */
+                readonly y: number | string;
+                readonly ground: string;
+                readonly pileType: string;
+                readonly layout: components["schemas"]["Layout"];
+                /** @description weight of the cap, added to V */
+                readonly capWeight?: number | string;
+            }[];
+            readonly loads: {
+                /** @constant */
+                readonly signs: "pressing";
+                /** @enum {string} */
+                readonly loadsAre: "actions" | "reactions";
+                readonly combinations: {
+                    readonly [key: string]: {
+                        /** @enum {string} */
+                        readonly limitState: "ultimate" | "working" | "serviceability";
+                    };
+                };
+                readonly rows: readonly {
+                    readonly cap: string;
+                    readonly combination: string;
+                    /** @description V */
+                    readonly V: number | string;
+                    /** @description Mx */
+                    readonly Mx: number | string;
+                    /** @description My */
+                    readonly My: number | string;
+                }[];
+            } | {
+                /** @constant */
+                readonly signs: "right-handed-z-up";
+                /** @enum {string} */
+                readonly loadsAre: "actions" | "reactions";
+                readonly combinations: {
+                    readonly [key: string]: {
+                        /** @enum {string} */
+                        readonly limitState: "ultimate" | "working" | "serviceability";
+                    };
+                };
+                readonly rows: readonly {
+                    readonly cap: string;
+                    readonly combination: string;
+                    /** @description Fx */
+                    readonly Fx: number | string;
+                    /** @description Fy */
+                    readonly Fy: number | string;
+                    /** @description Fz */
+                    readonly Fz: number | string;
+                    /** @description Mx */
+                    readonly Mx: number | string;
+                    /** @description My */
+                    readonly My: number | string;
+                    /** @description Mz */
+                    readonly Mz: number | string;
+                }[];
+            } | {
+                /** @constant */
+                readonly signs: "right-handed-z-down";
+                /** @enum {string} */
+                readonly loadsAre: "actions" | "reactions";
+                readonly combinations: {
+                    readonly [key: string]: {
+                        /** @enum {string} */
+                        readonly limitState: "ultimate" | "working" | "serviceability";
+                    };
+                };
+                readonly rows: readonly {
+                    readonly cap: string;
+                    readonly combination: string;
+                    /** @description Fx */
+                    readonly Fx: number | string;
+                    /** @description Fy */
+                    readonly Fy: number | string;
+                    /** @description Fz */
+                    readonly Fz: number | string;
+                    /** @description Mx */
+                    readonly Mx: number | string;
+                    /** @description My */
+                    readonly My: number | string;
+                    /** @description Mz */
+                    readonly Mz: number | string;
+                }[];
+            };
+            readonly limits?: {
+                /** @description largest settlement */
+                readonly settlement?: number | string;
+                /** @description largest tilt */
+                readonly tilt?: number | string;
+                /** @description largest angular distortion */
+                readonly angularDistortion?: number | string;
+            };
+        };
+        readonly ReplayRequest: {
+            readonly trace: {
+                readonly steps: readonly ({
+                    readonly id: string;
+                    readonly symbol: string;
+                    readonly name: string;
+                    readonly value: number;
+                    readonly unit: string;
+                    readonly quantity: string;
+                    /** @constant */
+                    readonly kind: "input";
+                    readonly from?: string;
+                    /** @constant */
+                    readonly default?: true;
+                    readonly reason?: string;
+                    readonly source?: {
+                        readonly key: string;
+                        readonly locator: string;
+                    };
+                } | {
+                    readonly id: string;
+                    readonly symbol: string;
+                    readonly name: string;
+                    readonly value: number;
+                    readonly unit: string;
+                    readonly quantity: string;
+                    /** @constant */
+                    readonly kind: "formula";
+                    readonly formula: string;
+                    readonly operands: readonly {
+                        readonly symbol: string;
+                        readonly value: number;
+                        readonly unit: string;
+                        readonly from: string;
+                    }[];
+                    readonly source: {
+                        readonly key: string;
+                        readonly locator: string;
+                    };
+                    readonly range?: readonly {
+                        readonly symbol: string;
+                        readonly min?: number;
+                        readonly max?: number;
+                        readonly inside: boolean;
+                    }[];
+                } | {
+                    readonly id: string;
+                    readonly symbol: string;
+                    readonly name: string;
+                    readonly value: number;
+                    readonly unit: string;
+                    readonly quantity: string;
+                    /** @constant */
+                    readonly kind: "sum";
+                    readonly operands: readonly {
+                        readonly symbol: string;
+                        readonly value: number;
+                        readonly unit: string;
+                        readonly from: string;
+                    }[];
+                } | {
+                    readonly id: string;
+                    readonly symbol: string;
+                    readonly name: string;
+                    readonly value: number;
+                    readonly unit: string;
+                    readonly quantity: string;
+                    /** @constant */
+                    readonly kind: "lookup";
+                    readonly operands: readonly {
+                        readonly symbol: string;
+                        readonly value: number;
+                        readonly unit: string;
+                        readonly from: string;
+                    }[];
+                    readonly rows: readonly (readonly [
+                        number,
+                        number
+                    ])[];
+                    readonly source: {
+                        readonly key: string;
+                        readonly locator: string;
+                    };
+                } | {
+                    readonly id: string;
+                    readonly symbol: string;
+                    readonly name: string;
+                    readonly value: number;
+                    readonly unit: string;
+                    readonly quantity: string;
+                    /** @constant */
+                    readonly kind: "choice";
+                    /** @enum {string} */
+                    readonly rule: "smallest" | "largest";
+                    readonly operands: readonly {
+                        readonly symbol: string;
+                        readonly value: number;
+                        readonly unit: string;
+                        readonly from: string;
+                    }[];
+                    readonly chosen: string;
+                } | {
+                    readonly id: string;
+                    readonly symbol: string;
+                    readonly name: string;
+                    readonly value: number;
+                    readonly unit: string;
+                    readonly quantity: string;
+                    /** @constant */
+                    readonly kind: "solution";
+                    readonly method: string;
+                    readonly operands: readonly {
+                        readonly symbol: string;
+                        readonly value: number;
+                        readonly unit: string;
+                        readonly from: string;
+                    }[];
+                    readonly unknowns: readonly {
+                        readonly symbol: string;
+                        readonly value: number;
+                        readonly unit: string;
+                    }[];
+                    readonly residuals: readonly {
+                        readonly name: string;
+                        readonly value: number;
+                    }[];
+                    readonly tolerance: number;
+                    readonly source: {
+                        readonly key: string;
+                        readonly locator: string;
+                    };
+                })[];
+                readonly results?: {
+                    readonly [key: string]: string;
+                };
+                readonly sources?: readonly unknown[];
+            };
+            readonly request?: unknown;
+        };
+        readonly Step: {
+            readonly id: string;
+            readonly symbol: string;
+            readonly name: string;
+            readonly value: number;
+            readonly unit: string;
+            readonly quantity: string;
+            /** @constant */
+            readonly kind: "input";
+            readonly from?: string;
+            /** @constant */
+            readonly default?: true;
+            readonly reason?: string;
+            readonly source?: {
+                readonly key: string;
+                readonly locator: string;
+            };
+        } | {
+            readonly id: string;
+            readonly symbol: string;
+            readonly name: string;
+            readonly value: number;
+            readonly unit: string;
+            readonly quantity: string;
+            /** @constant */
+            readonly kind: "formula";
+            readonly formula: string;
+            readonly operands: readonly {
+                readonly symbol: string;
+                readonly value: number;
+                readonly unit: string;
+                readonly from: string;
+            }[];
+            readonly source: {
+                readonly key: string;
+                readonly locator: string;
+            };
+            readonly range?: readonly {
+                readonly symbol: string;
+                readonly min?: number;
+                readonly max?: number;
+                readonly inside: boolean;
+            }[];
+        } | {
+            readonly id: string;
+            readonly symbol: string;
+            readonly name: string;
+            readonly value: number;
+            readonly unit: string;
+            readonly quantity: string;
+            /** @constant */
+            readonly kind: "sum";
+            readonly operands: readonly {
+                readonly symbol: string;
+                readonly value: number;
+                readonly unit: string;
+                readonly from: string;
+            }[];
+        } | {
+            readonly id: string;
+            readonly symbol: string;
+            readonly name: string;
+            readonly value: number;
+            readonly unit: string;
+            readonly quantity: string;
+            /** @constant */
+            readonly kind: "lookup";
+            readonly operands: readonly {
+                readonly symbol: string;
+                readonly value: number;
+                readonly unit: string;
+                readonly from: string;
+            }[];
+            readonly rows: readonly (readonly [
+                number,
+                number
+            ])[];
+            readonly source: {
+                readonly key: string;
+                readonly locator: string;
+            };
+        } | {
+            readonly id: string;
+            readonly symbol: string;
+            readonly name: string;
+            readonly value: number;
+            readonly unit: string;
+            readonly quantity: string;
+            /** @constant */
+            readonly kind: "choice";
+            /** @enum {string} */
+            readonly rule: "smallest" | "largest";
+            readonly operands: readonly {
+                readonly symbol: string;
+                readonly value: number;
+                readonly unit: string;
+                readonly from: string;
+            }[];
+            readonly chosen: string;
+        } | {
+            readonly id: string;
+            readonly symbol: string;
+            readonly name: string;
+            readonly value: number;
+            readonly unit: string;
+            readonly quantity: string;
+            /** @constant */
+            readonly kind: "solution";
+            readonly method: string;
+            readonly operands: readonly {
+                readonly symbol: string;
+                readonly value: number;
+                readonly unit: string;
+                readonly from: string;
+            }[];
+            readonly unknowns: readonly {
+                readonly symbol: string;
+                readonly value: number;
+                readonly unit: string;
+            }[];
+            readonly residuals: readonly {
+                readonly name: string;
+                readonly value: number;
+            }[];
+            readonly tolerance: number;
+            readonly source: {
+                readonly key: string;
+                readonly locator: string;
+            };
+        };
+        readonly Notice: {
+            readonly code: string;
+            /** @enum {string} */
+            readonly level: "caution" | "warning" | "info";
+            readonly text: string;
+            readonly pointer?: string;
+        };
+        readonly Trace: {
+            readonly steps: readonly components["schemas"]["Step"][];
+            readonly results: {
+                readonly [key: string]: string;
+            };
+            readonly sources: readonly {
+                readonly key: string;
+                readonly title: string;
+                readonly author: string;
+                readonly year: number | null;
+                /** @enum {string} */
+                readonly basis: "published" | "common practice" | "memory";
+            }[];
+        };
+        readonly SinglePileResult: {
+            /** @description resistance of the shaft */
+            readonly shaftResistance: number;
+            /** @description resistance of the base */
+            readonly baseResistance: number;
+            /** @description unfactored resistance */
+            readonly ultimateResistance: number;
+            /** @description after partial or resistance factors */
+            readonly designResistance?: number;
+            /** @description under an overall factor */
+            readonly allowableLoad?: number;
+            /** @description effective weight, counted in uplift */
+            readonly weight?: number;
+            readonly layers: readonly {
+                readonly name: string;
+                /** @description depth */
+                readonly top: number;
+                /** @description depth */
+                readonly bottom: number;
+                /** @description mean over the layer */
+                readonly unitShaftResistance: number;
+                /** @description in this layer */
+                readonly shaftResistance: number;
+            }[];
+            /** @description at the toe */
+            readonly unitBaseResistance: number;
+            /** @description depth of the toe */
+            readonly toeDepth: number;
+        };
+        readonly BlockResult: {
+            /** @description smaller side */
+            readonly breadth: number;
+            /** @description larger side */
+            readonly length: number;
+            /** @description depth of the toe */
+            readonly depth: number;
+            /** @description of the block */
+            readonly perimeter: number;
+            /** @description of the block */
+            readonly baseArea: number;
+            /** @description soil on soil */
+            readonly sideResistance: number;
+            /** @description of the block */
+            readonly baseResistance: number;
+            /** @description unfactored resistance */
+            readonly ultimateResistance: number;
+            /** @description effective weight, counted in uplift */
+            readonly weight?: number;
+            /** @description after partial or resistance factors */
+            readonly designResistance?: number;
+            /** @description under an overall factor */
+            readonly allowableLoad?: number;
+        };
+        readonly Check: {
+            /** @enum {string} */
+            readonly check: "pile-compression" | "pile-uplift" | "group-compression" | "block-compression" | "group-uplift" | "block-uplift" | "pile-section" | "settlement" | "tilt";
+            readonly combination: string;
+            /** @description kN, mm or ratio, by check */
+            readonly demand: number;
+            /** @description in the unit of the demand */
+            readonly resistance: number;
+            /** @description demand over resistance */
+            readonly utilisation: number;
+            readonly satisfied: boolean;
+            readonly pile?: number;
+        };
+        readonly SinglePileAnswer: {
+            readonly result: components["schemas"]["SinglePileResult"];
+            readonly notices: readonly components["schemas"]["Notice"][];
+            readonly trace?: components["schemas"]["Trace"];
+            readonly meta: {
+                readonly engine: string;
+                readonly requestHash: string;
+            };
+        };
+        readonly BlockAnswer: {
+            readonly result: components["schemas"]["BlockResult"];
+            readonly notices: readonly components["schemas"]["Notice"][];
+            readonly trace?: components["schemas"]["Trace"];
+            readonly meta: {
+                readonly engine: string;
+                readonly requestHash: string;
+            };
+        };
+        readonly GroupAnswer: {
+            readonly result: {
+                readonly pileCount: number;
+                readonly single: components["schemas"]["SinglePileResult"];
+                /** @description single pile times number */
+                readonly sumOfPiles: number;
+                /** @description smaller of sum and block over the sum */
+                readonly efficiency: number;
+                readonly block: components["schemas"]["BlockResult"];
+                /** @enum {string} */
+                readonly governing: "piles" | "block";
+                /** @description the smaller */
+                readonly ultimateResistance: number;
+                /** @description after partial or resistance factors */
+                readonly designResistance?: number;
+                /** @description under an overall factor */
+                readonly allowableLoad?: number;
+            };
+            readonly notices: readonly components["schemas"]["Notice"][];
+            readonly trace?: components["schemas"]["Trace"];
+            readonly meta: {
+                readonly engine: string;
+                readonly requestHash: string;
+            };
+        };
+        readonly SettlementAnswer: {
+            readonly result: {
+                readonly single: {
+                    /** @description V over the number of piles */
+                    readonly load: number;
+                    /** @description of the pile head */
+                    readonly settlement: number;
+                    /** @description of the pile head */
+                    readonly stiffness: number;
+                    /** @description I of s = P I / (E_s d) */
+                    readonly influenceFactor: number;
+                    /** @description share of the load at the base */
+                    readonly baseLoadShare: number;
+                };
+                readonly group?: {
+                    /** @description at the centroid of the piles */
+                    readonly settlement: number;
+                    /** @description over the single pile */
+                    readonly settlementRatio?: number;
+                    readonly tilt: {
+                        /** @description slope of settlement along x */
+                        readonly alongX: number;
+                        /** @description slope of settlement along y */
+                        readonly alongY: number;
+                    };
+                    /** @description flexible cap */
+                    readonly largest?: number;
+                    /** @description flexible cap */
+                    readonly differential?: number;
+                    readonly piles: readonly {
+                        /** @description position */
+                        readonly x: number;
+                        /** @description position */
+                        readonly y: number;
+                        /** @description of the pile */
+                        readonly load: number;
+                        /** @description of the pile */
+                        readonly settlement: number;
+                    }[];
+                    readonly stiffness: {
+                        /** @description vertical */
+                        readonly vertical: number;
+                        /** @description rocking along x; 0 where the piles cannot take it */
+                        readonly rockingAlongX: number;
+                        /** @description rocking along y; 0 where the piles cannot take it */
+                        readonly rockingAlongY: number;
+                    };
+                };
+            };
+            readonly notices: readonly components["schemas"]["Notice"][];
+            readonly trace?: components["schemas"]["Trace"];
+            readonly meta: {
+                readonly engine: string;
+                readonly requestHash: string;
+            };
+        };
+        readonly AssessmentAnswer: {
+            readonly result: {
+                readonly summary: {
+                    readonly caps: number;
+                    readonly satisfied: number;
+                    readonly exceeded: number;
+                    readonly worst?: {
+                        readonly cap: string;
+                        readonly check: string;
+                        readonly combination: string;
+                        /** @description largest */
+                        readonly utilisation: number;
+                    };
+                };
+                readonly caps: readonly {
+                    readonly mark: string;
+                    readonly pileCount: number;
+                    readonly single: components["schemas"]["SinglePileResult"];
+                    readonly block: components["schemas"]["BlockResult"];
+                    readonly checks: readonly components["schemas"]["Check"][];
+                    readonly settlement: readonly {
+                        readonly combination: string;
+                        /** @description at the centroid of the piles */
+                        readonly settlement: number;
+                        /** @description slope of the cap */
+                        readonly tilt: number;
+                    }[];
+                    readonly stiffness: {
+                        /** @description vertical */
+                        readonly vertical: number;
+                        /** @description rocking along x; 0 where the piles cannot take it */
+                        readonly rockingAlongX: number;
+                        /** @description rocking along y; 0 where the piles cannot take it */
+                        readonly rockingAlongY: number;
+                    };
+                    readonly notices: readonly components["schemas"]["Notice"][];
+                }[];
+                readonly neighbours: readonly {
+                    readonly a: string;
+                    readonly b: string;
+                    /** @description in plan */
+                    readonly distance: number;
+                    readonly combination: string;
+                    /** @description between the two */
+                    readonly differentialSettlement: number;
+                    /** @description differential settlement over distance */
+                    readonly angularDistortion: number;
+                    /** @description of the limit */
+                    readonly utilisation?: number;
+                    readonly satisfied?: boolean;
+                }[];
+            };
+            readonly notices: readonly components["schemas"]["Notice"][];
+            readonly trace?: components["schemas"]["Trace"];
+            readonly meta: {
+                readonly engine: string;
+                readonly requestHash: string;
+            };
+        };
+        readonly ReplayAnswer: {
+            readonly result: {
+                readonly holds: boolean;
+                readonly count: number;
+                readonly steps: readonly {
+                    readonly id: string;
+                    readonly holds: boolean;
+                    readonly why?: string;
+                    readonly printed?: number;
+                    readonly found?: number;
+                }[];
+            };
+            readonly notices: readonly components["schemas"]["Notice"][];
+            readonly meta: {
+                readonly engine: string;
+                readonly requestHash: string;
+            };
+        };
+        readonly Problem: {
+            readonly type: string;
+            readonly title: string;
+            readonly status: number;
+            readonly detail: string;
+            readonly traceId?: string;
+            readonly errors?: readonly ({
+                readonly pointer: string;
+                readonly code: string;
+                readonly detail: string;
+            } & {
+                readonly [key: string]: unknown;
+            })[];
+        };
+        readonly MethodList: {
+            readonly methods: readonly ({
+                readonly id: string;
+                readonly kind: string;
+                readonly title: string;
+                readonly validity: string;
+                readonly needs: readonly string[];
+                readonly source: {
+                    readonly key: string;
+                    readonly title: string;
+                    readonly author: string;
+                    readonly year: number | null;
+                    /** @enum {string} */
+                    readonly basis: "published" | "common practice" | "memory";
+                };
+            } & {
+                readonly [key: string]: unknown;
+            })[];
+        };
+        readonly MethodReply: {
+            readonly id: string;
+            readonly methods: readonly ({
+                readonly id: string;
+                readonly kind: string;
+                readonly title: string;
+                readonly validity: string;
+                readonly needs: readonly string[];
+                readonly source: {
+                    readonly key: string;
+                    readonly title: string;
+                    readonly author: string;
+                    readonly year: number | null;
+                    /** @enum {string} */
+                    readonly basis: "published" | "common practice" | "memory";
+                };
+            } & {
+                readonly [key: string]: unknown;
+            })[];
+        };
+        readonly SourceList: {
+            readonly sources: readonly {
+                readonly key: string;
+                readonly title: string;
+                readonly author: string;
+                readonly year: number | null;
+                /** @enum {string} */
+                readonly basis: "published" | "common practice" | "memory";
+            }[];
+        };
+        readonly LimitList: {
+            readonly layers: number;
+            readonly pilesPerCap: number;
+            readonly caps: number;
+            readonly rows: number;
+            readonly bodyBytes: number;
+        };
+    };
+    responses: never;
+    parameters: never;
+    requestBodies: never;
+    headers: never;
+    pathItems: never;
+}
+export type $defs = Record<string, never>;
+export interface operations {
+    readonly calculateSinglePile: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description `none` leaves the trace out */
+                readonly trace?: string;
+                /** @description JSON Pointer into the result: only the steps behind it */
+                readonly of?: string;
+            };
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "pile": {
+                 *         "section": {
+                 *           "shape": "circular",
+                 *           "diameter": "600 mm"
+                 *         },
+                 *         "length": 16,
+                 *         "headDepth": 1,
+                 *         "installation": "bored",
+                 *         "youngsModulus": "30 GPa",
+                 *         "unitWeight": 24,
+                 *         "sectionResistance": {
+                 *           "compression": 2600,
+                 *           "tension": 450
+                 *         }
+                 *       },
+                 *       "ground": {
+                 *         "name": "BH1",
+                 *         "waterTableDepth": 1.5,
+                 *         "layers": [
+                 *           {
+                 *             "name": "soft clay",
+                 *             "thickness": 4,
+                 *             "unitWeight": 16.5,
+                 *             "soil": "cohesive",
+                 *             "undrainedShearStrength": {
+                 *               "top": 18,
+                 *               "bottom": 30
+                 *             },
+                 *             "youngsModulus": 6000,
+                 *             "poissonsRatio": 0.5
+                 *           },
+                 *           {
+                 *             "name": "medium dense sand",
+                 *             "thickness": 5,
+                 *             "unitWeight": 19.5,
+                 *             "soil": "granular",
+                 *             "frictionAngle": 33,
+                 *             "youngsModulus": 40000
+                 *           },
+                 *           {
+                 *             "name": "stiff clay",
+                 *             "unitWeight": 20,
+                 *             "soil": "cohesive",
+                 *             "undrainedShearStrength": 130,
+                 *             "youngsModulus": 60000
+                 *           }
+                 *         ]
+                 *       },
+                 *       "direction": "compression",
+                 *       "methods": {
+                 *         "cohesiveShaft": "gec10-2018",
+                 *         "granularShaft": {
+                 *           "method": "beta-effective-stress",
+                 *           "earthPressure": 0.7
+                 *         }
+                 *       },
+                 *       "designBasis": {
+                 *         "format": "overall-factor",
+                 *         "factor": 2.5,
+                 *         "blockFactor": 3,
+                 *         "upliftFactor": 3,
+                 *         "split": {
+                 *           "shaft": 1.5,
+                 *           "base": 3
+                 *         }
+                 *       }
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["SinglePileRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The answer */
+            readonly 200: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["SinglePileAnswer"];
+                };
+            };
+            /** @description The body or URL cannot be read */
+            readonly 400: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The body is larger than the limit */
+            readonly 413: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The content type is not accepted */
+            readonly 415: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The request is invalid or physically impossible; `errors` lists every fault */
+            readonly 422: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The service is busy or stopping */
+            readonly 503: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly calculateBlock: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description `none` leaves the trace out */
+                readonly trace?: string;
+                /** @description JSON Pointer into the result: only the steps behind it */
+                readonly of?: string;
+            };
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "pile": {
+                 *         "section": {
+                 *           "shape": "square",
+                 *           "width": "350 mm"
+                 *         },
+                 *         "length": 15,
+                 *         "headDepth": 1,
+                 *         "installation": "driven",
+                 *         "youngsModulus": "34 GPa",
+                 *         "unitWeight": 24.5,
+                 *         "sectionResistance": {
+                 *           "compression": 1500,
+                 *           "tension": 300
+                 *         }
+                 *       },
+                 *       "ground": {
+                 *         "name": "BH2",
+                 *         "waterTableDepth": 1.2,
+                 *         "layers": [
+                 *           {
+                 *             "name": "soft clay",
+                 *             "thickness": 6,
+                 *             "unitWeight": 16.5,
+                 *             "soil": "cohesive",
+                 *             "undrainedShearStrength": {
+                 *               "top": 16,
+                 *               "bottom": 30
+                 *             },
+                 *             "youngsModulus": 5500
+                 *           },
+                 *           {
+                 *             "name": "firm clay",
+                 *             "thickness": 14,
+                 *             "unitWeight": 18,
+                 *             "soil": "cohesive",
+                 *             "undrainedShearStrength": {
+                 *               "top": 32,
+                 *               "bottom": 50
+                 *             },
+                 *             "youngsModulus": {
+                 *               "top": 14000,
+                 *               "bottom": 22000
+                 *             }
+                 *           },
+                 *           {
+                 *             "name": "stiff clay",
+                 *             "unitWeight": 20,
+                 *             "soil": "cohesive",
+                 *             "undrainedShearStrength": 110,
+                 *             "youngsModulus": 50000
+                 *           }
+                 *         ]
+                 *       },
+                 *       "layout": {
+                 *         "kind": "grid",
+                 *         "columns": 7,
+                 *         "rows": 7,
+                 *         "spacing": 0.8
+                 *       },
+                 *       "designBasis": {
+                 *         "format": "overall-factor",
+                 *         "factor": 2.5,
+                 *         "blockFactor": 3,
+                 *         "upliftFactor": 3
+                 *       }
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["GroupRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The answer */
+            readonly 200: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["BlockAnswer"];
+                };
+            };
+            /** @description The body or URL cannot be read */
+            readonly 400: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The body is larger than the limit */
+            readonly 413: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The content type is not accepted */
+            readonly 415: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The request is invalid or physically impossible; `errors` lists every fault */
+            readonly 422: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The service is busy or stopping */
+            readonly 503: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly calculateGroup: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description `none` leaves the trace out */
+                readonly trace?: string;
+                /** @description JSON Pointer into the result: only the steps behind it */
+                readonly of?: string;
+            };
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "pile": {
+                 *         "section": {
+                 *           "shape": "square",
+                 *           "width": "350 mm"
+                 *         },
+                 *         "length": 15,
+                 *         "headDepth": 1,
+                 *         "installation": "driven",
+                 *         "youngsModulus": "34 GPa",
+                 *         "unitWeight": 24.5,
+                 *         "sectionResistance": {
+                 *           "compression": 1500,
+                 *           "tension": 300
+                 *         }
+                 *       },
+                 *       "ground": {
+                 *         "name": "BH2",
+                 *         "waterTableDepth": 1.2,
+                 *         "layers": [
+                 *           {
+                 *             "name": "soft clay",
+                 *             "thickness": 6,
+                 *             "unitWeight": 16.5,
+                 *             "soil": "cohesive",
+                 *             "undrainedShearStrength": {
+                 *               "top": 16,
+                 *               "bottom": 30
+                 *             },
+                 *             "youngsModulus": 5500
+                 *           },
+                 *           {
+                 *             "name": "firm clay",
+                 *             "thickness": 14,
+                 *             "unitWeight": 18,
+                 *             "soil": "cohesive",
+                 *             "undrainedShearStrength": {
+                 *               "top": 32,
+                 *               "bottom": 50
+                 *             },
+                 *             "youngsModulus": {
+                 *               "top": 14000,
+                 *               "bottom": 22000
+                 *             }
+                 *           },
+                 *           {
+                 *             "name": "stiff clay",
+                 *             "unitWeight": 20,
+                 *             "soil": "cohesive",
+                 *             "undrainedShearStrength": 110,
+                 *             "youngsModulus": 50000
+                 *           }
+                 *         ]
+                 *       },
+                 *       "layout": {
+                 *         "kind": "grid",
+                 *         "columns": 7,
+                 *         "rows": 7,
+                 *         "spacing": "800 mm"
+                 *       },
+                 *       "methods": {
+                 *         "cohesiveShaft": "rp2geo-2011"
+                 *       },
+                 *       "designBasis": {
+                 *         "format": "overall-factor",
+                 *         "factor": 2.5,
+                 *         "blockFactor": 3,
+                 *         "upliftFactor": 3
+                 *       }
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["GroupRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The answer */
+            readonly 200: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["GroupAnswer"];
+                };
+            };
+            /** @description The body or URL cannot be read */
+            readonly 400: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The body is larger than the limit */
+            readonly 413: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The content type is not accepted */
+            readonly 415: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The request is invalid or physically impossible; `errors` lists every fault */
+            readonly 422: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The service is busy or stopping */
+            readonly 503: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly calculateSettlement: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description `none` leaves the trace out */
+                readonly trace?: string;
+                /** @description JSON Pointer into the result: only the steps behind it */
+                readonly of?: string;
+            };
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "pile": {
+                 *         "section": {
+                 *           "shape": "circular",
+                 *           "diameter": "900 mm"
+                 *         },
+                 *         "length": 19,
+                 *         "headDepth": 1.2,
+                 *         "installation": "bored",
+                 *         "youngsModulus": "30 GPa",
+                 *         "unitWeight": 24,
+                 *         "sectionResistance": {
+                 *           "compression": 5900,
+                 *           "tension": 900
+                 *         }
+                 *       },
+                 *       "ground": {
+                 *         "name": "BH3",
+                 *         "waterTableDepth": 1.8,
+                 *         "layers": [
+                 *           {
+                 *             "name": "soft clay",
+                 *             "thickness": 3,
+                 *             "unitWeight": 16.5,
+                 *             "soil": "cohesive",
+                 *             "undrainedShearStrength": {
+                 *               "top": 20,
+                 *               "bottom": 28
+                 *             },
+                 *             "youngsModulus": 6500
+                 *           },
+                 *           {
+                 *             "name": "dense sand",
+                 *             "thickness": 6,
+                 *             "unitWeight": 20,
+                 *             "soil": "granular",
+                 *             "frictionAngle": 36,
+                 *             "youngsModulus": 55000
+                 *           },
+                 *           {
+                 *             "name": "stiff clay",
+                 *             "unitWeight": 20.5,
+                 *             "soil": "cohesive",
+                 *             "undrainedShearStrength": 150,
+                 *             "youngsModulus": 70000
+                 *           }
+                 *         ]
+                 *       },
+                 *       "layout": {
+                 *         "kind": "grid",
+                 *         "columns": 3,
+                 *         "rows": 2,
+                 *         "spacing": 2.7
+                 *       },
+                 *       "load": {
+                 *         "V": "7200 kN",
+                 *         "Mx": 250,
+                 *         "My": 400
+                 *       },
+                 *       "cap": "rigid",
+                 *       "method": "randolph-wroth-1978"
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["SettlementRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The answer */
+            readonly 200: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["SettlementAnswer"];
+                };
+            };
+            /** @description The body or URL cannot be read */
+            readonly 400: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The body is larger than the limit */
+            readonly 413: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The content type is not accepted */
+            readonly 415: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The request is invalid or physically impossible; `errors` lists every fault */
+            readonly 422: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The service is busy or stopping */
+            readonly 503: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly assessSchedule: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description `none` leaves the trace out */
+                readonly trace?: string;
+                /** @description JSON Pointer into the result: only the steps behind it */
+                readonly of?: string;
+            };
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "title": "River quay warehouse, lines A to C (invented)",
+                 *       "designBasis": {
+                 *         "format": "overall-factor",
+                 *         "factor": 2.5,
+                 *         "blockFactor": 3,
+                 *         "upliftFactor": 3
+                 *       },
+                 *       "ground": {
+                 *         "BH1": {
+                 *           "name": "BH1",
+                 *           "waterTableDepth": 1.5,
+                 *           "layers": [
+                 *             {
+                 *               "name": "soft clay",
+                 *               "thickness": 4,
+                 *               "unitWeight": 16.5,
+                 *               "soil": "cohesive",
+                 *               "undrainedShearStrength": {
+                 *                 "top": 18,
+                 *                 "bottom": 30
+                 *               },
+                 *               "youngsModulus": 6000,
+                 *               "poissonsRatio": 0.5
+                 *             },
+                 *             {
+                 *               "name": "medium dense sand",
+                 *               "thickness": 5,
+                 *               "unitWeight": 19,
+                 *               "soil": "granular",
+                 *               "frictionAngle": 33,
+                 *               "youngsModulus": 35000
+                 *             },
+                 *             {
+                 *               "name": "stiff clay",
+                 *               "unitWeight": 20,
+                 *               "soil": "cohesive",
+                 *               "undrainedShearStrength": 130,
+                 *               "youngsModulus": 55000
+                 *             }
+                 *           ]
+                 *         },
+                 *         "BH2": {
+                 *           "name": "BH2",
+                 *           "waterTableDepth": 1.8,
+                 *           "layers": [
+                 *             {
+                 *               "name": "soft clay",
+                 *               "thickness": 4,
+                 *               "unitWeight": 16.5,
+                 *               "soil": "cohesive",
+                 *               "undrainedShearStrength": {
+                 *                 "top": 18,
+                 *                 "bottom": 30
+                 *               },
+                 *               "youngsModulus": 6000,
+                 *               "poissonsRatio": 0.5
+                 *             },
+                 *             {
+                 *               "name": "firm clay",
+                 *               "thickness": 10,
+                 *               "unitWeight": 18,
+                 *               "soil": "cohesive",
+                 *               "undrainedShearStrength": {
+                 *                 "top": 35,
+                 *                 "bottom": 60
+                 *               },
+                 *               "youngsModulus": 15000
+                 *             },
+                 *             {
+                 *               "name": "stiff clay",
+                 *               "unitWeight": 20,
+                 *               "soil": "cohesive",
+                 *               "undrainedShearStrength": 110,
+                 *               "youngsModulus": 45000
+                 *             }
+                 *           ]
+                 *         }
+                 *       },
+                 *       "pileTypes": {
+                 *         "B600": {
+                 *           "section": {
+                 *             "shape": "circular",
+                 *             "diameter": 0.6
+                 *           },
+                 *           "length": 16,
+                 *           "headDepth": 1,
+                 *           "installation": "bored",
+                 *           "youngsModulus": "30 GPa",
+                 *           "sectionResistance": {
+                 *             "compression": 3200,
+                 *             "tension": 400
+                 *           }
+                 *         },
+                 *         "P350": {
+                 *           "section": {
+                 *             "shape": "square",
+                 *             "width": "350 mm"
+                 *           },
+                 *           "length": 11,
+                 *           "headDepth": 1,
+                 *           "installation": "driven"
+                 *         }
+                 *       },
+                 *       "caps": [
+                 *         {
+                 *           "mark": "A1",
+                 *           "x": 0,
+                 *           "y": 0,
+                 *           "ground": "BH1",
+                 *           "pileType": "B600",
+                 *           "layout": {
+                 *             "kind": "grid",
+                 *             "columns": 2,
+                 *             "rows": 2,
+                 *             "spacing": 1.8
+                 *           },
+                 *           "capWeight": 60
+                 *         },
+                 *         {
+                 *           "mark": "A2",
+                 *           "x": 8,
+                 *           "y": 0,
+                 *           "ground": "BH1",
+                 *           "pileType": "B600",
+                 *           "layout": {
+                 *             "kind": "grid",
+                 *             "columns": 3,
+                 *             "rows": 2,
+                 *             "spacing": 1.8
+                 *           },
+                 *           "capWeight": 60
+                 *         },
+                 *         {
+                 *           "mark": "B1",
+                 *           "x": 0,
+                 *           "y": 9,
+                 *           "ground": "BH2",
+                 *           "pileType": "P350",
+                 *           "layout": {
+                 *             "kind": "grid",
+                 *             "columns": 6,
+                 *             "rows": 6,
+                 *             "spacing": 0.8
+                 *           },
+                 *           "capWeight": 60
+                 *         },
+                 *         {
+                 *           "mark": "B2",
+                 *           "x": 8,
+                 *           "y": 9,
+                 *           "ground": "BH2",
+                 *           "pileType": "B600",
+                 *           "layout": {
+                 *             "kind": "ring",
+                 *             "count": 5,
+                 *             "radius": 2
+                 *           },
+                 *           "capWeight": 60
+                 *         },
+                 *         {
+                 *           "mark": "C1",
+                 *           "x": 0,
+                 *           "y": 18,
+                 *           "ground": "BH2",
+                 *           "pileType": "B600",
+                 *           "layout": {
+                 *             "kind": "grid",
+                 *             "columns": 2,
+                 *             "rows": 1,
+                 *             "spacing": 2
+                 *           },
+                 *           "capWeight": 20
+                 *         },
+                 *         {
+                 *           "mark": "C2",
+                 *           "x": 8,
+                 *           "y": 18,
+                 *           "ground": "BH1",
+                 *           "pileType": "B600",
+                 *           "layout": {
+                 *             "kind": "points",
+                 *             "points": [
+                 *               {
+                 *                 "x": 0,
+                 *                 "y": 0
+                 *               },
+                 *               {
+                 *                 "x": 2,
+                 *                 "y": 0
+                 *               },
+                 *               {
+                 *                 "x": 0.6,
+                 *                 "y": 1.9
+                 *               }
+                 *             ]
+                 *           },
+                 *           "capWeight": 60
+                 *         }
+                 *       ],
+                 *       "loads": {
+                 *         "signs": "right-handed-z-up",
+                 *         "loadsAre": "reactions",
+                 *         "combinations": {
+                 *           "W1": {
+                 *             "limitState": "working"
+                 *           },
+                 *           "W2": {
+                 *             "limitState": "working"
+                 *           },
+                 *           "S1": {
+                 *             "limitState": "serviceability"
+                 *           }
+                 *         },
+                 *         "rows": [
+                 *           {
+                 *             "cap": "A1",
+                 *             "combination": "W1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 2100,
+                 *             "Mx": 25,
+                 *             "My": 40,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "A1",
+                 *             "combination": "W2",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 1680,
+                 *             "Mx": 25,
+                 *             "My": -160,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "A1",
+                 *             "combination": "S1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 1785,
+                 *             "Mx": 25,
+                 *             "My": 30,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "A2",
+                 *             "combination": "W1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 2900,
+                 *             "Mx": 25,
+                 *             "My": 40,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "A2",
+                 *             "combination": "W2",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 2320,
+                 *             "Mx": 25,
+                 *             "My": -160,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "A2",
+                 *             "combination": "S1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 2465,
+                 *             "Mx": 25,
+                 *             "My": 30,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "B1",
+                 *             "combination": "W1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 4200,
+                 *             "Mx": 25,
+                 *             "My": 40,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "B1",
+                 *             "combination": "W2",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 3360,
+                 *             "Mx": 25,
+                 *             "My": -160,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "B1",
+                 *             "combination": "S1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 3570,
+                 *             "Mx": 25,
+                 *             "My": 30,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "B2",
+                 *             "combination": "W1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 2600,
+                 *             "Mx": 25,
+                 *             "My": 40,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "B2",
+                 *             "combination": "W2",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 2080,
+                 *             "Mx": 25,
+                 *             "My": -160,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "B2",
+                 *             "combination": "S1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 2210,
+                 *             "Mx": 25,
+                 *             "My": 30,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "C1",
+                 *             "combination": "W1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 300,
+                 *             "Mx": 0,
+                 *             "My": 40,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "C1",
+                 *             "combination": "W2",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": -210,
+                 *             "Mx": 0,
+                 *             "My": -160,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "C1",
+                 *             "combination": "S1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 255,
+                 *             "Mx": 0,
+                 *             "My": 30,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "C2",
+                 *             "combination": "W1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 2200,
+                 *             "Mx": 25,
+                 *             "My": 40,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "C2",
+                 *             "combination": "W2",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 1760,
+                 *             "Mx": 25,
+                 *             "My": -160,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "C2",
+                 *             "combination": "S1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 1870,
+                 *             "Mx": 25,
+                 *             "My": 30,
+                 *             "Mz": 0
+                 *           }
+                 *         ]
+                 *       },
+                 *       "limits": {
+                 *         "settlement": 25,
+                 *         "tilt": 0.002,
+                 *         "angularDistortion": 0.002
+                 *       }
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["Schedule"];
+                readonly "multipart/form-data": {
+                    /** @description JSON without `loads.rows` */
+                    readonly schedule: string;
+                    /** @description CSV with a header */
+                    readonly loads: string;
+                };
+            };
+        };
+        readonly responses: {
+            /** @description The answer */
+            readonly 200: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["AssessmentAnswer"];
+                };
+            };
+            /** @description The body or URL cannot be read */
+            readonly 400: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The body is larger than the limit */
+            readonly 413: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The content type is not accepted */
+            readonly 415: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The request is invalid or physically impossible; `errors` lists every fault */
+            readonly 422: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The service is busy or stopping */
+            readonly 503: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The work took longer than the service allows */
+            readonly 504: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly replayTrace: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                readonly "application/json": components["schemas"]["ReplayRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The answer */
+            readonly 200: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["ReplayAnswer"];
+                };
+            };
+            /** @description The body or URL cannot be read */
+            readonly 400: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The body is larger than the limit */
+            readonly 413: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The content type is not accepted */
+            readonly 415: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The request is invalid or physically impossible; `errors` lists every fault */
+            readonly 422: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The service is busy or stopping */
+            readonly 503: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly listMethods: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description The list */
+            readonly 200: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["MethodList"];
+                };
+            };
+        };
+    };
+    readonly listSources: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description The list */
+            readonly 200: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["SourceList"];
+                };
+            };
+        };
+    };
+    readonly listLimits: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description The list */
+            readonly 200: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["LimitList"];
+                };
+            };
+        };
+    };
+    readonly getMethod: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                readonly id: string;
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description The methods */
+            readonly 200: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["MethodReply"];
+                };
+            };
+            /** @description No method has this id */
+            readonly 404: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+}
