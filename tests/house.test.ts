@@ -57,6 +57,7 @@ const readableTypes = ['engine/notice.ts', 'engine/requests.ts']
 /** Packages that the engine may import: it runs in a thread, a browser or a notebook alike. */
 const enginePackages: Readonly<Record<string, readonly string[]>> = {
   mathjs: ['engine/trace', 'engine/replay'],
+  temml: ['engine/trace'],
   'd3-delaunay': ['engine/assessment'],
 }
 

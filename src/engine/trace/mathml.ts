@@ -13,11 +13,21 @@ type Symbols = (name: string, node: MathNode) => string
 
 const render = (tex: string): string => temml.renderToString(tex, { throwOnError: true, displayMode: true })
 
-/** The TeX of a formula's text; products that stand beside a unit are quantities. */
+/** The tree without its brackets: the precedence of the operators gives back those that are needed. */
+const parsed = (text: string): MathNode =>
+  parse(text).transform((node) => {
+    let inner = node as Node
+    while (inner.type === 'ParenthesisNode') inner = inner.content
+    return inner
+  })
+
+/**
+ * The TeX of a formula's text; a number beside a unit is a quantity. The space before an atom keeps a letter off the
+ * command before it (mathjs writes `\cdot` without one), and `1, 0.5` from being read as one number with a decimal comma.
+ */
 function texFormula(root: MathNode, symbols: Symbols): string {
   const handler = (node: Node): string | undefined => {
-    if (node.type === 'ConstantNode' && typeof node.value === 'number') return texNumber(node.value)
-    // The space keeps a letter off the command before it: mathjs writes \cdot without one.
+    if (node.type === 'ConstantNode' && typeof node.value === 'number') return ` ${texNumber(node.value)}`
     if (node.type === 'SymbolNode') return ` ${symbols(node.name, node)}`
     if (node.type === 'OperatorNode' && node.implicit) {
       const [amount, unit] = node.args as Node[]
@@ -34,7 +44,7 @@ export function formulaMathml({
   symbol,
   text,
 }: Pick<Declaration<Record<string, UnitCode>, UnitCode>, 'symbol' | 'text'>): string {
-  return render(`${texSymbol(symbol)} = ${texFormula(parse(text), texSymbol)}`)
+  return render(`${texSymbol(symbol)} = ${texFormula(parsed(text), texSymbol)}`)
 }
 
 const SIGNIFICANT = 5
@@ -66,7 +76,7 @@ function numbers(root: MathNode, operands: readonly OperandLine[]): Symbols {
 function texOperands(step: Step): string | undefined {
   switch (step.kind) {
     case 'formula': {
-      const root = parse(step.formula)
+      const root = parsed(step.formula)
       return texFormula(root, numbers(root, step.operands)).trim()
     }
     case 'sum':

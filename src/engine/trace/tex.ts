@@ -6,6 +6,9 @@ const GREEK = new Set(
     'Gamma Delta Theta Lambda Xi Pi Sigma Upsilon Phi Psi Omega'
   ).split(' '),
 )
+/** The forms that the trade writes, where TeX has two. */
+const VARIANTS: Readonly<Record<string, string>> = { phi: 'varphi', epsilon: 'varepsilon' }
+const greek = (name: string): string | undefined => (GREEK.has(name) ? `\\${VARIANTS[name] ?? name}` : undefined)
 /** Subscripts that count or name an axis are set like variables, all others like words. */
 const RUNNING = new Set(['i', 'j', 'x', 'y', 'z'])
 const SPECIAL: Readonly<Record<string, string>> = {
@@ -17,16 +20,15 @@ const words = (text: string) => `\\text{${text.replace(/[\\~^]|[#$%&_{}]/g, (c) 
 const isWord = (text: string) => /^[A-Za-z0-9]+$/.test(text)
 
 function subscript(part: string): string {
-  if (GREEK.has(part)) return `\\${part}`
-  return RUNNING.has(part) || /^\d+$/.test(part) ? part : `\\mathrm{${part}}`
+  return greek(part) ?? (RUNNING.has(part) || /^\d+$/.test(part) ? part : `\\mathrm{${part}}`)
 }
 
 /** `c_u` with a subscript, `sigma_v` in Greek, `OCR` upright; a symbol that is words stays words. */
 export function texSymbol(symbol: string): string {
   const [head = '', ...below] = symbol.split('_')
   if (!/^[A-Za-z][A-Za-z0-9]*$/.test(head) || !below.every(isWord)) return words(symbol)
-  const base = GREEK.has(head) ? `\\${head}` : head.length === 1 ? head : `\\mathrm{${head}}`
-  return below.length === 0 ? base : `${base}_{${below.map(subscript).join(',')}}`
+  const base = greek(head) ?? (head.length === 1 ? head : `\\mathrm{${head}}`)
+  return below.length === 0 ? base : `${base}_{${below.map(subscript).join(', ')}}`
 }
 
 /** A number as printed by JavaScript, but with a power of ten below 0.001 and from a million. */
