@@ -32,7 +32,7 @@ function patient(retries: number, base: typeof fetch): typeof fetch {
 export function kentledge({ baseUrl, retries = 3, fetch: base = globalThis.fetch }: ClientOptions) {
   const http = patient(retries, base)
   const client = createClient<paths>({ baseUrl, fetch: (request) => http(request) })
-  type Trace = { readonly trace?: 'none'; readonly of?: string }
+  type Trace = { readonly trace?: 'none'; readonly of?: string; readonly cap?: string }
   const taken = <T>({ data, error }: { data?: T; error?: unknown }): T => {
     if (data !== undefined) return data
     throw new KentledgeProblem(error as Schemas['Problem'])

@@ -1831,6 +1831,8 @@ export interface operations {
                 readonly trace?: string;
                 /** @description JSON Pointer into the result: only the steps behind it */
                 readonly of?: string;
+                /** @description Mark of a cap: the trace holds every combination of this cap, and nothing of the others */
+                readonly cap?: string;
             };
             readonly header?: never;
             readonly path?: never;

@@ -130,6 +130,7 @@ const options = [
   query('trace', '`none` leaves the trace out'),
   query('of', 'JSON Pointer into the result: only the steps behind it'),
 ]
+const oneCap = query('cap', 'Mark of a cap: the trace holds every combination of this cap, and nothing of the others')
 
 /** The OpenAPI 3.1 document. Requests are described by the schemas that parse them, so the two cannot differ. */
 export function openapi(examples: Readonly<Record<string, unknown>>) {
@@ -154,7 +155,7 @@ export function openapi(examples: Readonly<Record<string, unknown>>) {
       post: {
         operationId,
         summary,
-        ...(example && { parameters: options }),
+        ...(example && { parameters: path === '/v1/assessments' ? [...options, oneCap] : options }),
         requestBody: { required: true, content },
         responses: { '200': json(answer, 'The answer'), ...failures, ...slow },
       },

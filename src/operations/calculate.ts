@@ -4,12 +4,12 @@ import { parse } from '../contract/parse.ts'
 import { type Answer, EngineFault, engineVersion, sliceTrace } from '../engine/index.ts'
 import { type ErrorCode, problemError, problemOf } from '../errors.ts'
 
-export type Options = { readonly trace: boolean; readonly of?: string }
+export type Options = { readonly trace: boolean; readonly of?: string; readonly cap?: string }
 
 /** What every calculator does: parse, hash, compute, and say by which engine. */
 export function calculate<T, R>(
   schema: z.ZodType<T>,
-  compute: (request: T, option: { trace: boolean }) => Answer<R>,
+  compute: (request: T, option: { trace: boolean; cap?: string }) => Answer<R>,
   input: unknown,
   options: Options,
 ) {

@@ -1,14 +1,18 @@
+import { refuse } from '../faults.ts'
 import { type Notice, usualCautions } from '../notice.ts'
 import { statics } from '../sources/bibliography.ts'
 import { formula } from '../trace/formula.ts'
 import { settleTerms, traceOf } from '../trace/outcome.ts'
 import { Sheet } from '../trace/sheet.ts'
 import type { Term } from '../trace/term.ts'
-import { assessCap, type Row, type SettlementTerms, utilisationRatio } from './assess-cap.ts'
+import { assessCap, type Row } from './assess-cap.ts'
+import { utilisationRatio } from './checks/serviceability.ts'
 import { neighbourPairs } from './neighbours.ts'
+import { idPart } from './places.ts'
 import { type ResistanceSet, resistanceSet } from './resistance-set.ts'
 import type { Cap, Schedule } from './schedule.ts'
 import { refuseFaults } from './schedule-faults.ts'
+import type { SettlementTerms } from './settle-cap.ts'
 
 export const differential = formula({
   symbol: 'ds',
@@ -37,23 +41,40 @@ export const planDistance = formula({
 
 type Assessed = { readonly cap: Cap; readonly set: ResistanceSet } & ReturnType<typeof assessCap>
 
+export type AssessOptions = {
+  readonly trace: boolean
+  /** Mark of one cap: the trace then holds every combination of that cap, and nothing of the others. */
+  readonly cap?: string
+}
+
 /** The main job: every check of every cap of a schedule. Refuses a schedule with faults, all of them at once. */
-export function assess(schedule: Schedule, options: { readonly trace: boolean }) {
+export function assess(schedule: Schedule, options: AssessOptions) {
   refuseFaults(schedule)
-  const sheet = options.trace ? Sheet.recording() : Sheet.silent
+  const alone = options.trace ? options.cap : undefined
+  if (alone !== undefined && !schedule.caps.some((cap) => cap.mark === alone)) {
+    refuse('unknown-reference', '', {
+      kind: 'cap',
+      name: alone,
+      known: schedule.caps.slice(0, 20).map((cap) => cap.mark),
+    })
+  }
+  const book = options.trace ? Sheet.recording() : Sheet.silent
+  const sheetOf = (cap: Cap) => (alone === undefined || cap.mark === alone ? book : Sheet.silent)
   const sets = new Map<string, ResistanceSet>()
   const rowsOf = new Map<string, Row[]>(schedule.caps.map((cap) => [cap.mark, []]))
   for (const [index, row] of schedule.loads.rows.entries()) {
     rowsOf.get(row.cap)!.push({ index, row, limitState: schedule.loads.combinations[row.combination]!.limitState })
   }
   const assessed = schedule.caps.map((cap, index): Assessed => {
-    const key = JSON.stringify([cap.pileType, cap.ground, cap.layout])
+    const key = JSON.stringify([cap.pileType, cap.ground, cap.layout, cap.mark === alone])
+    const sheet = sheetOf(cap)
     const set = sets.get(key) ?? resistanceSet(sheet, schedule, cap, index, sets.size + 1)
     sets.set(key, set)
-    return { cap, set, ...assessCap(sheet, schedule, cap, index, set, rowsOf.get(cap.mark)!) }
+    return { cap, set, ...assessCap(sheet, schedule, cap, index, set, rowsOf.get(cap.mark)!, cap.mark === alone) }
   })
+  const common = alone === undefined ? book : Sheet.silent
   const tree = {
-    summary: summary(sheet, assessed),
+    summary: summary(common, assessed),
     caps: assessed.map(({ cap, set, checks, settlement }) => ({
       mark: cap.mark,
       pileCount: set.pileCount,
@@ -61,14 +82,14 @@ export function assess(schedule: Schedule, options: { readonly trace: boolean })
       block: set.block,
       checks,
       settlement,
-      stiffness: stiffness(sheet, cap, set),
+      stiffness: stiffness(sheetOf(cap), cap, set),
       notices: set.notices,
     })),
-    neighbours: neighbours(sheet, schedule, assessed),
+    neighbours: neighbours(common, schedule, assessed),
   }
   const { result, links } = settleTerms(tree)
   const notices: Notice[] = [usualCautions]
-  return { result, notices, ...(options.trace && { trace: traceOf(sheet, links) }) }
+  return { result, notices, ...(options.trace && { trace: traceOf(book, links) }) }
 }
 
 function summary(sheet: Sheet, assessed: readonly Assessed[]) {
@@ -92,7 +113,7 @@ function summary(sheet: Sheet, assessed: readonly Assessed[]) {
 }
 
 function stiffness(sheet: Sheet, cap: Cap, set: ResistanceSet) {
-  const here = sheet.within(`caps/${cap.mark.replaceAll('/', '~')}/stiffness`)
+  const here = sheet.within(`caps/${idPart(cap.mark)}/stiffness`)
   const term = <const U extends 'kN/m' | 'kN.m/rad'>(symbol: string, name: string, unit: U, i: number): Term<U> => {
     const f = set.elastic.flexibility[i * 4]!
     const value = f > 0 ? 1 / f : 0

@@ -11,6 +11,7 @@ import { randolphWroth } from '../settlement/randolph-wroth-1978.ts'
 import { interactionOf } from '../settlement/settlement.ts'
 import type { Sheet } from '../trace/sheet.ts'
 import type { Term } from '../trace/term.ts'
+import { escapePointer } from './places.ts'
 import type { Cap, Schedule } from './schedule.ts'
 
 /** Resistances that a combination is checked against, after the design basis. */
@@ -37,10 +38,9 @@ export function resistanceSet(root: Sheet, schedule: Schedule, cap: Cap, index: 
   const notice = (n: Notice) => notices.set(n.text + (n.pointer ?? ''), n)
   const pile = schedule.pileTypes[cap.pileType]!
   const ground = schedule.ground[cap.ground]!
-  const escaped = (name: string) => name.replaceAll('~', '~0').replaceAll('/', '~1')
   const at = {
-    pile: `/pileTypes/${escaped(cap.pileType)}`,
-    ground: `/ground/${escaped(cap.ground)}`,
+    pile: `/pileTypes/${escapePointer(cap.pileType)}`,
+    ground: `/ground/${escapePointer(cap.ground)}`,
     layout: `/caps/${index}/layout`,
     methods: '/methods',
     designBasis: '/designBasis',

@@ -65,6 +65,8 @@ function check(node: Node, where: Where, text: string, used: Set<string>): Check
       const js = Object.hasOwn(FUNCTIONS, name) ? FUNCTIONS[name] : undefined
       if (!js) return fail(text, `function ${name} is not allowed`)
       const args = (node.args as MathNode[]).map(walk)
+      // mathjs would read further arguments (a base, a root) that the emitted code would drop.
+      if (name !== 'min' && name !== 'max' && args.length > 1) fail(text, `${name} takes one argument`)
       const first = args[0] ?? fail(text, `${name} needs an argument`)
       const code = `${js}(${args.map((a) => a.code).join(', ')})`
       if (name === 'min' || name === 'max') {

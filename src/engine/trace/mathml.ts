@@ -68,7 +68,7 @@ function numbers(root: MathNode, operands: readonly OperandLine[]): Symbols {
     const operand = values.get(name)
     if (!operand) return texSymbol(name)
     const tex = quantity(operand)
-    const compound = powered.has(node) && (operand.unit !== '1' || tex.includes('\\times'))
+    const compound = powered.has(node) && (operand.unit !== '1' || tex.includes('^'))
     return compound || (operand.value < 0 && !bare.has(node)) ? bracketed(tex) : tex
   }
 }

@@ -20,7 +20,8 @@ export function settleTerms<T>(tree: T): { result: Plain<T>; links: Record<strin
   const links: Record<string, string> = {}
   const walk = (node: unknown, pointer: string): unknown => {
     if (isTerm(node)) {
-      links[pointer] = node.from
+      // A term of a silent sheet has no step.
+      if (node.from !== '') links[pointer] = node.from
       return node.value
     }
     if (Array.isArray(node)) return node.map((child, i) => walk(child, `${pointer}/${i}`))

@@ -8,10 +8,10 @@ import { calculateSinglePile } from '../../operations/calculate-single-pile.ts'
 
 /** `?trace=none` leaves the trace out; `?of=<pointer>` gives only the steps behind one part of the result. */
 export function optionsOf(request: FastifyRequest): Options {
-  const { trace = 'full', of } = request.query as Record<string, string | undefined>
+  const { trace = 'full', of, cap } = request.query as Record<string, string | undefined>
   if (trace !== 'full' && trace !== 'none')
     throw new Problem('bad-query', { field: 'trace', expected: 'full or none', got: trace })
-  return { trace: trace === 'full', of }
+  return { trace: trace === 'full', of, cap }
 }
 
 const routes = {

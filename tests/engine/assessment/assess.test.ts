@@ -3,6 +3,7 @@ import { expect, test } from 'vitest'
 import { capActions } from '../../../src/engine/assessment/cap-loads.ts'
 import { neighbourPairs } from '../../../src/engine/assessment/neighbours.ts'
 import type { Cap, Loads } from '../../../src/engine/assessment/schedule.ts'
+import { replay } from '../../../src/engine/index.ts'
 import type { Problem } from '../../../src/errors.ts'
 import { assessSchedule } from '../../../src/operations/assess-schedule.ts'
 
@@ -39,6 +40,17 @@ test('every number of the result is the value of a step; the trace is closed; tr
     seen.add(step.id)
   }
   expect(assessSchedule(example(), { trace: false }).result).toEqual(answer.result)
+})
+
+test('the full trace of one cap: every combination of every check, the same result, replayable', () => {
+  const whole = assessSchedule(example(), { trace: true })
+  const one = assessSchedule(example(), { trace: true, cap: 'C1' })
+  expect(one.result).toEqual(whole.result)
+  const ids = one.trace!.steps.map((s) => s.id)
+  for (const combination of ['W1', 'W2']) expect(ids).toContain(`caps/C1/pile-compression/${combination}/u`)
+  expect(ids.some((id) => id.startsWith('caps/') && !id.startsWith('caps/C1/'))).toBe(false)
+  expect(replay(one.trace!).steps.filter((s) => !s.holds)).toEqual([])
+  expect(() => assessSchedule(example(), { trace: true, cap: 'Z9' })).toThrow()
 })
 
 test('the example shows block failure, uplift and an exceeded limit', () => {
