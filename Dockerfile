@@ -1,7 +1,7 @@
 FROM node:26-slim AS packages
 WORKDIR /app
 COPY package.json package-lock.json .npmrc ./
-RUN npm ci --omit=dev
+RUN npm ci --omit=dev --ignore-scripts
 
 FROM node:26-slim
 ENV NODE_ENV=production HOST=0.0.0.0 PORT=8080 DATA_DIR=/data

@@ -7,32 +7,11 @@ import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { setTimeout as wait } from 'node:timers/promises'
 import { fileURLToPath } from 'node:url'
+import { kentledge, type Schemas } from './client.ts'
 
 /** Starts the service, posts the demo schedule and its CSV of reactions as a model exporter would, prints the verdicts, stops the service. */
 
-type Check = { check: string; combination: string; demand: number; resistance: number; utilisation: number }
-type Operand = { symbol: string; value: number; unit: string }
-type Step = {
-  id: string
-  kind: string
-  symbol: string
-  name: string
-  value: number
-  unit: string
-  formula?: string
-  operands?: Operand[]
-  source?: { key: string; locator: string }
-}
-type Answer = {
-  result: {
-    summary: { caps: number; satisfied: number; exceeded: number; worst: Omit<Check, 'demand'> & { cap: string } }
-    caps: { mark: string; pileCount: number; checks: Check[]; settlement: { settlement: number }[] }[]
-    neighbours: { a: string; b: string; angularDistortion: number; utilisation?: number }[]
-  }
-  trace: { steps: Step[]; results: Record<string, string> }
-  notices: { text: string }[]
-  meta: { engine: string; requestHash: string }
-}
+type Answer = Schemas['AssessmentAnswer']
 
 const example = (name: string) => fileURLToPath(new URL(`examples/${name}`, import.meta.url))
 const print = (line = '') => process.stdout.write(`${line}\n`)
@@ -73,15 +52,6 @@ async function startService(dataDir: string) {
   throw new Error('the service was not ready after 30 s')
 }
 
-async function postSchedule(address: string): Promise<Answer> {
-  const form = new FormData()
-  form.set('schedule', new Blob([await readFile(example('demo-schedule.json'))], { type: 'application/json' }))
-  form.set('loads', await openAsBlob(example('demo-loads.csv'), { type: 'text/csv' }), 'demo-loads.csv')
-  const reply = await fetch(`${address}/v1/assessments`, { method: 'POST', body: form })
-  if (!reply.ok) throw new Error(`${reply.status}: ${await reply.text()}`)
-  return (await reply.json()) as Answer
-}
-
 function printVerdicts({ caps, summary, neighbours }: Answer['result']): void {
   const row = (cap: string, piles: string, check: string, combination: string, use: string, settlement: string) =>
     print(
@@ -104,24 +74,22 @@ function printVerdicts({ caps, summary, neighbours }: Answer['result']): void {
 }
 
 /** The steps right above the worst utilisation, read up from `trace.results`, as a checker would. */
-function printWorst({ result, trace }: Answer): void {
-  const { cap, check, combination } = result.summary.worst
-  const at = trace.results['/summary/worst/utilisation']
-  const byId = new Map(trace.steps.map((step) => [step.id, step]))
+function printWorst({ result: { summary }, trace }: Answer): void {
+  if (!summary.worst || !trace) throw new Error('the answer has no worst check or no trace')
+  const { cap, check, combination } = summary.worst
   print(`How ${cap}, ${check}, ${combination} came about (the last steps of ${trace.steps.length}):`)
+  const byId = new Map(trace.steps.map((step) => [step.id, step]))
   const wanted = new Set<string>()
-  let front = at === undefined ? [] : [at]
+  let front = [trace.results['/summary/worst/utilisation']]
   for (let depth = 0; depth < 3; depth++) {
-    for (const id of front) wanted.add(id)
-    front = front.flatMap((id) => {
-      const step = byId.get(id)
-      return step && 'operands' in step ? (step.operands as (Operand & { from: string })[]).map((o) => o.from) : []
-    })
+    const steps = front.flatMap((id) => byId.get(id ?? '') ?? [])
+    for (const step of steps) wanted.add(step.id)
+    front = steps.flatMap((step) => ('operands' in step ? step.operands.map((o) => o.from) : []))
   }
   for (const step of trace.steps.filter((s) => wanted.has(s.id))) {
     const value = `${step.symbol.padEnd(6)} = ${step.value.toPrecision(5).padStart(9)} ${step.unit.padEnd(6)}`
-    print(`  ${value}  ${step.name}${step.formula ? `: ${step.formula}` : ''}`)
-    if (step.formula && step.operands)
+    print(`  ${value}  ${step.name}${step.kind === 'formula' ? `: ${step.formula}` : ''}`)
+    if (step.kind === 'formula')
       print(`${' '.repeat(28)}with ${step.operands.map((o) => `${o.symbol} = ${+o.value.toPrecision(5)}`).join(', ')}`)
   }
 }
@@ -135,9 +103,10 @@ async function linksOf(address: string): Promise<string[]> {
 const dataDir = await mkdtemp(join(tmpdir(), 'kentledge-demo-'))
 const { service, address } = await startService(dataDir)
 try {
-  const { title } = JSON.parse(await readFile(example('demo-schedule.json'), 'utf8')) as { title: string }
-  const answer = await postSchedule(address)
-  print(title)
+  const schedule = JSON.parse(await readFile(example('demo-schedule.json'), 'utf8')) as { title: string }
+  const loads = await openAsBlob(example('demo-loads.csv'), { type: 'text/csv' })
+  const answer = await kentledge({ baseUrl: address }).assessCsv(schedule, loads)
+  print(schedule.title)
   print()
   printVerdicts(answer.result)
   print()

@@ -67,7 +67,7 @@ const section = z.discriminatedUnion('shape', [
 
 export const pileType = z.strictObject({
   section,
-  length: quantity('m', 'length', { above: 0, max: 500 }),
+  length: quantity('m', 'length', { min: 0.1, max: 500 }),
   headDepth: quantity('m', 'depth of the head below the surface', { min: 0, max: 500 }).optional(),
   installation: z.enum(['driven', 'bored', 'continuous-flight-auger']),
   youngsModulus: quantity('kPa', "Young's modulus of the pile", { above: 0, max: 1e9 }).optional(),

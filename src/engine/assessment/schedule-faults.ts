@@ -1,11 +1,13 @@
 import { limitStateFor } from '../design-basis/design-resistance.ts'
 import { EngineFault, type Fault } from '../faults.ts'
-import type { Schedule } from './schedule.ts'
+import type { LimitState, Schedule } from './schedule.ts'
+
+type Tell = (code: Fault['code'], pointer: string, facts: Fault['facts']) => void
 
 /** Everything that a schedule refers to and does not hold, and limit states that do not fit; all faults together. */
 export function refuseFaults(schedule: Schedule): void {
   const faults: Fault[] = []
-  const fault = (code: Fault['code'], pointer: string, facts: Fault['facts']) => faults.push({ code, pointer, facts })
+  const fault: Tell = (code, pointer, facts) => faults.push({ code, pointer, facts })
   const marks = new Set<string>()
   for (const [i, cap] of schedule.caps.entries()) {
     if (marks.has(cap.mark)) fault('duplicate-mark', `/caps/${i}/mark`, { mark: cap.mark })
@@ -19,7 +21,12 @@ export function refuseFaults(schedule: Schedule): void {
     }
   }
   const { combinations, rows, signs } = schedule.loads
+  const present = new Set<string>()
   for (const [i, row] of rows.entries()) {
+    const place = placeOf(row.cap, row.combination)
+    // Which of the two holds is a guess; the sum of both is another.
+    if (present.has(place)) fault('duplicate-mark', `/loads/rows/${i}`, { mark: `${row.cap}, ${row.combination}` })
+    present.add(place)
     if (!marks.has(row.cap))
       fault('unknown-reference', `/loads/rows/${i}/cap`, { kind: 'cap', name: row.cap, known: [...marks].slice(0, 20) })
     if (!Object.hasOwn(combinations, row.combination))
@@ -46,13 +53,39 @@ export function refuseFaults(schedule: Schedule): void {
           : `Partial and resistance factors are checked with ultimate (factored) combinations only; the schedule has ${found.join(', ') || 'none'}`,
     })
   }
-  const wanted = Object.entries(combinations)
-    .filter(([, c]) => c.limitState === needed)
-    .map(([name]) => name)
-  const present = new Set(rows.map((row) => `${row.cap}\n${row.combination}`))
-  for (const [i, cap] of schedule.caps.entries()) {
-    if (wanted.length > 0 && !wanted.some((name) => present.has(`${cap.mark}\n${name}`)))
-      fault('missing-load', `/caps/${i}`, { cap: cap.mark, combination: wanted.join(', ') })
-  }
+  for (const cap of capsWithout(schedule, present, [needed]))
+    fault('missing-load', `/caps/${cap.index}`, { cap: cap.mark, combination: cap.wanted.join(', ') })
+  serviceFaults(schedule, present, found, fault)
   if (faults.length > 0) throw new EngineFault(faults)
+}
+
+const placeOf = (cap: string, combination: string) => JSON.stringify([cap, combination])
+
+/** Caps without a row in any combination of these limit states; none where the schedule has no such combination. */
+function capsWithout({ caps, loads }: Schedule, present: ReadonlySet<string>, states: readonly LimitState[]) {
+  const wanted = Object.entries(loads.combinations)
+    .filter(([, c]) => states.includes(c.limitState))
+    .map(([name]) => name)
+  if (wanted.length === 0) return []
+  return caps.flatMap(({ mark }, index) =>
+    wanted.some((name) => present.has(placeOf(mark, name))) ? [] : [{ mark, index, wanted }],
+  )
+}
+
+/** A limit that nothing is checked against would read as satisfied. */
+function serviceFaults(schedule: Schedule, present: ReadonlySet<string>, found: readonly LimitState[], fault: Tell) {
+  const limits = Object.values(schedule.limits ?? {}).filter((limit) => limit !== undefined)
+  if (limits.length === 0) return
+  const states: readonly LimitState[] = ['serviceability', 'working']
+  if (!states.some((state) => found.includes(state))) {
+    fault('limit-state-mismatch', '/limits', {
+      needed: 'serviceability',
+      found,
+      reason: `Settlement, tilt and angular distortion are checked with serviceability combinations, or with working ones where there are none; the schedule has ${found.join(', ') || 'none'}`,
+    })
+  }
+  // Working rows are demanded of every cap already where the design basis is checked with them.
+  if (limitStateFor(schedule.designBasis) === 'working') return
+  for (const cap of capsWithout(schedule, present, states))
+    fault('missing-load', `/caps/${cap.index}`, { cap: cap.mark, combination: cap.wanted.join(', ') })
 }

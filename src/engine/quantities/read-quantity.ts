@@ -19,6 +19,7 @@ export function readQuantity(input: number | string, expected: UnitCode): ReadQu
   const match = WRITTEN.exec(input)
   if (!match) return { ok: false, code: 'not-a-number', got: input }
   const number = Number(match[1])
+  if (!Number.isFinite(number)) return { ok: false, code: 'not-a-number', got: input }
   const code = match[2] ?? ''
   if (code === '') return { ok: true, value: number }
   const written = Object.hasOwn(writtenUnits, code) ? writtenUnits[code] : undefined

@@ -38,6 +38,7 @@ test.each<[string | number, UnitCode, string]>([
   ['3 furlong', 'm', 'unknown-unit'],
   ['about 3', 'm', 'not-a-number'],
   ['1e999 m', 'm', 'not-a-number'],
+  ['1e999', 'm', 'not-a-number'],
   [Number.NaN, 'm', 'not-a-number'],
   ['20 deg', '1', 'wrong-dimension'],
   ['5 constructor', 'm', 'unknown-unit'],
