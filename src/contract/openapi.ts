@@ -155,6 +155,7 @@ export function openapi(examples: Readonly<Record<string, unknown>>) {
       post: {
         operationId,
         summary,
+        tags: ['calculators'],
         ...(example && { parameters: path === '/v1/assessments' ? [...options, oneCap] : options }),
         requestBody: { required: true, content },
         responses: { '200': json(answer, 'The answer'), ...failures, ...slow },
@@ -162,11 +163,12 @@ export function openapi(examples: Readonly<Record<string, unknown>>) {
     }
   }
   for (const [path, [operationId, summary, reply]] of Object.entries(lists))
-    paths[path] = { get: { operationId, summary, responses: { '200': json(reply, 'The list') } } }
+    paths[path] = { get: { operationId, summary, tags: ['catalogue'], responses: { '200': json(reply, 'The list') } } }
   const id = { name: 'id', in: 'path', required: true, schema: { type: 'string' } }
   paths['/v1/methods/{id}'] = {
     get: {
       operationId: 'getMethod',
+      tags: ['catalogue'],
       summary: 'The methods of one id',
       parameters: [id],
       responses: { '200': json('MethodReply', 'The methods'), '404': problem('No method has this id') },

@@ -155,5 +155,5 @@ test('the reference page loads nothing from elsewhere', async () => {
   const page = await app.inject('/reference/')
   expect(page.statusCode).toBe(200)
   expect(page.body.match(/(?:src|href)="https?:/g)).toBeNull()
-  expect(page.headers['content-security-policy']).toContain("default-src 'self'")
+  expect(page.headers['content-security-policy']).toContain("default-src 'none'; script-src 'self'")
 })

@@ -17,7 +17,13 @@ variables.value = JSON.stringify(
       ground: {
         waterTableDepth: 1.5,
         layers: [
-          { name: 'stiff clay', unitWeight: 20, soil: 'cohesive', undrainedShearStrength: { top: 60, bottom: 140 } },
+          {
+            name: 'stiff clay',
+            thickness: 20,
+            unitWeight: 20,
+            soil: 'cohesive',
+            undrainedShearStrength: { top: 60, bottom: 140 },
+          },
         ],
       },
     },
