@@ -7,6 +7,7 @@ import { engineVersion } from './engine/index.ts'
 import { Problem } from './errors.ts'
 import { graphqlPlugin } from './graphql/plugin.ts'
 import { accessLog, traceIdOf } from './http/access-log.ts'
+import { answerClientError } from './http/client-errors.ts'
 import { type Drain, drain } from './http/drain.ts'
 import { metrics } from './http/metrics.ts'
 import { probes } from './http/probes.ts'
@@ -26,6 +27,10 @@ export async function buildService(config: Config): Promise<Service> {
   const app = fastify({
     logger: { level: config.LOG_LEVEL },
     bodyLimit: config.BODY_LIMIT,
+    requestTimeout: config.REQUEST_TIMEOUT * 1000,
+    // Slow requests are looked for every second (by default every half minute); Node finds none when headers may take longer than the whole.
+    http: { connectionsCheckingInterval: 1000, headersTimeout: config.REQUEST_TIMEOUT * 1000 },
+    clientErrorHandler: answerClientError,
     genReqId: (request) => traceIdOf(request.headers.traceparent),
     logController: new LogController({ requestIdLogLabel: 'traceId', disableRequestLogging: true }),
     return503OnClosing: false,

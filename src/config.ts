@@ -9,6 +9,7 @@ const schema = z.object({
   PORT: whole(8080, 0, 65535),
   LOG_LEVEL: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent']).default('info'),
   BODY_LIMIT: whole(64 * 1024 * 1024, 1024, 2 ** 31),
+  REQUEST_TIMEOUT: whole(60, 1, 3600),
   WORKERS: whole(availableParallelism(), 1, 256),
   WORK_QUEUE: whole(32, 0, 10_000),
   WORK_TIMEOUT: whole(120, 1, 3600),

@@ -13,6 +13,9 @@ type Contract =
   | 'malformed-url'
   | 'not-acceptable'
   | 'timed-out'
+  | 'malformed-request'
+  | 'headers-too-large'
+  | 'request-timeout'
   | 'worker-died'
   | 'invalid-request'
   | 'unknown-field'
@@ -29,6 +32,10 @@ type Contract =
   | 'overloaded'
   | 'internal-error'
   | 'csv-malformed'
+  | 'loads-twice'
+  | 'malformed-form'
+  | 'not-unicode'
+  | 'too-deep'
   | 'bad-query'
 export type ErrorCode = FaultCode | Contract
 
@@ -48,6 +55,27 @@ export const catalogue: Readonly<Record<ErrorCode, ErrorEntry>> = {
     'The body could not be read as JSON: {reason}.',
     'A comma, quote or bracket is missing, or the body is not JSON at all.',
     'Send a JSON document.',
+  ),
+  'malformed-request': entry(
+    400,
+    'The request cannot be read',
+    'The request is no HTTP that this service reads: {reason}.',
+    'The bytes sent are not a well-formed HTTP/1.1 request.',
+    'Send the request with an HTTP client.',
+  ),
+  'headers-too-large': entry(
+    431,
+    'Header fields too large',
+    'The header of the request is too large.',
+    'The header fields together exceed 16 KiB.',
+    'Send fewer or shorter header fields.',
+  ),
+  'request-timeout': entry(
+    408,
+    'Request timed out',
+    'The request did not arrive in time.',
+    'The client stopped sending before the request was whole.',
+    'Send the whole request without pauses.',
   ),
   'timed-out': entry(
     504,
@@ -181,6 +209,34 @@ export const catalogue: Readonly<Record<ErrorCode, ErrorEntry>> = {
     '{reason}.',
     'A column is missing or a cell is not a number.',
     'Mend the named row and column.',
+  ),
+  'loads-twice': entry(
+    422,
+    'Loads given twice',
+    'The schedule holds rows of loads, and a CSV of loads came with it.',
+    'Which of the two holds would be a guess.',
+    'Leave `loads.rows` out of the schedule, or send no CSV.',
+  ),
+  'malformed-form': entry(
+    400,
+    'The form cannot be read',
+    'The body could not be read as multipart/form-data: {reason}.',
+    'The boundary is missing or the body ends early.',
+    'Send the form with an HTTP client that writes the boundary itself.',
+  ),
+  'not-unicode': entry(
+    422,
+    'Text is not Unicode',
+    'The text holds half of a surrogate pair.',
+    'An escape such as \\ud800 stands alone; canonical JSON (RFC 8785) knows no such text.',
+    'Send whole characters.',
+  ),
+  'too-deep': entry(
+    422,
+    'Nested too deep',
+    'The request is nested too deep.',
+    'Lists or objects stand within one another thousands of times.',
+    'Send a flatter document.',
   ),
   'bad-query': entry(
     422,
@@ -407,7 +463,7 @@ export const problemError = (
   ...facts,
 })
 
-/** One problem of several faults: the single code where there is one fault, `invalid-request` otherwise. */
+/** One problem of all faults: `invalid-request`, each fault with its own code. */
 export function problemOf(errors: readonly ProblemError[]): Problem {
   return new Problem('invalid-request', { count: errors.length }, errors)
 }

@@ -1,8 +1,35 @@
 import { createHash } from 'node:crypto'
 import canonicalize from 'canonicalize'
+import { Problem, type ProblemError, problemError, problemOf } from '../errors.ts'
 
-/** `sha256:…` over the canonical JSON (RFC 8785) of a value. */
-export const hashOf = (value: unknown): string =>
-  `sha256:${createHash('sha256')
-    .update(canonicalize(value) ?? '')
-    .digest('hex')}`
+/** `sha256:…` over the canonical JSON (RFC 8785) of a value. Throws a problem for what canonical JSON does not hold. */
+export function hashOf(value: unknown): string {
+  let text: string | undefined
+  try {
+    text = canonicalize(value)
+  } catch (fault) {
+    throw refusalOf(value, fault)
+  }
+  const hex = createHash('sha256')
+    .update(text ?? '')
+    .digest('hex')
+  // Joined, not a template: see engine/trace/plain-string.ts.
+  return ['sha256:', hex].join('')
+}
+
+/** Only a value that could not be printed is walked, without recursion: it may be nested a million deep. */
+function refusalOf(value: unknown, fault: unknown): unknown {
+  const errors: ProblemError[] = []
+  const ahead: [node: unknown, pointer: string][] = [[value, '']]
+  for (let next = ahead.pop(); next; next = ahead.pop()) {
+    const [node, pointer] = next
+    if (typeof node === 'string' && !node.isWellFormed()) errors.push(problemError(pointer, 'not-unicode'))
+    if (typeof node !== 'object' || node === null) continue
+    for (const [key, child] of Object.entries(node)) {
+      if (key.isWellFormed()) ahead.push([child, `${pointer}/${key.replaceAll('~', '~0').replaceAll('/', '~1')}`])
+      else errors.push(problemError(pointer, 'not-unicode'))
+    }
+  }
+  if (errors.length > 0) return problemOf(errors.reverse())
+  return fault instanceof RangeError ? new Problem('too-deep') : fault
+}

@@ -22,7 +22,10 @@ function errorsOf(issue: Issue, input: unknown, base: readonly PropertyKey[] = [
   const path = [...base, ...issue.path]
   const pointer = pointerOf(path)
   const got = valueAt(input, path)
-  const missing = () => problemError(pointer, 'missing-field', { field: String(path.at(-1)) })
+  const missing = () =>
+    path.length === 0
+      ? problemError('', 'wrong-type', { expected: 'a JSON object', got: 'no body' })
+      : problemError(pointer, 'missing-field', { field: String(path.at(-1)) })
   switch (issue.code) {
     case 'unrecognized_keys':
       return issue.keys.map((field) => problemError(`${pointer}${pointerOf([field])}`, 'unknown-field', { field }))

@@ -30,7 +30,19 @@ const modelRow = z.strictObject({
   Mz: moment('Mz'),
 })
 const pressingRow = z.strictObject({ ...where, V: force('V'), Mx: moment('Mx'), My: moment('My') })
-const combinations = z.record(name, z.strictObject({ limitState: z.enum(['ultimate', 'working', 'serviceability']) }))
+/** A record by names. A record drops the name `__proto__` in silence, so it is refused before. */
+const named = <V extends z.ZodType>(value: V) =>
+  z.preprocess(
+    (input, context) => {
+      if (typeof input === 'object' && input !== null && Object.hasOwn(input, '__proto__')) {
+        const params = { code: 'unknown-field', field: '__proto__' }
+        context.addIssue({ code: 'custom', path: ['__proto__'], params })
+      }
+      return input
+    },
+    z.record(name, value),
+  )
+const combinations = named(z.strictObject({ limitState: z.enum(['ultimate', 'working', 'serviceability']) }))
 const signed = <S extends string, R extends z.ZodType>(signs: S, row: R) =>
   z.strictObject({
     signs: z.literal(signs),
@@ -45,8 +57,8 @@ export const scheduleRequest = z.strictObject({
   designBasis,
   methods: methodChoices.optional(),
   settlementMethod: z.enum(['randolph-wroth-1978']).optional(),
-  ground: z.record(name, groundProfile),
-  pileTypes: z.record(name, pileType),
+  ground: named(groundProfile),
+  pileTypes: named(pileType),
   caps: z.array(cap).min(1).max(limits.caps),
   loads: z.discriminatedUnion('signs', [
     signed('pressing', pressingRow),

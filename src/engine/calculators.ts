@@ -7,6 +7,7 @@ import { calculatorPlaces, type ResistanceJob } from './resistance/job.ts'
 import { type PileTerms, singlePile } from './resistance/single-pile.ts'
 import { settlement } from './settlement/settlement.ts'
 import { type Plain, settleTerms, traceOf } from './trace/outcome.ts'
+import { plainTexts } from './trace/plain-string.ts'
 import { Sheet } from './trace/sheet.ts'
 import type { Trace } from './trace/step.ts'
 import type { Term } from './trace/term.ts'
@@ -22,7 +23,7 @@ function answer<T>(
 ): Answer<Plain<T>> {
   const sheet = trace ? Sheet.recording() : Sheet.silent
   const notices = new Map([[usualCautions.text, usualCautions]])
-  const { result, links } = settleTerms(compute(sheet, (n) => notices.set(n.text + (n.pointer ?? ''), n)))
+  const { result, links } = settleTerms(compute(sheet, (n) => notices.set(n.text + (n.pointer ?? ''), plainTexts(n))))
   return { result, notices: [...notices.values()], ...(trace && { trace: traceOf(sheet, links) }) }
 }
 

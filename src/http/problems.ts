@@ -16,6 +16,7 @@ export function sendProblem(reply: FastifyReply, problem: Problem): FastifyReply
 function asProblem(error: FastifyError, limit: number, contentType: string): Problem {
   switch (error.code) {
     case 'FST_ERR_CTP_BODY_TOO_LARGE':
+    case 'FST_REQ_FILE_TOO_LARGE':
       return new Problem('body-too-large', { limit })
     case 'FST_ERR_CTP_INVALID_MEDIA_TYPE':
       return new Problem('unsupported-media-type', { got: contentType || 'none' })
@@ -24,6 +25,8 @@ function asProblem(error: FastifyError, limit: number, contentType: string): Pro
     case 'FST_ERR_CTP_INVALID_CONTENT_LENGTH':
       return new Problem('malformed-json', { reason: error.message })
   }
+  if (error.code?.startsWith('FST_') && (error.statusCode === 413 || error.statusCode === 406))
+    return new Problem('malformed-form', { reason: error.message })
   if (error instanceof SyntaxError || error.statusCode === 400)
     return new Problem('malformed-json', { reason: error.message })
   return new Problem('internal-error')
@@ -39,10 +42,12 @@ export function problems(app: FastifyInstance, bodyLimit: number): void {
   })
   app.setNotFoundHandler((request, reply) => {
     const path = request.url.split('?')[0] ?? request.url
-    const allowed = (['GET', 'POST', 'PUT', 'DELETE'] as const).filter(
+    const allowed = (['GET', 'HEAD', 'POST', 'PUT', 'PATCH', 'DELETE'] as const).filter(
       (method) => app.hasRoute({ method, url: path }) || app.findRoute({ method, url: path }) !== null,
     )
-    if (allowed.length === 0) return sendProblem(reply, new Problem('not-found', { path }))
+    // A route that answers to the method and still found nothing, as one of static files does.
+    if (allowed.length === 0 || allowed.some((method) => method === request.method))
+      return sendProblem(reply, new Problem('not-found', { path }))
     reply.header('allow', allowed.join(', '))
     return sendProblem(reply, new Problem('method-not-allowed', { path, method: request.method }))
   })

@@ -13,6 +13,8 @@ export type PoolOptions = {
   readonly seconds: number
 }
 
+const isOutOfMemory = (fault: unknown) => (fault as { code?: unknown }).code === 'ERR_WORKER_OUT_OF_MEMORY'
+
 /** Threads for work that must not hold up the event loop. The queue is bounded: more work is refused at once. */
 export class WorkerPool<Task> {
   readonly #pool: Piscina<Task, Outcome>
@@ -42,7 +44,8 @@ export class WorkerPool<Task> {
 
   /**
    * Runs a task in a thread. A client that leaves (`signal`) or a task that overruns ends its thread, and nobody else's work.
-   * Throws the thread's own problem; `overloaded` when the queue is full; `timed-out` past the deadline; `worker-died` when the thread is lost.
+   * Throws the thread's own problem; `overloaded` when the queue is full; `timed-out` past the deadline; `worker-died` when
+   * the thread is lost; `internal-error` when the entry fails.
    */
   async run(task: Task, signal: AbortSignal): Promise<Uint8Array> {
     if (this.#underWay >= this.#options.workers + this.#options.queue) throw new Problem('overloaded', { seconds: 1 })
@@ -53,7 +56,10 @@ export class WorkerPool<Task> {
       outcome = await this.#pool.run(task, { name: this.#options.name, signal: AbortSignal.any([signal, deadline]) })
     } catch (cause) {
       if (deadline.aborted) throw new Problem('timed-out', { seconds: this.#options.seconds })
-      throw Object.assign(new Problem('worker-died'), { cause })
+      // What the entry itself throws is a defect: to try again would meet it again.
+      const lost =
+        signal.aborted || /^(worker exited|Terminating worker)/i.test((cause as Error).message) || isOutOfMemory(cause)
+      throw Object.assign(new Problem(lost ? 'worker-died' : 'internal-error'), { cause })
     } finally {
       this.#underWay--
     }

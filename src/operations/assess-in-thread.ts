@@ -1,5 +1,5 @@
 import { move } from 'piscina'
-import { csvRows } from '../contract/csv-loads.ts'
+import { csvRows, withLines } from '../contract/csv-loads.ts'
 import { Problem } from '../errors.ts'
 import type { Outcome } from '../jobs/pool.ts'
 import { assessSchedule } from './assess-schedule.ts'
@@ -8,21 +8,34 @@ import type { Options } from './calculate.ts'
 /** A schedule as it came over the wire, and its loads as CSV where they came apart from it. */
 export type AssessTask = { readonly schedule: string; readonly loads?: string; readonly options: Options }
 
-function read({ schedule, loads }: AssessTask): unknown {
-  let body: { loads?: { signs?: unknown } }
+function readJson(text: string): unknown {
   try {
-    body = JSON.parse(schedule) as typeof body
+    return JSON.parse(text)
   } catch (fault) {
     throw new Problem('malformed-json', { reason: (fault as Error).message })
   }
-  return loads === undefined ? body : { ...body, loads: { ...body.loads, rows: csvRows(loads, body.loads?.signs) } }
+}
+
+const isObject = (value: unknown): value is Readonly<Record<string, unknown>> =>
+  typeof value === 'object' && value !== null && !Array.isArray(value)
+
+function assess({ schedule, loads, options }: AssessTask) {
+  const body = readJson(schedule)
+  // Where the schedule has no place for rows, its own faults are told.
+  if (loads === undefined || !isObject(body) || !isObject(body.loads)) return assessSchedule(body, options)
+  if (Object.hasOwn(body.loads, 'rows')) throw new Problem('loads-twice')
+  const { rows, lines } = csvRows(loads, body.loads.signs)
+  try {
+    return assessSchedule({ ...body, loads: { ...body.loads, rows } }, options)
+  } catch (problem) {
+    throw problem instanceof Problem ? withLines(problem, lines) : problem
+  }
 }
 
 /** The entry of a worker thread: reading, checking and serialising a large schedule hold up the event loop as much as computing it does. */
 export function assessInThread(task: AssessTask): Outcome {
   try {
-    const bytes = new TextEncoder().encode(JSON.stringify(assessSchedule(read(task), task.options)))
-    return move(bytes) as Uint8Array
+    return move(new TextEncoder().encode(JSON.stringify(assess(task)))) as Uint8Array
   } catch (problem) {
     if (!(problem instanceof Problem)) throw problem
     return { code: problem.code, facts: problem.facts, errors: problem.errors }

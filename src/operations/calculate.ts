@@ -14,9 +14,10 @@ export function calculate<T, R>(
   options: Options,
 ) {
   const request = parse(schema, input)
+  const requestHash = hashOf(request)
   const answer = told(() => compute(request, options))
   const trace = answer.trace && options.of !== undefined ? sliceTrace(answer.trace, options.of) : answer.trace
-  return { ...answer, ...(trace && { trace }), meta: { engine: engineVersion, requestHash: hashOf(request) } }
+  return { ...answer, ...(trace && { trace }), meta: { engine: engineVersion, requestHash } }
 }
 
 /** Turns a refusal of the engine into the problem that is told. */

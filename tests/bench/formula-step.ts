@@ -1,5 +1,5 @@
 import { effectiveStress } from '../../src/engine/ground/stress.ts'
-import { adhesionFactor } from '../../src/engine/methods/cohesive-shaft/rp2geo-2011.ts'
+import { rp2geoAlpha } from '../../src/engine/methods/cohesive-shaft/rp2geo-2011.ts'
 import type { UnitCode } from '../../src/engine/quantities/units.ts'
 import { Sheet } from '../../src/engine/trace/sheet.ts'
 import type { Term } from '../../src/engine/trace/term.ts'
@@ -30,7 +30,7 @@ export function formulaStep(): Finding[] {
   const us = interleaved(
     {
       alphaByHand: over((i) => alpha(psi[i]!.value)),
-      alphaStep: over((i) => sheet.step(adhesionFactor, { psi: psi[i]! }).value),
+      alphaStep: over((i) => sheet.step(rp2geoAlpha, { psi: psi[i]! }).value),
       stressByHand: over((i) => sigma_0[i]!.value + gamma_e[i]!.value * (z[i]!.value - z_0[i]!.value)),
       stressStep: over(
         (i) =>

@@ -55,4 +55,8 @@ export const ratio = (above: readonly number[], below: readonly number[]): numbe
   median(above.map((a, i) => a / below[i]!))
 
 export const time = (us: number): string =>
-  us < 1 ? `${(us * 1e3).toFixed(1)} ns` : us < 1e4 ? `${us.toFixed(us < 100 ? 1 : 0)} us` : `${(us / 1e3).toFixed(0)} ms`
+  us < 1
+    ? `${(us * 1e3).toFixed(1)} ns`
+    : us < 1e4
+      ? `${us.toFixed(us < 100 ? 1 : 0)} us`
+      : `${(us / 1e3).toFixed(0)} ms`

@@ -28,4 +28,6 @@ for (const [name, part] of Object.entries(parts)) {
     print(`${letter}  ${what.padEnd(58)} ${value.padEnd(44)} ${aim.padEnd(10)} ${verdict}`)
   }
 }
-print(`\n${missed === 0 ? 'every aim met' : `${missed} aim(s) missed`}; sum of what was computed ${sink.sum.toExponential(6)}`)
+print(
+  `\n${missed === 0 ? 'every aim met' : `${missed} aim(s) missed`}; sum of what was computed ${sink.sum.toExponential(6)}`,
+)

@@ -51,3 +51,9 @@ test('a client that leaves ends its work and frees the thread', async () => {
   expect(await run).toBe('worker-died')
   expect(await text(p.run({ answer: 'free' }, stays()))).toBe('free')
 })
+
+test('a defect of the entry is no lost thread: nobody is told to try again', async () => {
+  const p = pool(4)
+  expect(await codeOf(p.run({ fail: true }, stays()))).toBe('internal-error')
+  expect(await text(p.run({ answer: 'still here' }, stays()))).toBe('still here')
+})

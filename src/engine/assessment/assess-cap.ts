@@ -72,9 +72,7 @@ export function assessCap(
   const service = rows.some((r) => r.limitState === 'serviceability') ? 'serviceability' : 'working'
   const settlement = rows
     .filter((r) => r.limitState === service)
-    .map(({ row, index: at }) =>
-      settleCap(sheet, set, row.combination, capActions(schedule.loads, row, weight.value), `/loads/rows/${at}`),
-    )
+    .map(({ row, index: at }) => settleCap(sheet, set, schedule.loads, at, row, weight))
   const limits = schedule.limits ?? {}
   const limited =
     settlement.length === 0

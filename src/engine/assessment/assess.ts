@@ -114,18 +114,19 @@ function summary(sheet: Sheet, assessed: readonly Assessed[]) {
 
 function stiffness(sheet: Sheet, cap: Cap, set: ResistanceSet) {
   const here = sheet.within(`caps/${idPart(cap.mark)}/stiffness`)
+  const { f, r_x, r_y } = set.prepared.flexibility
   const term = <const U extends 'kN/m' | 'kN.m/rad'>(symbol: string, name: string, unit: U, i: number): Term<U> => {
-    const f = set.elastic.flexibility[i * 4]!
-    const value = f > 0 ? 1 / f : 0
+    const own = set.prepared.elastic.flexibility[i * 4]!
+    const value = own > 0 ? 1 / own : 0
     return here.solution({
       symbol,
       name,
       unit,
       value,
       method: 'superposed interaction factors, Cholesky',
-      operands: [set.pileStiffness],
+      operands: [f, r_x, r_y, set.prepared.stiffness],
       unknowns: [{ symbol, value, unit }],
-      residuals: [],
+      residuals: [{ name: 'stiffness times flexibility, less 1', value: own > 0 ? Math.abs(value * own - 1) : 0 }],
       tolerance: 1e-9,
       source: statics('inverse of the plane flexibility'),
     })

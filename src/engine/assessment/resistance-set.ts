@@ -6,11 +6,11 @@ import type { BlockTerms } from '../resistance/block.ts'
 import { group, sumOfPilesFormula } from '../resistance/group.ts'
 import type { GroupJob } from '../resistance/job.ts'
 import type { PileTerms } from '../resistance/single-pile.ts'
-import { type ElasticGroup, elasticGroup } from '../settlement/group.ts'
-import { randolphWroth } from '../settlement/randolph-wroth-1978.ts'
-import { interactionOf } from '../settlement/settlement.ts'
+import { type PreparedGroup, prepareGroup } from '../settlement/prepared-group.ts'
+import { plainTexts } from '../trace/plain-string.ts'
 import type { Sheet } from '../trace/sheet.ts'
 import type { Term } from '../trace/term.ts'
+import { type PilePlan, pilePlan } from './pile-plan.ts'
 import { escapePointer } from './places.ts'
 import type { Cap, Schedule } from './schedule.ts'
 
@@ -27,15 +27,15 @@ export type ResistanceSet = {
   /** Computed when the first cap is pulled. */
   readonly uplift: () => Safe
   readonly statics: RigidCap
-  readonly elastic: ElasticGroup
-  readonly pileStiffness: Term<'kN/m'>
+  readonly plan: PilePlan
+  readonly prepared: PreparedGroup
   readonly notices: readonly Notice[]
 }
 
 export function resistanceSet(root: Sheet, schedule: Schedule, cap: Cap, index: number, id: number): ResistanceSet {
   const sheet = root.within(`resistance/${id}`)
   const notices = new Map<string, Notice>()
-  const notice = (n: Notice) => notices.set(n.text + (n.pointer ?? ''), n)
+  const notice = (n: Notice) => notices.set(n.text + (n.pointer ?? ''), plainTexts(n))
   const pile = schedule.pileTypes[cap.pileType]!
   const ground = schedule.ground[cap.ground]!
   const at = {
@@ -81,7 +81,6 @@ export function resistanceSet(root: Sheet, schedule: Schedule, cap: Cap, index: 
   }
   const compression = safe(sheet, 'compression')
   let uplift: Safe | undefined
-  const stiff = randolphWroth(sheet.within('settlement'), pile, ground, { ...at, load: '/loads' }, notice)
   const points = positions(cap.layout)
   return {
     points,
@@ -94,8 +93,8 @@ export function resistanceSet(root: Sheet, schedule: Schedule, cap: Cap, index: 
       return uplift
     },
     statics: rigidCap(points),
-    elastic: elasticGroup(points, stiff.stiffness.value, interactionOf(stiff)),
-    pileStiffness: stiff.stiffness,
+    plan: pilePlan(sheet.within('plan'), cap.layout, at.layout, compression.terms.pileCount),
+    prepared: prepareGroup(sheet.within('settlement'), pile, ground, cap.layout, { ...at, load: '/loads' }, notice),
     get notices() {
       return [...notices.values()]
     },

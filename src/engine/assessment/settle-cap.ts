@@ -1,9 +1,11 @@
-import { cite } from '../sources/bibliography.ts'
+import { planeSettlement } from '../settlement/group-settlement.ts'
+import { groupResponse } from '../settlement/prepared-group.ts'
 import type { Sheet } from '../trace/sheet.ts'
 import type { Term } from '../trace/term.ts'
-import type { CapActions } from './cap-loads.ts'
+import { capTerms } from './cap-loads.ts'
 import { idPart } from './places.ts'
 import type { ResistanceSet } from './resistance-set.ts'
+import type { Loads, ModelRow, PressingRow } from './schedule.ts'
 
 export type SettlementTerms = {
   readonly combination: string
@@ -11,46 +13,26 @@ export type SettlementTerms = {
   readonly tilt: Term<'1'>
 }
 
-/** Settlement at the centroid of the piles and slope of the cap under one combination: the prepared plane times the actions. */
+/**
+ * Settlement at the centroid of the piles and slope of the cap under one combination, as steps from the row of the model:
+ * the flexibility of the cap, prepared once, times the actions.
+ */
 export function settleCap(
   sheet: Sheet,
   set: ResistanceSet,
-  combination: string,
-  load: CapActions,
-  pointer: string,
+  loads: Loads,
+  index: number,
+  row: ModelRow | PressingRow,
+  weight: Term<'kN'>,
 ): SettlementTerms {
-  const plane = set.elastic.plane(load, pointer)
-  const here = sheet.within(`settlement/${idPart(combination)}`)
-  const solved = {
-    method: 'prepared plane flexibility times the actions',
-    operands: [set.pileStiffness],
-    residuals: [],
-    tolerance: 1e-9,
-    source: cite('randolph-wroth-1978', 'superposition'),
-  }
-  const value = plane.centre * 1000
-  const tilt = Math.hypot(plane.alongX, plane.alongY)
-  const slopes = [
-    { symbol: 'theta_x', value: plane.alongX, unit: '1' as const },
-    { symbol: 'theta_y', value: plane.alongY, unit: '1' as const },
-  ]
+  const here = sheet.within(`settlement/${idPart(row.combination)}`)
+  const load = capTerms(here, loads, index, row, weight)
+  const plane = groupResponse(here, set.prepared, load, `/loads/rows/${index}`)
+  const { settlement: s_o, tiltAlongX: theta_x, tiltAlongY: theta_y } = plane
+  const { x_m: x, y_m: y } = set.plan
   return {
-    combination,
-    settlement: here.solution({
-      symbol: 's',
-      name: 'settlement of the cap at the centroid of its piles',
-      unit: 'mm',
-      value,
-      unknowns: [{ symbol: 's', value, unit: 'mm' }],
-      ...solved,
-    }),
-    tilt: here.solution({
-      symbol: 'theta',
-      name: 'tilt of the cap',
-      unit: '1',
-      value: tilt,
-      unknowns: slopes,
-      ...solved,
-    }),
+    combination: row.combination,
+    settlement: here.step(planeSettlement, { s_o, theta_x, x, theta_y, y }),
+    tilt: plane.tilt,
   }
 }

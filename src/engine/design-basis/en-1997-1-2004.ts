@@ -22,6 +22,12 @@ export const resistanceFactors: Readonly<Record<'R1' | 'R2' | 'R3' | 'R4', Set>>
   },
 }
 
+/** Factors on unfavourable and favourable actions of table A.3. For those who factor the loads: ultimate combinations arrive factored. */
+export const actionFactors = {
+  A1: { permanent: 1.35, favourable: 1.0, variable: 1.5 },
+  A2: { permanent: 1.0, favourable: 1.0, variable: 1.3 },
+} as const
+
 /** The set that each approach applies to pile resistance. */
 export const setOf: Readonly<Record<En1997Approach, keyof typeof resistanceFactors>> = {
   'DA1-1': 'R1',
@@ -43,5 +49,8 @@ export const correlationFactors: readonly (readonly [count: number, xi3: number,
   [7, 1.27, 1.12],
   [10, 1.25, 1.08],
 ]
+
+/** Of xi3 and xi4, not below 1, where the structure transfers load from weak to strong piles: 7.6.2.3(7). */
+export const stiffStructureDivisor = 1.1
 
 export const enTable = (locator: string) => cite('en-1997-1-2004', locator)

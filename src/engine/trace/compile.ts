@@ -144,3 +144,13 @@ export function compile(text: string, where: Where, unit: UnitCode): (operands: 
   const out = units[unit].factor === 1 ? code : `(${code}) / ${units[unit].factor}`
   return new Function('o', `${lines.join(' ')} return ${out};`) as (operands: Operands) => number
 }
+
+export type Measured = Readonly<Record<string, { readonly unit: UnitCode }>>
+
+/** Emits the check that each operand has its declared unit: it gives the name of the first that has not. */
+export function unitCheck(where: Where): (operands: Measured) => string | undefined {
+  const lines = Object.entries(where).map(
+    ([name, unit]) => `if (o.${name}.unit !== ${JSON.stringify(unit)}) return '${name}'`,
+  )
+  return new Function('o', lines.join('; ')) as (operands: Measured) => string | undefined
+}

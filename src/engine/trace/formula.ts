@@ -1,6 +1,7 @@
 import type { UnitCode } from '../quantities/units.ts'
 import type { Citation } from '../sources/source.ts'
-import { compile, type Operands } from './compile.ts'
+import { compile, type Measured, type Operands, unitCheck } from './compile.ts'
+import { plain } from './plain-string.ts'
 import type { Term } from './term.ts'
 
 export type Range = { readonly symbol: string; readonly min?: number; readonly max?: number }
@@ -25,6 +26,8 @@ export type Formula<
 > = Declaration<W, U> & {
   readonly names: readonly string[]
   readonly evaluate: (operands: Operands) => number
+  /** Name of the first operand whose unit is not the declared one. */
+  readonly misfit: (operands: Measured) => string | undefined
 }
 
 const declared: Formula[] = []
@@ -41,8 +44,12 @@ export function formula<const W extends Record<string, UnitCode>, const U extend
 ): Formula<W, U> {
   const made = {
     ...declaration,
+    symbol: plain(declaration.symbol),
+    name: plain(declaration.name),
+    text: plain(declaration.text),
     names: Object.keys(declaration.where),
     evaluate: compile(declaration.text, declaration.where, declaration.unit),
+    misfit: unitCheck(declaration.where),
   }
   declared.push(made as unknown as Formula)
   return made

@@ -3,6 +3,7 @@ import { quantityKind } from '../quantities/quantity-kind.ts'
 import type { UnitCode } from '../quantities/units.ts'
 import type { Citation } from '../sources/source.ts'
 import type { Formula, TermsOf } from './formula.ts'
+import { joined, plain } from './plain-string.ts'
 import type { OperandLine, RangeLine, Step } from './step.ts'
 import type { Term } from './term.ts'
 
@@ -20,7 +21,8 @@ export type Solution<U extends UnitCode> = Labelled<U> & {
 /** What all recorders of one computation share: the steps and their ids. Absent on a silent sheet. */
 type Book = { readonly steps: Step[]; readonly seen: Map<string, Term> }
 
-const line = (t: Term, symbol = t.symbol): OperandLine => ({ symbol, value: t.value, unit: t.unit, from: t.from })
+const line = (t: Term, symbol: string): OperandLine => ({ symbol, value: t.value, unit: t.unit, from: t.from })
+const ownLine = (t: Term): OperandLine => line(t, t.symbol)
 
 /**
  * The recorder. The engine computes through it, so the trace is the computation.
@@ -56,38 +58,44 @@ export class Sheet {
 
   /** A value of the request. Asked for twice (same id), it stays one step. */
   input<const U extends UnitCode>(label: Labelled<U>, value: number, pointer: string, id = label.symbol): Term<U> {
-    return this.#given(label, value, id, { from: pointer })
+    if (!this.#book) return this.#term(label.symbol, label.unit, value, '')
+    const full = joined(this.#prefix, id)
+    const known = this.#known(full, label.unit, value)
+    if (known) return known
+    const { unit } = label
+    const symbol = plain(label.symbol)
+    const term = this.#term(symbol, unit, value, full)
+    const [name, quantity, from] = [plain(label.name), quantityKind(unit), plain(pointer)]
+    this.#keep({ id: full, kind: 'input', symbol, name, value, unit, quantity, from }, term)
+    return term
   }
 
   /** A default: a value that nobody gave, with the reason why it is used. */
   assumed<const U extends UnitCode>(
     label: Labelled<U>,
     value: number,
-    reason: string,
+    why: string,
     source: Citation,
     id = label.symbol,
   ): Term<U> {
-    return this.#given(label, value, id, { default: true, reason, source })
+    if (!this.#book) return this.#term(label.symbol, label.unit, value, '')
+    const full = joined(this.#prefix, id)
+    const known = this.#known(full, label.unit, value)
+    if (known) return known
+    const { unit } = label
+    const symbol = plain(label.symbol)
+    const term = this.#term(symbol, unit, value, full)
+    const [name, quantity, reason] = [plain(label.name), quantityKind(unit), plain(why)]
+    this.#keep({ id: full, kind: 'input', symbol, name, value, unit, quantity, default: true, reason, source }, term)
+    return term
   }
 
-  #given<U extends UnitCode>(
-    label: Labelled<U>,
-    value: number,
-    id: string,
-    origin: { from: string } | { default: true; reason: string; source: Citation },
-  ): Term<U> {
-    const { symbol, name, unit } = label
-    if (!this.#book) return this.#term(symbol, unit, value, '')
-    const full = this.#prefix + id
-    const known = this.#book.seen.get(full)
-    if (known) {
-      if (known.value !== value || known.unit !== unit)
-        throw new Error(`step ${full} is recorded twice, with two values`)
-      return known as Term<U>
-    }
-    const term = this.#term(symbol, unit, value, full)
-    this.#keep({ id: full, kind: 'input', symbol, name, value, unit, quantity: quantityKind(unit), ...origin }, term)
-    return term
+  /** The term that was given under this id before, by the same value. */
+  #known<U extends UnitCode>(full: string, unit: U, value: number): Term<U> | undefined {
+    const known = this.#book!.seen.get(full)
+    if (known && (known.value !== value || known.unit !== unit))
+      throw new Error(`step ${full} is recorded twice, with two values`)
+    return known as Term<U> | undefined
   }
 
   /** Evaluates a declared formula. The compiler demands the operands of `where`; a wrong unit is refused. */
@@ -96,30 +104,27 @@ export class Sheet {
     operands: TermsOf<W>,
     id: string = f.symbol,
   ): Term<U> {
-    for (const name of f.names) {
-      const term = operands[name as keyof W]
-      if (term.unit !== f.where[name]) {
-        refuse('wrong-dimension', '', { field: `${f.name}: ${name}`, got: term.unit, expected: f.where[name] ?? '' })
-      }
+    const odd = f.misfit(operands)
+    if (odd !== undefined) {
+      const { unit: got } = operands[odd as keyof W]
+      refuse('wrong-dimension', '', { field: `${f.name}: ${odd}`, got, expected: f.where[odd] ?? '' })
     }
     const value = f.evaluate(operands)
-    if (!this.#book) return this.#term(f.symbol, f.unit, value, '')
-    const full = this.#prefix + id
-    const term = this.#term(f.symbol, f.unit, value, full)
+    const { symbol, name, unit, source } = f
+    if (!this.#book) return this.#term(symbol, unit, value, '')
+    const full = joined(this.#prefix, id)
+    const term = this.#term(symbol, unit, value, full)
+    const kind = 'formula'
+    const lines: OperandLine[] = []
+    for (const operand of f.names) lines.push(line(operands[operand as keyof W], operand))
+    const quantity = quantityKind(unit)
     this.#keep(
-      {
-        id: full,
-        kind: 'formula',
-        symbol: f.symbol,
-        name: f.name,
-        formula: f.text,
-        operands: f.names.map((name) => line(operands[name as keyof W], name)),
-        value,
-        unit: f.unit,
-        quantity: quantityKind(f.unit),
-        source: f.source,
-        ...(f.range && { range: rangeLines(f, operands) }),
-      },
+      f.range
+        ? {
+            ...{ id: full, kind, symbol, name, formula: f.text, operands: lines, value, unit, quantity, source },
+            range: rangeLines(f, operands),
+          }
+        : { id: full, kind, symbol, name, formula: f.text, operands: lines, value, unit, quantity, source },
       term,
     )
     return term
@@ -179,16 +184,17 @@ export class Sheet {
     // biome-ignore lint/suspicious/noExplicitAny: the rest of a step is fixed by its kind at each call above
     rest: any,
   ): Term<U> {
-    const { symbol, name, unit } = label
-    if (!this.#book) return this.#term(symbol, unit, value, '')
-    const full = this.#prefix + id
+    const { unit } = label
+    if (!this.#book) return this.#term(label.symbol, unit, value, '')
+    const full = joined(this.#prefix, id)
+    const symbol = plain(label.symbol)
     const term = this.#term(symbol, unit, value, full)
     this.#keep(
       {
         id: full,
         symbol,
-        name,
-        operands: parts.map((p) => line(p)),
+        name: plain(label.name),
+        operands: parts.map(ownLine),
         value,
         unit,
         quantity: quantityKind(unit),

@@ -8,9 +8,13 @@ import { calculateSinglePile } from '../../operations/calculate-single-pile.ts'
 
 /** `?trace=none` leaves the trace out; `?of=<pointer>` gives only the steps behind one part of the result. */
 export function optionsOf(request: FastifyRequest): Options {
-  const { trace = 'full', of, cap } = request.query as Record<string, string | undefined>
-  if (trace !== 'full' && trace !== 'none')
-    throw new Problem('bad-query', { field: 'trace', expected: 'full or none', got: trace })
+  const { trace = 'full', of, cap, ...others } = request.query as Record<string, string | string[] | undefined>
+  const bad = (field: string, expected: string, got: unknown) => new Problem('bad-query', { field, expected, got })
+  // A misspelt parameter that vanished would give another answer than was asked for.
+  for (const [field, got] of Object.entries(others)) throw bad(field, 'trace, of or cap', got)
+  if (of !== undefined && (typeof of !== 'string' || !/^(\/|$)/.test(of))) throw bad('of', 'one JSON Pointer', of)
+  if (cap !== undefined && typeof cap !== 'string') throw bad('cap', 'one mark', cap)
+  if (trace !== 'full' && trace !== 'none') throw bad('trace', 'full or none', trace)
   return { trace: trace === 'full', of, cap }
 }
 

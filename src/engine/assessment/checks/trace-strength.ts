@@ -3,6 +3,7 @@ import { formula } from '../../trace/formula.ts'
 import type { Sheet } from '../../trace/sheet.ts'
 import type { Term } from '../../trace/term.ts'
 import { capTerms } from '../cap-loads.ts'
+import { pileLoad } from '../pile-plan.ts'
 import type { ResistanceSet } from '../resistance-set.ts'
 import type { Cap, ModelRow, PressingRow, Schedule } from '../schedule.ts'
 import type { Demand, StrengthCheck } from './strength-check.ts'
@@ -14,14 +15,6 @@ export const utilisationForce = formula({
   text: 'E / R',
   where: { E: 'kN', R: 'kN' },
   source: practice('demand over resistance'),
-})
-export const pileLoad = formula({
-  symbol: 'P',
-  name: 'load of the pile',
-  unit: 'kN',
-  text: 'V / n + a * x + b * y',
-  where: { V: 'kN', n: '1', a: 'kN/m', x: 'm', b: 'kN/m', y: 'm' },
-  source: statics('rigid cap, pinned heads'),
 })
 export const pull = formula({
   symbol: 'T',
@@ -58,7 +51,7 @@ export type LoadedRow = {
 /** The steps of one check under one combination, from the row of the model to the utilisation. */
 export function traceStrength(sheet: Sheet, check: StrengthCheck, at: LoadedRow, demand: Demand): StrengthTerms {
   const load = capTerms(sheet, at.schedule.loads, at.index, at.row, at.weight)
-  const F = demand.pile === undefined ? load.V : loadOfPile(sheet, at, load, demand.pile)
+  const F = demand.pile === undefined ? load.V : pileLoad(sheet, at.set.plan, load, demand.pile)
   const E = demand.pulled ? sheet.step(pull, { F }) : demand.pile === undefined ? F : sheet.step(compressionOf, { F })
   const resistance = check.resistance(at, demand, sheet)
   const utilisation = sheet.step(utilisationForce, { E, R: resistance })
@@ -71,47 +64,4 @@ export function traceStrength(sheet: Sheet, check: StrengthCheck, at: LoadedRow,
     statics('largest pile load'),
   )
   return { demand: E, resistance, utilisation, pile }
-}
-
-function loadOfPile(
-  sheet: Sheet,
-  { set, index }: LoadedRow,
-  load: ReturnType<typeof capTerms>,
-  pile: number,
-): Term<'kN'> {
-  const { centroid } = set.statics
-  const plane = set.statics.plane({ V: load.V.value, Mx: load.Mx.value, My: load.My.value }, `/loads/rows/${index}`)
-  const solved = { residuals: [], tolerance: 1e-9 }
-  const slope = (symbol: 'a' | 'b', axis: 'x' | 'y') =>
-    sheet.solution({
-      symbol,
-      name: `slope of the pile loads along ${axis}`,
-      unit: 'kN/m',
-      value: plane[symbol],
-      method: 'second moments of the pile positions about their centroid, 2 x 2',
-      operands: [load.V, load.Mx, load.My],
-      unknowns: [{ symbol, value: plane[symbol], unit: 'kN/m' }],
-      source: statics('rigid cap, pinned heads'),
-      ...solved,
-    })
-  const offset = (axis: 'x' | 'y') =>
-    sheet.solution({
-      symbol: axis,
-      name: `${axis} of pile ${pile + 1} from the centroid`,
-      unit: 'm',
-      value: set.points[pile]![axis] - centroid[axis],
-      method: 'position less centroid',
-      operands: [set.pileCount],
-      unknowns: [{ symbol: `${axis}_c`, value: centroid[axis], unit: 'm' }],
-      source: statics('centroid'),
-      ...solved,
-    })
-  return sheet.step(pileLoad, {
-    V: load.V,
-    n: set.pileCount,
-    a: slope('a', 'x'),
-    x: offset('x'),
-    b: slope('b', 'y'),
-    y: offset('y'),
-  })
 }
