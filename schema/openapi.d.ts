@@ -530,15 +530,26 @@ export interface components {
             };
             /** @enum {string} */
             readonly cap?: "rigid" | "flexible";
-            /** @enum {string} */
-            readonly method?: "randolph-wroth-1978";
+            /**
+             * @description left out: elastic-continuum
+             * @enum {string}
+             */
+            readonly method?: "elastic-continuum" | "randolph-wroth-1978";
+            /**
+             * @description full: every element of every pile acts on every other (elastic-continuum, up to 64 piles); left out: superposed interaction factors
+             * @enum {string}
+             */
+            readonly coupling?: "full";
         };
         readonly Schedule: {
             readonly title: string;
             readonly designBasis: components["schemas"]["DesignBasis"];
             readonly methods?: components["schemas"]["MethodChoices"];
-            /** @enum {string} */
-            readonly settlementMethod?: "randolph-wroth-1978";
+            /**
+             * @description left out: elastic-continuum
+             * @enum {string}
+             */
+            readonly settlementMethod?: "elastic-continuum" | "randolph-wroth-1978";
             readonly ground: {
                 readonly [key: string]: components["schemas"]["GroundProfile"];
             };
@@ -769,6 +780,14 @@ export interface components {
                         readonly value: number;
                     }[];
                     readonly tolerance: number;
+                    readonly mesh?: readonly number[];
+                    readonly table?: {
+                        readonly columns: readonly {
+                            readonly symbol: string;
+                            readonly unit: string;
+                        }[];
+                        readonly rows: readonly (readonly number[])[];
+                    };
                     readonly source: {
                         readonly key: string;
                         readonly locator: string;
@@ -906,6 +925,14 @@ export interface components {
                 readonly value: number;
             }[];
             readonly tolerance: number;
+            readonly mesh?: readonly number[];
+            readonly table?: {
+                readonly columns: readonly {
+                    readonly symbol: string;
+                    readonly unit: string;
+                }[];
+                readonly rows: readonly (readonly number[])[];
+            };
             readonly source: {
                 readonly key: string;
                 readonly locator: string;
@@ -1054,6 +1081,15 @@ export interface components {
                     readonly influenceFactor: number;
                     /** @description share of the load at the base */
                     readonly baseLoadShare: number;
+                    /** @description along the pile from the head down (elastic-continuum) */
+                    readonly axial?: readonly {
+                        /** @description bottom of an element */
+                        readonly depth: number;
+                        /** @description in the pile at this depth */
+                        readonly axialLoad: number;
+                        /** @description mean on the element above this depth */
+                        readonly shaftStress: number;
+                    }[];
                 };
                 readonly group?: {
                     /** @description at the centroid of the piles */
@@ -1087,6 +1123,13 @@ export interface components {
                         readonly rockingAlongX: number;
                         /** @description rocking along y; 0 where the piles cannot take it */
                         readonly rockingAlongY: number;
+                        /** @description rigid cap at the cap's origin, pressing signs: ready for a structural model */
+                        readonly atOrigin: {
+                            /** @description rows: settlement (m), slope along x, slope along y (rad); columns: V (kN), My, Mx (kN.m). Units m/kN, 1/kN, rad/(kN.m). Symmetric */
+                            readonly flexibility: readonly (readonly number[])[];
+                            /** @description its inverse: rows V, My, Mx; columns settlement, slope along x, slope along y. Units kN/m, kN/rad, kN.m/rad. Symmetric; 0 where the piles cannot take it */
+                            readonly stiffness: readonly (readonly number[])[];
+                        };
                     };
                 };
             };
@@ -1131,6 +1174,13 @@ export interface components {
                         readonly rockingAlongX: number;
                         /** @description rocking along y; 0 where the piles cannot take it */
                         readonly rockingAlongY: number;
+                        /** @description rigid cap at the cap's origin, pressing signs: ready for a structural model */
+                        readonly atOrigin: {
+                            /** @description rows: settlement (m), slope along x, slope along y (rad); columns: V (kN), My, Mx (kN.m). Units m/kN, 1/kN, rad/(kN.m). Symmetric */
+                            readonly flexibility: readonly (readonly number[])[];
+                            /** @description its inverse: rows V, My, Mx; columns settlement, slope along x, slope along y. Units kN/m, kN/rad, kN.m/rad. Symmetric; 0 where the piles cannot take it */
+                            readonly stiffness: readonly (readonly number[])[];
+                        };
                     };
                     readonly notices: readonly components["schemas"]["Notice"][];
                 }[];

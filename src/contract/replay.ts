@@ -70,6 +70,13 @@ export const step = z.discriminatedUnion('kind', [
     unknowns: z.array(unknown).max(5000),
     residuals: z.array(z.strictObject({ name: z.string(), value: number })).max(100),
     tolerance: number,
+    mesh: z.array(number).max(10_000).optional(),
+    table: z
+      .strictObject({
+        columns: z.array(z.strictObject({ symbol: z.string(), unit: z.string() })).max(20),
+        rows: z.array(z.array(number).max(20)).max(10_000),
+      })
+      .optional(),
     source: citation,
   }),
 ])

@@ -72,10 +72,22 @@ const tilt = z.strictObject({
   alongX: out('1', 'slope of settlement along x'),
   alongY: out('1', 'slope of settlement along y'),
 })
+const matrix = (description: string) => z.array(z.array(z.number()).length(3)).length(3).meta({ description })
+const atOrigin = z
+  .strictObject({
+    flexibility: matrix(
+      'rows: settlement (m), slope along x, slope along y (rad); columns: V (kN), My, Mx (kN.m). Units m/kN, 1/kN, rad/(kN.m). Symmetric',
+    ),
+    stiffness: matrix(
+      'its inverse: rows V, My, Mx; columns settlement, slope along x, slope along y. Units kN/m, kN/rad, kN.m/rad. Symmetric; 0 where the piles cannot take it',
+    ),
+  })
+  .meta({ description: "rigid cap at the cap's origin, pressing signs: ready for a structural model" })
 const stiffness = z.strictObject({
   vertical: out('kN/m', 'vertical'),
   rockingAlongX: out('kN.m/rad', 'rocking along x; 0 where the piles cannot take it'),
   rockingAlongY: out('kN.m/rad', 'rocking along y; 0 where the piles cannot take it'),
+  atOrigin,
 })
 export const settlementResult = z.strictObject({
   single: z.strictObject({
@@ -84,6 +96,16 @@ export const settlementResult = z.strictObject({
     stiffness: out('kN/m', 'of the pile head'),
     influenceFactor: out('1', 'I of s = P I / (E_s d)'),
     baseLoadShare: out('1', 'share of the load at the base'),
+    axial: z
+      .array(
+        z.strictObject({
+          depth: out('m', 'bottom of an element'),
+          axialLoad: out('kN', 'in the pile at this depth'),
+          shaftStress: out('kPa', 'mean on the element above this depth'),
+        }),
+      )
+      .optional()
+      .meta({ description: 'along the pile from the head down (elastic-continuum)' }),
   }),
   group: z
     .strictObject({

@@ -42,6 +42,9 @@ export const groupRequest = z.strictObject({ ...single, layout }) satisfies z.Zo
 
 const force = (description: string) => quantity('kN', description, { min: -1e8, max: 1e8 })
 const moment = (description: string) => quantity('kN.m', description, { min: -1e9, max: 1e9 }).optional()
+export const settlementMethod = z
+  .enum(['elastic-continuum', 'randolph-wroth-1978'])
+  .meta({ description: 'left out: elastic-continuum' })
 export const settlementRequest = z.strictObject({
   pile: pileType,
   ground: groundProfile,
@@ -52,5 +55,9 @@ export const settlementRequest = z.strictObject({
     My: moment('moment that presses piles at +x'),
   }),
   cap: z.enum(['rigid', 'flexible']).optional(),
-  method: z.enum(['randolph-wroth-1978']).optional(),
+  method: settlementMethod.optional(),
+  coupling: z.enum(['full']).optional().meta({
+    description:
+      'full: every element of every pile acts on every other (elastic-continuum, up to 64 piles); left out: superposed interaction factors',
+  }),
 }) satisfies z.ZodType<SettlementRequest>

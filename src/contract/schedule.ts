@@ -3,7 +3,7 @@ import type { Schedule } from '../engine/assessment/schedule.ts'
 import { limits } from './limits.ts'
 import { designBasis, groundProfile, layout, pileType } from './parts.ts'
 import { quantity } from './quantity.ts'
-import { methodChoices } from './requests.ts'
+import { methodChoices, settlementMethod } from './requests.ts'
 
 const name = z.string().min(1).max(200)
 const place = (axis: string) => quantity('m', `position along ${axis}`, { min: -1e6, max: 1e6 })
@@ -56,7 +56,7 @@ export const scheduleRequest = z.strictObject({
   title: z.string().min(1).max(500),
   designBasis,
   methods: methodChoices.optional(),
-  settlementMethod: z.enum(['randolph-wroth-1978']).optional(),
+  settlementMethod: settlementMethod.optional(),
   ground: named(groundProfile),
   pileTypes: named(pileType),
   caps: z.array(cap).min(1).max(limits.caps),

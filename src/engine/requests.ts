@@ -13,11 +13,14 @@ export type SinglePileRequest = {
   readonly designBasis?: DesignBasis
 }
 export type GroupRequest = SinglePileRequest & { readonly layout: Layout }
+export type SettlementMethod = 'elastic-continuum' | 'randolph-wroth-1978'
 export type SettlementRequest = {
   readonly pile: PileType
   readonly ground: GroundProfile
   readonly layout?: Layout
   readonly load: { readonly V: number; readonly Mx?: number; readonly My?: number }
   readonly cap?: 'rigid' | 'flexible'
-  readonly method?: 'randolph-wroth-1978'
+  readonly method?: SettlementMethod
+  /** `full` lets every element of every pile act on every other, up to 64 piles; left out: superposed interaction factors. */
+  readonly coupling?: 'full'
 }

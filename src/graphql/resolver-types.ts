@@ -98,8 +98,10 @@ export type SettlementRequestInput = {
   readonly load: LoadInput;
   /** rigid | flexible. Default: rigid. */
   readonly cap?: InputMaybe<Scalars['String']['input']>;
-  /** Id of a settlement method. */
+  /** elastic-continuum | randolph-wroth-1978. Default: elastic-continuum. */
   readonly method?: InputMaybe<Scalars['String']['input']>;
+  /** full: every element of every pile acts on every other (elastic-continuum, up to 64 piles). Default: superposed interaction factors. */
+  readonly coupling?: InputMaybe<Scalars['String']['input']>;
 };
 
 export type PileTypeInput = {
@@ -423,6 +425,18 @@ export type SinglePileSettlement = {
   readonly stiffness: Scalars['Float']['output'];
   readonly influenceFactor: Scalars['Float']['output'];
   readonly baseLoadShare: Scalars['Float']['output'];
+  /** Along the pile from the head down (elastic-continuum). */
+  readonly axial?: Maybe<ReadonlyArray<AxialLoad>>;
+};
+
+export type AxialLoad = {
+  readonly __typename?: 'AxialLoad';
+  /** m, bottom of an element */
+  readonly depth: Scalars['Float']['output'];
+  /** kN, in the pile at this depth */
+  readonly axialLoad: Scalars['Float']['output'];
+  /** kPa, mean on the element above this depth */
+  readonly shaftStress: Scalars['Float']['output'];
 };
 
 export type GroupSettlement = {
@@ -467,6 +481,16 @@ export type GroupStiffness = {
   readonly rockingAlongX?: Maybe<Scalars['Float']['output']>;
   /** kN.m/rad; left out where the piles cannot resist it */
   readonly rockingAlongY?: Maybe<Scalars['Float']['output']>;
+  readonly atOrigin: CapMatrices;
+};
+
+/** A rigid cap at its origin, pressing signs; rows and columns: V, My, Mx (kN, kN.m) and settlement, slope along x, slope along y (m, rad). */
+export type CapMatrices = {
+  readonly __typename?: 'CapMatrices';
+  /** m/kN, 1/kN, rad/(kN.m) */
+  readonly flexibility: ReadonlyArray<ReadonlyArray<Scalars['Float']['output']>>;
+  /** kN/m, kN/rad, kN.m/rad; 0 where the piles cannot take it */
+  readonly stiffness: ReadonlyArray<ReadonlyArray<Scalars['Float']['output']>>;
 };
 
 /** The ordered lines that lead from input to result. */
@@ -511,6 +535,22 @@ export type Step = {
   readonly unknowns?: Maybe<ReadonlyArray<Unknown>>;
   readonly residuals?: Maybe<ReadonlyArray<Residual>>;
   readonly tolerance?: Maybe<Scalars['Float']['output']>;
+  /** solution: depths between elements, m. */
+  readonly mesh?: Maybe<ReadonlyArray<Scalars['Float']['output']>>;
+  /** solution: what it is read from. */
+  readonly table?: Maybe<SolutionTable>;
+};
+
+export type SolutionTable = {
+  readonly __typename?: 'SolutionTable';
+  readonly columns: ReadonlyArray<TableColumn>;
+  readonly rows: ReadonlyArray<ReadonlyArray<Scalars['Float']['output']>>;
+};
+
+export type TableColumn = {
+  readonly __typename?: 'TableColumn';
+  readonly symbol: Scalars['String']['output'];
+  readonly unit: Scalars['String']['output'];
 };
 
 export type Operand = {
@@ -739,12 +779,16 @@ export type ResolversTypes = {
   Int: ResolverTypeWrapper<Scalars['Int']['output']>;
   SettlementResult: ResolverTypeWrapper<SettlementResult>;
   SinglePileSettlement: ResolverTypeWrapper<SinglePileSettlement>;
+  AxialLoad: ResolverTypeWrapper<AxialLoad>;
   GroupSettlement: ResolverTypeWrapper<GroupSettlement>;
   Tilt: ResolverTypeWrapper<Tilt>;
   PileSettlement: ResolverTypeWrapper<PileSettlement>;
   GroupStiffness: ResolverTypeWrapper<GroupStiffness>;
+  CapMatrices: ResolverTypeWrapper<CapMatrices>;
   Trace: ResolverTypeWrapper<Trace>;
   Step: ResolverTypeWrapper<Step>;
+  SolutionTable: ResolverTypeWrapper<SolutionTable>;
+  TableColumn: ResolverTypeWrapper<TableColumn>;
   Operand: ResolverTypeWrapper<Operand>;
   StepRange: ResolverTypeWrapper<StepRange>;
   Unknown: ResolverTypeWrapper<Unknown>;
@@ -798,12 +842,16 @@ export type ResolversParentTypes = {
   Int: Scalars['Int']['output'];
   SettlementResult: SettlementResult;
   SinglePileSettlement: SinglePileSettlement;
+  AxialLoad: AxialLoad;
   GroupSettlement: GroupSettlement;
   Tilt: Tilt;
   PileSettlement: PileSettlement;
   GroupStiffness: GroupStiffness;
+  CapMatrices: CapMatrices;
   Trace: Trace;
   Step: Step;
+  SolutionTable: SolutionTable;
+  TableColumn: TableColumn;
   Operand: Operand;
   StepRange: StepRange;
   Unknown: Unknown;
@@ -952,6 +1000,13 @@ export type SinglePileSettlementResolvers<ContextType = MercuriusContext, Parent
   stiffness?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   influenceFactor?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   baseLoadShare?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
+  axial?: Resolver<Maybe<ReadonlyArray<ResolversTypes['AxialLoad']>>, ParentType, ContextType>;
+};
+
+export type AxialLoadResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['AxialLoad'] = ResolversParentTypes['AxialLoad']> = {
+  depth?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
+  axialLoad?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
+  shaftStress?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
 };
 
 export type GroupSettlementResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['GroupSettlement'] = ResolversParentTypes['GroupSettlement']> = {
@@ -980,6 +1035,12 @@ export type GroupStiffnessResolvers<ContextType = MercuriusContext, ParentType e
   vertical?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   rockingAlongX?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
   rockingAlongY?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
+  atOrigin?: Resolver<ResolversTypes['CapMatrices'], ParentType, ContextType>;
+};
+
+export type CapMatricesResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['CapMatrices'] = ResolversParentTypes['CapMatrices']> = {
+  flexibility?: Resolver<ReadonlyArray<ReadonlyArray<ResolversTypes['Float']>>, ParentType, ContextType>;
+  stiffness?: Resolver<ReadonlyArray<ReadonlyArray<ResolversTypes['Float']>>, ParentType, ContextType>;
 };
 
 export type TraceResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['Trace'] = ResolversParentTypes['Trace']> = {
@@ -1010,6 +1071,18 @@ export type StepResolvers<ContextType = MercuriusContext, ParentType extends Res
   unknowns?: Resolver<Maybe<ReadonlyArray<ResolversTypes['Unknown']>>, ParentType, ContextType>;
   residuals?: Resolver<Maybe<ReadonlyArray<ResolversTypes['Residual']>>, ParentType, ContextType>;
   tolerance?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
+  mesh?: Resolver<Maybe<ReadonlyArray<ResolversTypes['Float']>>, ParentType, ContextType>;
+  table?: Resolver<Maybe<ResolversTypes['SolutionTable']>, ParentType, ContextType>;
+};
+
+export type SolutionTableResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['SolutionTable'] = ResolversParentTypes['SolutionTable']> = {
+  columns?: Resolver<ReadonlyArray<ResolversTypes['TableColumn']>, ParentType, ContextType>;
+  rows?: Resolver<ReadonlyArray<ReadonlyArray<ResolversTypes['Float']>>, ParentType, ContextType>;
+};
+
+export type TableColumnResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['TableColumn'] = ResolversParentTypes['TableColumn']> = {
+  symbol?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  unit?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
 };
 
 export type OperandResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['Operand'] = ResolversParentTypes['Operand']> = {
@@ -1112,12 +1185,16 @@ export type Resolvers<ContextType = MercuriusContext> = {
   GroupResult?: GroupResultResolvers<ContextType>;
   SettlementResult?: SettlementResultResolvers<ContextType>;
   SinglePileSettlement?: SinglePileSettlementResolvers<ContextType>;
+  AxialLoad?: AxialLoadResolvers<ContextType>;
   GroupSettlement?: GroupSettlementResolvers<ContextType>;
   Tilt?: TiltResolvers<ContextType>;
   PileSettlement?: PileSettlementResolvers<ContextType>;
   GroupStiffness?: GroupStiffnessResolvers<ContextType>;
+  CapMatrices?: CapMatricesResolvers<ContextType>;
   Trace?: TraceResolvers<ContextType>;
   Step?: StepResolvers<ContextType>;
+  SolutionTable?: SolutionTableResolvers<ContextType>;
+  TableColumn?: TableColumnResolvers<ContextType>;
   Operand?: OperandResolvers<ContextType>;
   StepRange?: StepRangeResolvers<ContextType>;
   Unknown?: UnknownResolvers<ContextType>;

@@ -14,7 +14,7 @@ test('settlement over GraphQL and over REST are the same', async () => {
   for (const { request } of cases) {
     const { method: _, ...asked } = request
     const query = `query ($r: SettlementRequestInput!) { settlement(request: $r) {
-      meta { requestHash } result { single { load settlement stiffness influenceFactor baseLoadShare } group { settlement tilt { alongX alongY } piles { x y load settlement } } } } }`
+      meta { requestHash } result { single { load settlement stiffness influenceFactor baseLoadShare axial { depth axialLoad shaftStress } } group { settlement tilt { alongX alongY } stiffness { atOrigin { flexibility stiffness } } piles { x y load settlement } } } } }`
     const graphql = (
       await app.inject({ method: 'POST', url: '/graphql', payload: { query, variables: { r: asked } } })
     ).json()
@@ -24,6 +24,7 @@ test('settlement over GraphQL and over REST are the same', async () => {
     expect(single).toEqual(rest.result.single)
     expect(group?.piles).toEqual(rest.result.group?.piles)
     expect(group?.tilt).toEqual(rest.result.group?.tilt)
+    expect(group?.stiffness).toEqual(rest.result.group && { atOrigin: rest.result.group.stiffness.atOrigin })
   }
   await app.close()
 })

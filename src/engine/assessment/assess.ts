@@ -123,7 +123,7 @@ function stiffness(sheet: Sheet, cap: Cap, set: ResistanceSet) {
       name,
       unit,
       value,
-      method: 'superposed interaction factors, Cholesky',
+      method: 'inverse of the flexibility about the centroid of the piles',
       operands: [f, r_x, r_y, set.prepared.stiffness],
       unknowns: [{ symbol, value, unit }],
       residuals: [{ name: 'stiffness times flexibility, less 1', value: own > 0 ? Math.abs(value * own - 1) : 0 }],
@@ -135,6 +135,7 @@ function stiffness(sheet: Sheet, cap: Cap, set: ResistanceSet) {
     vertical: term('K_v', 'vertical stiffness', 'kN/m', 0),
     rockingAlongX: term('K_rx', 'rocking stiffness along x', 'kN.m/rad', 1),
     rockingAlongY: term('K_ry', 'rocking stiffness along y', 'kN.m/rad', 2),
+    atOrigin: set.matrices,
   }
 }
 

@@ -6,6 +6,7 @@ import type { BlockTerms } from '../resistance/block.ts'
 import { group, sumOfPilesFormula } from '../resistance/group.ts'
 import type { GroupJob } from '../resistance/job.ts'
 import type { PileTerms } from '../resistance/single-pile.ts'
+import { capMatrices } from '../settlement/cap-matrices.ts'
 import { type PreparedGroup, prepareGroup } from '../settlement/prepared-group.ts'
 import { plainTexts } from '../trace/plain-string.ts'
 import type { Sheet } from '../trace/sheet.ts'
@@ -29,6 +30,7 @@ export type ResistanceSet = {
   readonly statics: RigidCap
   readonly plan: PilePlan
   readonly prepared: PreparedGroup
+  readonly matrices: ReturnType<typeof capMatrices>
   readonly notices: readonly Notice[]
 }
 
@@ -82,6 +84,15 @@ export function resistanceSet(root: Sheet, schedule: Schedule, cap: Cap, index: 
   const compression = safe(sheet, 'compression')
   let uplift: Safe | undefined
   const points = positions(cap.layout)
+  const prepared = prepareGroup(
+    sheet.within('settlement'),
+    pile,
+    ground,
+    cap.layout,
+    { ...at, load: '/loads' },
+    schedule.settlementMethod,
+    notice,
+  )
   return {
     points,
     pileCount: compression.terms.pileCount,
@@ -94,7 +105,8 @@ export function resistanceSet(root: Sheet, schedule: Schedule, cap: Cap, index: 
     },
     statics: rigidCap(points),
     plan: pilePlan(sheet.within('plan'), cap.layout, at.layout, compression.terms.pileCount),
-    prepared: prepareGroup(sheet.within('settlement'), pile, ground, cap.layout, { ...at, load: '/loads' }, notice),
+    prepared,
+    matrices: capMatrices(sheet.within('settlement'), prepared),
     get notices() {
       return [...notices.values()]
     },

@@ -3,6 +3,7 @@ import type { GroundProfile } from '../ground/profile-types.ts'
 import type { MethodChoices } from '../methods/method-choice.ts'
 import type { Layout } from '../piles/layout.ts'
 import type { PileType } from '../piles/pile-type.ts'
+import type { SettlementMethod } from '../requests.ts'
 
 export type LimitState = 'ultimate' | 'working' | 'serviceability'
 export type Signs = 'pressing' | 'right-handed-z-up' | 'right-handed-z-down'
@@ -50,7 +51,7 @@ export type Schedule = {
   readonly title: string
   readonly designBasis: DesignBasis
   readonly methods?: MethodChoices
-  readonly settlementMethod?: 'randolph-wroth-1978'
+  readonly settlementMethod?: SettlementMethod
   readonly ground: Readonly<Record<string, GroundProfile>>
   readonly pileTypes: Readonly<Record<string, PileType>>
   readonly caps: readonly Cap[]

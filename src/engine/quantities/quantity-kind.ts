@@ -16,6 +16,8 @@ const kinds: Readonly<Record<UnitCode, string>> = {
   'kN.m/rad': 'rotational stiffness',
   'rad/(kN.m)': 'rotational flexibility',
   'm/kN': 'flexibility',
+  '1/kN': 'coupled flexibility',
+  'kN/rad': 'coupled stiffness',
   deg: 'angle',
   rad: 'angle',
 }

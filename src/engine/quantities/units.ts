@@ -24,6 +24,8 @@ export const units = {
   'kN.m/rad': unit(1, 1),
   'rad/(kN.m)': unit(-1, -1),
   'm/kN': unit(1, -1),
+  '1/kN': unit(0, -1),
+  'kN/rad': unit(0, 1),
   deg: unit(0, 0, Math.PI / 180),
   rad: unit(0, 0),
 } as const satisfies Record<string, Unit>

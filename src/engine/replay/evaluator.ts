@@ -19,6 +19,8 @@ const written: Readonly<Record<string, string>> = {
   'kN.m/rad': 'kN m',
   'rad/(kN.m)': 'kN^-1 m^-1',
   'm/kN': 'm/kN',
+  '1/kN': 'kN^-1',
+  'kN/rad': 'kN',
   deg: 'deg',
   rad: 'rad',
 }

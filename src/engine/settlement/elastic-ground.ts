@@ -4,6 +4,7 @@ import { layerParameter } from '../ground/parameters.ts'
 import type { GroundProfile } from '../ground/profile-types.ts'
 import { layerBoundary } from '../ground/stress.ts'
 import type { Notice } from '../notice.ts'
+import type { SettlementMethod } from '../requests.ts'
 import { practice, statics } from '../sources/bibliography.ts'
 import { formula } from '../trace/formula.ts'
 import type { Sheet } from '../trace/sheet.ts'
@@ -34,15 +35,24 @@ export const weighted = formula({
   source: statics('mean'),
 })
 
-const METHOD = 'randolph-wroth-1978'
-
-/** Names every layer along the shaft and under the toe that lacks its modulus, all at once. */
-function demandModulus(layers: readonly Stratum[], reach: { head: number; toe: number }, pointer: string): void {
+/**
+ * Names every layer that matters and lacks its modulus, all at once: along the shaft and under the toe, for the continuum
+ * also above the head and, over a rigid base, down to it.
+ */
+function demandModulus(
+  layers: readonly Stratum[],
+  profile: GroundProfile,
+  reach: { head: number; toe: number },
+  method: SettlementMethod,
+  pointer: string,
+): void {
   const under = stratumAt(layers, reach.toe)
+  const whole = method === 'elastic-continuum'
+  const bottom = whole && profile.rigidBase ? Number.POSITIVE_INFINITY : reach.toe
   const lacking = layers.filter(
     (s) =>
       s.layer.youngsModulus === undefined &&
-      (s === under || Math.min(s.bottom, reach.toe) - Math.max(s.top, reach.head) > SAME_DEPTH),
+      (s === under || Math.min(s.bottom, bottom) - Math.max(s.top, whole ? 0 : reach.head) > SAME_DEPTH),
   )
   const byIndex = new Map(lacking.map((s) => [s.index, s]))
   if (byIndex.size === 0) return
@@ -50,7 +60,7 @@ function demandModulus(layers: readonly Stratum[], reach: { head: number; toe: n
     [...byIndex.values()].map((s) => ({
       pointer: `${pointer}/layers/${s.index}`,
       code: 'missing-parameter' as const,
-      facts: { layer: s.layer.name, parameter: 'youngsModulus', method: METHOD },
+      facts: { layer: s.layer.name, parameter: 'youngsModulus', method },
     })),
   )
 }
@@ -61,7 +71,8 @@ export type ElasticGround = {
   readonly layers: readonly Stratum[]
   /** Stiffness at a depth within a stratum. */
   readonly at: (here: Sheet, stratum: Stratum, depth: Term<'m'>) => Stiffness
-  /** Bottom of a stratum as a step. */
+  /** Top and bottom of a stratum as steps. */
+  readonly top: (index: number) => Term<'m'>
   readonly bottom: (index: number) => Term<'m'>
 }
 
@@ -71,6 +82,7 @@ export function elasticGround(
   profile: GroundProfile,
   at: { readonly pile: string; readonly ground: string },
   reach: { readonly head: number; readonly toe: number },
+  method: SettlementMethod,
   notice: (n: Notice) => void,
 ): ElasticGround {
   const pointer = at.ground
@@ -91,7 +103,7 @@ export function elasticGround(
       text: `${last.layer.name} was carried on below ${last.bottom.toFixed(1)} m for the settlement.`,
     })
   }
-  if (profile.rigidBase) {
+  if (profile.rigidBase && method === 'randolph-wroth-1978') {
     notice({
       code: 'approximation',
       level: 'caution',
@@ -102,19 +114,18 @@ export function elasticGround(
   const carried: Stratum | undefined =
     ends && !profile.rigidBase ? { ...last, top: last.bottom, bottom: Number.POSITIVE_INFINITY } : undefined
   const layers = carried ? [...known, carried] : known
-  demandModulus(layers, reach, pointer)
+  demandModulus(layers, profile, reach, method, pointer)
   const sheet = root.within('ground')
+  const surface = (): Term<'m'> =>
+    sheet.assumed(
+      { symbol: 'z_0', name: 'ground surface', unit: 'm' },
+      0,
+      'depth is counted from the surface',
+      statics('datum'),
+    )
   const bottom = (index: number): Term<'m'> => {
     const { layer } = known[index]!
-    const z_t =
-      index === 0
-        ? sheet.assumed(
-            { symbol: 'z_0', name: 'ground surface', unit: 'm' },
-            0,
-            'depth is counted from the surface',
-            statics('datum'),
-          )
-        : bottoms[index - 1]!
+    const z_t = index === 0 ? surface() : bottoms[index - 1]!
     const h = sheet.input(
       { symbol: 'h', name: 'layer thickness', unit: 'm' },
       layer.thickness!,
@@ -127,6 +138,7 @@ export function elasticGround(
   for (const s of known) if (s.layer.thickness !== undefined) bottoms.push(bottom(s.index))
   return {
     layers,
+    top: (index) => (index === 0 ? surface() : bottoms[index - 1]!),
     bottom: (index) => bottoms[index]!,
     at: (here, stratum, asked) => {
       const place = `${pointer}/layers/${stratum.index}`
@@ -137,7 +149,7 @@ export function elasticGround(
         beyond ? last : stratum,
         place,
         beyond ? bottoms[last.index]! : asked,
-        { name: 'youngsModulus', symbol: 'E', unit: 'kPa', method: METHOD },
+        { name: 'youngsModulus', symbol: 'E', unit: 'kPa', method },
         undefined,
       )
       const label = { symbol: 'nu', name: `Poisson's ratio of ${stratum.layer.name}`, unit: '1' } as const

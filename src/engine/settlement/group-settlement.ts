@@ -1,13 +1,15 @@
 import type { Layout } from '../piles/layout.ts'
 import { pileLoads } from '../piles/rigid-cap.ts'
-import { cite, practice, statics } from '../sources/bibliography.ts'
+import { practice, statics } from '../sources/bibliography.ts'
 import { formula } from '../trace/formula.ts'
 import type { Sheet } from '../trace/sheet.ts'
 import type { Term } from '../trace/term.ts'
-import { type ElasticGroup, elasticGroup, type Plane } from './group.ts'
+import { capMatrices } from './cap-matrices.ts'
+import type { CoupledPiles } from './continuum/coupled-piles.ts'
+import { type ElasticGroup, elasticGroup, type Plane, superposed } from './group.ts'
 import type { PilePlace } from './pile-places.ts'
+import type { PileResponse } from './pile-response.ts'
 import { type CapLoadTerms, groupResponse, type PreparedGroup, prepareFrom } from './prepared-group.ts'
-import type { PileStiffness } from './randolph-wroth-1978.ts'
 
 export const planeSettlement = formula({
   symbol: 's',
@@ -51,7 +53,7 @@ export const spreadOf = formula({
 })
 
 export type GroupJob = {
-  readonly pile: PileStiffness
+  readonly pile: PileResponse
   /** Settlement of the single pile under the mean load. */
   readonly single: Term<'mm'>
   readonly layout: Layout
@@ -59,20 +61,21 @@ export type GroupJob = {
   readonly places: readonly PilePlace[]
   readonly n: Term<'1'>
   readonly load: CapLoadTerms
+  readonly coupled: CoupledPiles | undefined
   /** Place of the load in the request. */
   readonly pointer: string
 }
 
 const TOLERANCE = 1e-9
-const SOLVE = 'superposed interaction factors, Cholesky'
+const SOLVE = 'rigid plane on interacting piles; Cholesky, from 160 unknowns on conjugate gradients'
 
 /**
  * Settlement, tilt, pile loads and stiffness of a group. Superposition neglects that neighbours stiffen the ground;
  * the stiffness is that of a rigid cap about the centroid of the piles, each component acting alone (0: it cannot be taken).
  */
 export function groupSettlement(sheet: Sheet, job: GroupJob) {
-  const prepared = prepareFrom(sheet.within('flexibility'), job.pile, job.layout, job.pointer)
-  const solved = job.cap === 'flexible' ? flexible(sheet, job, prepared.elastic) : rigid(sheet, job, prepared)
+  const prepared = prepareFrom(sheet.within('flexibility'), job.pile, job.layout, job.pointer, job.coupled)
+  const solved = job.cap === 'flexible' ? flexible(sheet, job, prepared) : rigid(sheet, job, prepared)
   const { piles, settlement, tilt, ...spread } = solved
   return {
     settlement,
@@ -81,7 +84,7 @@ export function groupSettlement(sheet: Sheet, job: GroupJob) {
     tilt,
     ...spread,
     piles: job.places.map((p, i) => ({ x: p.x, y: p.y, ...piles[i]! })),
-    stiffness: capStiffness(sheet, job, prepared),
+    stiffness: { ...capStiffness(sheet, job, prepared), atOrigin: capMatrices(sheet, prepared) },
   }
 }
 
@@ -101,11 +104,11 @@ function rigid(sheet: Sheet, job: GroupJob, prepared: PreparedGroup) {
         unit: 'kN',
         value: loads[i]!,
         method: SOLVE,
-        operands: [load.V, load.Mx, load.My, pile.stiffness, pile.zeta, pile.influenceRadius, pile.baseLoadShare],
+        operands: [load.V, load.Mx, load.My, pile.stiffness, ...prepared.basis],
         unknowns: unknownsOf(plane),
         residuals,
         tolerance: TOLERANCE,
-        source: cite('randolph-wroth-1978', 'superposition'),
+        source: pile.source,
       },
       `piles/${i}/P_i`,
     ),
@@ -131,7 +134,7 @@ function rigid(sheet: Sheet, job: GroupJob, prepared: PreparedGroup) {
 }
 
 /** A flexible cap hands each pile its share by statics; the tilt is that of the plane that fits the settlements best. */
-function flexible(sheet: Sheet, job: GroupJob, elastic: ElasticGroup) {
+function flexible(sheet: Sheet, job: GroupJob, { elastic, basis }: PreparedGroup) {
   const { pile, n } = job
   const loads = pileLoads(sheet.within('statics'), job.places, n, job.load, job.pointer)
   const settled = elastic.settlements(Float64Array.from(loads, (p) => p.value))
@@ -159,11 +162,11 @@ function flexible(sheet: Sheet, job: GroupJob, elastic: ElasticGroup) {
           job,
         ),
         tolerance: TOLERANCE,
-        source: cite('randolph-wroth-1978', 'superposition'),
+        source: pile.source,
       },
       id,
     )
-  const from = [...loads, pile.stiffness, pile.zeta, pile.influenceRadius, pile.baseLoadShare]
+  const from = [...loads, pile.stiffness, ...basis]
   const settlements = loads.map((_, i) =>
     solution(
       's',
@@ -200,7 +203,10 @@ function flexible(sheet: Sheet, job: GroupJob, elastic: ElasticGroup) {
 
 /** Least squares is the rigid cap on equal springs of 1: the settlements in the place of the loads. */
 function bestPlane({ points, centroid }: ElasticGroup, settled: Float64Array): { alongX: number; alongY: number } {
-  const F = elasticGroup(points, 1, () => 0).flexibility
+  const F = elasticGroup(
+    points,
+    superposed(points, 1, () => 0),
+  ).flexibility
   const total = (weight: (i: number) => number) => settled.reduce((sum, s, i) => sum + s * weight(i), 0)
   const My = total((i) => points[i]!.x - centroid.x)
   const Mx = total((i) => points[i]!.y - centroid.y)
@@ -222,7 +228,7 @@ function capStiffness(sheet: Sheet, { pile }: GroupJob, { elastic, flexibility }
       unknowns: [{ symbol, value, unit }],
       residuals: [{ name: 'stiffness times flexibility, less 1', value: own > 0 ? Math.abs(value * own - 1) : 0 }],
       tolerance: TOLERANCE,
-      source: cite('randolph-wroth-1978', 'superposition'),
+      source: pile.source,
     })
   }
   return {

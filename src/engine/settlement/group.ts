@@ -1,6 +1,11 @@
 import { refuse } from '../faults.ts'
 import { factor, solveFactored } from '../numerics/cholesky.ts'
+import { tabulate } from '../numerics/tabulate.ts'
+import { smallestSpacing } from '../piles/enclosing-prism.ts'
 import type { Point } from '../piles/layout.ts'
+import { type ModeLoads, solveModes } from './kernel-solve.ts'
+import { type Fold, foldOf } from './mirror-fold.ts'
+import { centroidOf, type Mode, planeModes } from './plane-modes.ts'
 
 /** Loads at the cap's origin: kN and kN.m, pressing signs. */
 export type CapLoad = { readonly V: number; readonly Mx: number; readonly My: number }
@@ -13,6 +18,8 @@ export type ElasticGroup = {
   readonly centroid: Point
   /** Flexibility of the plane for V, My, Mx at the centroid, 3 x 3 row-major: settlement, slope along x, slope along y. */
   readonly flexibility: Float64Array
+  /** Largest residual of the solves, relative; 0 where they were direct. */
+  readonly residual: number
   /** Pile loads for a plane of settlements. */
   readonly pileLoads: (plane: Plane) => Float64Array
   /** Settlements of piles under given loads, m. */
@@ -22,65 +29,73 @@ export type ElasticGroup = {
   readonly assertTaken: (load: CapLoad, pointer: string) => void
 }
 
-/** Second moments below this share of the larger one mean a single line of piles. */
-const LINE = 1e-12
+/** How piles answer: their loads for each movement of a rigid plane, and their settlements under given loads. */
+export type PileAnswers = {
+  readonly modes: (about: readonly Point[], fold: Fold, modes: readonly Mode[]) => ModeLoads
+  readonly settlements: (loads: Float64Array) => Float64Array
+}
 
-/** Prepares a group from the stiffness of one pile (kN/m) and the interaction factor at a spacing. Cost n^3/3. */
-export function elasticGroup(
+/** From so many piles on the interaction comes from a table. */
+const TABLED = 120
+
+/** Piles that act on each other by superposed interaction factors: stiffness of one pile (kN/m) and the factor at a spacing. */
+export function superposed(
   points: readonly Point[],
   stiffness: number,
-  interaction: (spacing: number) => number,
-): ElasticGroup {
-  const n = points.length
-  const centroid = { x: points.reduce((s, p) => s + p.x, 0) / n, y: points.reduce((s, p) => s + p.y, 0) / n }
-  const x = points.map((p) => p.x - centroid.x)
-  const y = points.map((p) => p.y - centroid.y)
-  const matrix = new Float64Array(n * n)
-  for (let i = 0; i < n; i++) {
-    for (let j = 0; j <= i; j++) {
-      const alpha = i === j ? 1 : interaction(Math.hypot(x[i]! - x[j]!, y[i]! - y[j]!))
-      matrix[i * n + j] = alpha / stiffness
-      matrix[j * n + i] = alpha / stiffness
-    }
+  interaction: (s: number) => number,
+): PileAnswers {
+  const factorAt = points.length > TABLED ? tabled(points, interaction) : interaction
+  const entry = (distance: number) => (distance === 0 ? 1 : factorAt(distance)) / stiffness
+  return {
+    modes: (about, fold, modes) => solveModes(about, fold, modes, entry),
+    settlements: (loads) =>
+      Float64Array.from(points, (p) =>
+        points.reduce((sum, q, j) => sum + loads[j]! * entry(Math.hypot(p.x - q.x, p.y - q.y)), 0),
+      ),
   }
-  const factored = Float64Array.from(matrix)
-  if (!factor(factored, n)) refuse('not-finite', '/layout', { symbol: 'group flexibility' })
-  // Modes that the layout can take: sinking, and turning about the principal axes along which the piles spread.
-  const axes = principalAxes(x, y)
-  const modes = [
-    new Float64Array(n).fill(1),
-    ...axes.map((u) => Float64Array.from(x, (xi, i) => xi * u.x + y[i]! * u.y)),
-  ]
-  const unit = modes.map((mode) => {
-    const b = Float64Array.from(mode)
-    solveFactored(factored, n, b)
-    return b
-  })
+}
+
+function tabled(points: readonly Point[], interaction: (spacing: number) => number): (spacing: number) => number {
+  const { x, y } = centroidOf(points)
+  const reach = 2 * points.reduce((most, p) => Math.max(most, Math.hypot(p.x - x, p.y - y)), 0)
+  return tabulate(interaction, smallestSpacing(points, 0, '/layout'), reach)
+}
+
+/** Prepares a group under a rigid cap: its piles' answers to sinking and turning, once for all loads. */
+export function elasticGroup(points: readonly Point[], answers: PileAnswers): ElasticGroup {
+  const n = points.length
+  const centroid = centroidOf(points)
+  const x = Float64Array.from(points, (p) => p.x - centroid.x)
+  const y = Float64Array.from(points, (p) => p.y - centroid.y)
+  const about = points.map((_, i) => ({ x: x[i]!, y: y[i]! }))
+  const fold = foldOf(about)
+  const modes = planeModes(x, y, fold.mirrors.x || fold.mirrors.y)
+  const { loads: unit, residual } = answers.modes(about, fold, modes)
   const m = modes.length
+  const movement = ({ v, x: alongX, y: alongY }: Mode, i: number) => v + alongX * x[i]! + alongY * y[i]!
   const inverse = invert(
-    Float64Array.from({ length: m * m }, (_, k) => dot(modes[Math.floor(k / m)]!, unit[k % m]!)),
+    Float64Array.from({ length: m * m }, (_, k) => {
+      const mode = modes[Math.floor(k / m)]!
+      return unit[k % m]!.reduce((sum, p, i) => sum + p * movement(mode, i), 0)
+    }),
     m,
   )
-  // From modes to V, My, Mx: the slope along an axis u adds u.x to alongX and u.y to alongY.
-  const direction = [{ v: 1, x: 0, y: 0 }, ...axes.map((u) => ({ v: 0, x: u.x, y: u.y }))]
+  // From modes to V, My, Mx: turning along u adds u.x to alongX and u.y to alongY.
   const flexibility = new Float64Array(9)
   for (let a = 0; a < m; a++) {
     for (let b = 0; b < m; b++) {
-      const [p, q] = [direction[a]!, direction[b]!]
-      const rows = [p.v, p.x, p.y]
-      const columns = [q.v, q.x, q.y]
+      const rows = [modes[a]!.v, modes[a]!.x, modes[a]!.y]
+      const columns = [modes[b]!.v, modes[b]!.x, modes[b]!.y]
       for (let r = 0; r < 3; r++)
         for (let c = 0; c < 3; c++) flexibility[r * 3 + c]! += rows[r]! * columns[c]! * inverse[a * m + b]!
     }
   }
-  const settlements = (loads: Float64Array) =>
-    Float64Array.from({ length: n }, (_, i) => dot(matrix.subarray(i * n, (i + 1) * n), loads))
   const atCentroid = (load: CapLoad) => ({ Mx: load.Mx - load.V * centroid.y, My: load.My - load.V * centroid.x })
   const reach = Math.max(...points.map((p) => Math.hypot(p.x, p.y)))
   const assertTaken = (load: CapLoad, pointer: string) => {
-    if (axes.length === 2) return
+    if (m === 3) return
     const { Mx, My } = atCentroid(load)
-    const [u] = axes
+    const u = modes[1]
     const left = u ? Math.abs(My * -u.y + Mx * u.x) : Math.hypot(Mx, My)
     // V on a line that passes the origin by rounding only leaves a moment of rounding.
     const size = Math.hypot(load.Mx, load.My) + Math.abs(load.V) * reach
@@ -90,11 +105,16 @@ export function elasticGroup(
     points,
     centroid,
     flexibility,
-    settlements,
-    pileLoads: (plane) => {
-      const b = Float64Array.from(x, (xi, i) => plane.centre + plane.alongX * xi + plane.alongY * y[i]!)
-      solveFactored(factored, n, b)
-      return b
+    residual,
+    settlements: answers.settlements,
+    pileLoads: ({ centre, alongX, alongY }) => {
+      const out = new Float64Array(n)
+      for (let k = 0; k < m; k++) {
+        const { v, x: ux, y: uy } = modes[k]!
+        const share = v * centre + ux * alongX + uy * alongY
+        for (let i = 0; i < n; i++) out[i]! += share * unit[k]![i]!
+      }
+      return out
     },
     assertTaken,
     plane: (load, pointer) => {
@@ -105,24 +125,6 @@ export function elasticGroup(
       return { centre: f(0), alongX: f(1), alongY: f(2) }
     },
   }
-}
-
-function principalAxes(x: readonly number[], y: readonly number[]): Point[] {
-  const xx = x.reduce((s, v) => s + v * v, 0)
-  const yy = y.reduce((s, v) => s + v * v, 0)
-  const xy = x.reduce((s, v, i) => s + v * y[i]!, 0)
-  const angle = 0.5 * Math.atan2(2 * xy, xx - yy)
-  const u = { x: Math.cos(angle), y: Math.sin(angle) }
-  const along = xx * u.x ** 2 + 2 * xy * u.x * u.y + yy * u.y ** 2
-  const across = xx + yy - along
-  const least = LINE * Math.max(along, across) + Number.MIN_VALUE
-  return [...(along > least ? [u] : []), ...(across > least ? [{ x: -u.y, y: u.x }] : [])]
-}
-
-const dot = (a: Float64Array, b: Float64Array): number => {
-  let sum = 0
-  for (let i = 0; i < a.length; i++) sum += a[i]! * b[i]!
-  return sum
 }
 
 /** Inverse of a symmetric positive definite matrix of a few rows. */

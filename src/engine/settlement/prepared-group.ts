@@ -1,14 +1,17 @@
 import type { GroundProfile } from '../ground/profile-types.ts'
 import type { Notice } from '../notice.ts'
+import { smallestSpacing } from '../piles/enclosing-prism.ts'
 import { type Layout, positions } from '../piles/layout.ts'
 import type { PileType } from '../piles/pile-type.ts'
-import { cite, statics } from '../sources/bibliography.ts'
+import type { SettlementMethod } from '../requests.ts'
+import { statics } from '../sources/bibliography.ts'
 import { formula } from '../trace/formula.ts'
 import type { Sheet } from '../trace/sheet.ts'
 import type { Term } from '../trace/term.ts'
-import { type ElasticGroup, elasticGroup } from './group.ts'
-import { interactionOf } from './interaction.ts'
-import { type PileStiffness, randolphWroth, type SettlementPlaces } from './randolph-wroth-1978.ts'
+import type { CoupledPiles } from './continuum/coupled-piles.ts'
+import { type ElasticGroup, elasticGroup, type PileAnswers, superposed } from './group.ts'
+import type { PileResponse, SettlementPlaces } from './pile-response.ts'
+import { pileResponse } from './settlement-method.ts'
 
 export const originSettlement = formula({
   symbol: 's_o',
@@ -43,6 +46,9 @@ export const tiltOf = formula({
   source: statics('steepest slope'),
 })
 
+/** How the pile loads under a rigid plane are found. */
+const SOLVE = 'rigid plane on interacting piles; Cholesky, from 160 unknowns on conjugate gradients'
+
 /**
  * Flexibility of a rigid cap for V, My, Mx at the cap's origin, symmetric 3 x 3, each row as its diagonal and ratios to it:
  * s = f (V + a_x My + a_y Mx), theta_x = r_x (My + e_x V + c_x Mx), theta_y = r_y (Mx + e_y V + c_y My).
@@ -60,7 +66,9 @@ export type CapFlexibility = {
   readonly c_y: Term<'1'>
 }
 export type PreparedGroup = {
-  readonly pile: PileStiffness
+  readonly pile: PileResponse
+  /** What the interaction rests on. */
+  readonly basis: readonly Term[]
   /** Stiffness of one pile alone. */
   readonly stiffness: Term<'kN/m'>
   readonly elastic: ElasticGroup
@@ -84,16 +92,42 @@ export function prepareGroup(
   ground: GroundProfile,
   layout: Layout,
   at: SettlementPlaces,
+  method: SettlementMethod | undefined,
   notice: (n: Notice) => void,
 ): PreparedGroup {
-  return prepareFrom(sheet.within('group'), randolphWroth(sheet, pile, ground, at, notice), layout, at.load)
+  const response = pileResponse(sheet, method, pile, ground, at, notice)
+  return prepareFrom(sheet.within('group'), response, layout, at.load)
 }
 
-/** The same from a pile stiffness that is already known. */
-export function prepareFrom(sheet: Sheet, pile: PileStiffness, layout: Layout, load: string): PreparedGroup {
-  const elastic = elasticGroup(positions(layout), pile.stiffness.value, interactionOf(pile))
-  return { pile, stiffness: pile.stiffness, elastic, flexibility: capFlexibility(sheet, pile, elastic), load }
+/** The same from a pile that is already known; `coupled` lets every element act on every other. */
+export function prepareFrom(
+  sheet: Sheet,
+  pile: PileResponse,
+  layout: Layout,
+  load: string,
+  coupled?: CoupledPiles,
+): PreparedGroup {
+  const points = positions(layout)
+  const elastic = elasticGroup(
+    points,
+    coupled ? coupledAnswers(coupled) : superposed(points, pile.stiffness.value, pile.interaction),
+  )
+  const basis = points.length > 1 ? pile.basis(sheet, smallestSpacing(points, 0, '')) : []
+  return {
+    pile,
+    basis,
+    stiffness: pile.stiffness,
+    elastic,
+    flexibility: capFlexibility(sheet, pile, basis, elastic),
+    load,
+  }
 }
+
+const coupledAnswers = (piles: CoupledPiles): PileAnswers => ({
+  modes: (about, _, modes) =>
+    piles.loads(modes.map((mode) => Float64Array.from(about, (p) => mode.v + mode.x * p.x + mode.y * p.y))),
+  settlements: (loads) => piles.settlements(loads),
+})
 
 /** What a load at the cap's origin does to a prepared group: its own arithmetic only. `pointer` is the load's place, for a refusal. */
 export function groupResponse(
@@ -115,7 +149,12 @@ export function groupResponse(
   }
 }
 
-function capFlexibility(sheet: Sheet, pile: PileStiffness, elastic: ElasticGroup): CapFlexibility {
+function capFlexibility(
+  sheet: Sheet,
+  pile: PileResponse,
+  basis: readonly Term[],
+  elastic: ElasticGroup,
+): CapFlexibility {
   const F = atOrigin(elastic)
   const own = elastic.flexibility
   // A unit load at the centroid: the pile loads that it causes must give it back, and no moment.
@@ -124,6 +163,7 @@ function capFlexibility(sheet: Sheet, pile: PileStiffness, elastic: ElasticGroup
   const { points, centroid } = elastic
   const extent = 1 + Math.max(...points.map((p) => Math.hypot(p.x - centroid.x, p.y - centroid.y)))
   const residuals = [
+    { name: 'compatibility: residual of the solve', value: elastic.residual },
     { name: 'vertical equilibrium of a unit load', value: Math.abs(sum(() => 1) - 1) },
     {
       name: 'moment along x of a unit load, relative',
@@ -145,12 +185,12 @@ function capFlexibility(sheet: Sheet, pile: PileStiffness, elastic: ElasticGroup
       name,
       unit,
       value,
-      method: 'superposed interaction factors under a rigid plane, Cholesky',
-      operands: [pile.stiffness, pile.zeta, pile.influenceRadius, pile.baseRadius, pile.baseLoadShare],
+      method: SOLVE,
+      operands: [pile.stiffness, ...basis],
       unknowns: [{ symbol, value, unit }],
       residuals,
       tolerance: 1e-9,
-      source: cite('randolph-wroth-1978', 'superposition'),
+      source: pile.source,
     })
   const share = (row: number, column: number) => (F[row * 4]! > 0 ? F[row * 3 + column]! / F[row * 4]! : 0)
   return {

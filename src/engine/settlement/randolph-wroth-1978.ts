@@ -3,30 +3,17 @@ import { SAME_DEPTH, stratumAt } from '../ground/depths.ts'
 import type { GroundProfile } from '../ground/profile-types.ts'
 import type { Notice } from '../notice.ts'
 import type { PileType } from '../piles/pile-type.ts'
-import { isSteel, sectionTerms } from '../piles/section.ts'
-import { cite, practice, statics } from '../sources/bibliography.ts'
+import { cite } from '../sources/bibliography.ts'
 import { formula } from '../trace/formula.ts'
 import type { Sheet } from '../trace/sheet.ts'
 import type { Term } from '../trace/term.ts'
 import { elasticGround, middle, weighted } from './elastic-ground.ts'
+import { elasticPileTerms } from './pile-geometry.ts'
+import type { PileResponse, SettlementPlaces } from './pile-response.ts'
 
-const rw = (locator: string) => cite('randolph-wroth-1978', locator)
-export const toeDepthOf = formula({
-  symbol: 'D',
-  name: 'depth of the toe',
-  unit: 'm',
-  text: 'z_h + L',
-  where: { z_h: 'm', L: 'm' },
-  source: statics('depths'),
-})
-export const equivalentRadius = formula({
-  symbol: 'r_0',
-  name: 'radius of the circle of equal area',
-  unit: 'm',
-  text: 'sqrt(A / pi)',
-  where: { A: 'm2' },
-  source: practice('equivalent circle'),
-})
+const METHOD = 'randolph-wroth-1978'
+
+const rw = (locator: string) => cite(METHOD, locator)
 export const equivalentModulus = formula({
   symbol: 'E_pe',
   name: 'modulus of the equivalent solid pile',
@@ -132,23 +119,6 @@ export const baseShareFormula = formula({
   source: rw('load at the base'),
 })
 
-export type PileStiffness = {
-  readonly stiffness: Term<'kN/m'>
-  readonly baseLoadShare: Term<'1'>
-  readonly influenceRadius: Term<'m'>
-  readonly zeta: Term<'1'>
-  readonly baseRadius: Term<'m'>
-  readonly width: Term<'m'>
-  /** Young's modulus of the ground at the toe. */
-  readonly toeModulus: Term<'kPa'>
-}
-export type SettlementPlaces = {
-  readonly pile: string
-  readonly ground: string
-  readonly layout: string
-  readonly load: string
-}
-
 /** Rounding of thickness sums must not raise a notice. */
 const SLACK = 1e-6
 
@@ -172,28 +142,9 @@ export function randolphWroth(
   ground: GroundProfile,
   at: SettlementPlaces,
   notice: (n: Notice) => void,
-): PileStiffness {
-  const own = sheet.within('pile')
-  const section = sectionTerms(sheet, pile, at.pile)
-  const L = own.input({ symbol: 'L', name: 'pile length', unit: 'm' }, pile.length, `${at.pile}/length`)
-  const head = { symbol: 'z_h', name: 'depth of the pile head', unit: 'm' } as const
-  const z_h =
-    pile.headDepth === undefined
-      ? own.assumed(head, 0, 'no head depth was given: the head is at the surface', practice('head at the surface'))
-      : own.input(head, pile.headDepth, `${at.pile}/headDepth`)
-  const D = own.step(toeDepthOf, { z_h, L })
-  const modulus = { symbol: 'E_p', name: "Young's modulus of the pile", unit: 'kPa' } as const
-  const steel = isSteel(pile.section)
-  const E_p =
-    pile.youngsModulus === undefined
-      ? own.assumed(
-          modulus,
-          steel ? 210e6 : 30e6,
-          `no youngsModulus was given: ${steel ? 'steel' : 'concrete'}`,
-          practice("Young's modulus of the material"),
-        )
-      : own.input(modulus, pile.youngsModulus, `${at.pile}/youngsModulus`)
-  const elastic = elasticGround(sheet, ground, at, { head: z_h.value, toe: D.value }, notice)
+): PileResponse {
+  const { section, L, z_h, D, E_p, r_0, r_b } = elasticPileTerms(sheet, pile, at.pile)
+  const elastic = elasticGround(sheet, ground, at, { head: z_h.value, toe: D.value }, METHOD, notice)
   const here = sheet.within('stiffness')
   const parts: Term<'kN/m'>[] = []
   let toe: ReturnType<typeof elastic.at> | undefined
@@ -211,8 +162,6 @@ export function randolphWroth(
   const { nu, G: G_L } = toe!
   const under = stratumAt(elastic.layers, D.value) ?? elastic.layers.at(-1)!
   const below = elastic.at(here.within('below'), under, D)
-  const r_0 = here.step(equivalentRadius, { A: section.outline })
-  const r_b = pile.baseDiameter === undefined ? r_0 : here.step(equivalentRadius, { A: section.baseArea }, 'r_b')
   const eta = here.step(ratio, { a: r_b, b: r_0 }, 'eta')
   const xi = here.step(stiffnessRatio, { G_L, G_b: below.G })
   const rho = here.step(homogeneity, {
@@ -237,13 +186,38 @@ export function randolphWroth(
   const b = here.step(baseNumber, { eta, nu, xi })
   const s_n = here.step(shaftNumber, { rho, zeta, mu_L, L, r_0 })
   const k_n = here.step(stiffnessNumber, { b, s_n, lambda, mu_L, L, r_0 })
+  const share = here.step(baseShareFormula, { b, mu_L, s_n })
+  notice({
+    code: 'approximation',
+    level: 'info',
+    text: `${METHOD} is a closed form: about 7 to 10 % low in settlement for short piles, up to 18 % high for long compressible ones.`,
+  })
   return {
     stiffness: here.step(headStiffness, { k_n, G_L, r_0 }),
-    baseLoadShare: here.step(baseShareFormula, { b, mu_L, s_n }),
-    influenceRadius: r_m,
-    zeta,
-    baseRadius: r_b,
+    baseLoadShare: share,
     width: section.width,
     toeModulus: toe!.E,
+    interaction: superposedInteraction({ share: share.value, r_m: r_m.value, zeta: zeta.value, r_b: r_b.value }),
+    basis: () => [zeta, r_m, r_b, share],
+    source: rw('superposition'),
   }
+}
+
+/**
+ * Interaction factor of two equal piles, extra settlement over own settlement at equal loads: the shaft's logarithm
+ * (0 beyond r_m) and the base's 2 r_b / (pi s), weighted by the shares of the load that shaft and base carry in the single pile.
+ */
+export function superposedInteraction({
+  share,
+  r_m,
+  zeta,
+  r_b,
+}: {
+  share: number
+  r_m: number
+  zeta: number
+  r_b: number
+}) {
+  return (s: number): number =>
+    (1 - share) * Math.max(0, Math.log(r_m / s) / zeta) + share * Math.min(1, (2 * r_b) / (Math.PI * s))
 }

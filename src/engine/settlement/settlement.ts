@@ -1,16 +1,18 @@
+import { refuse } from '../faults.ts'
 import type { Notice } from '../notice.ts'
 import { smallestSpacing } from '../piles/enclosing-prism.ts'
+import type { Point } from '../piles/layout.ts'
 import type { SettlementRequest } from '../requests.ts'
-import { cite, practice, statics } from '../sources/bibliography.ts'
+import { practice, statics } from '../sources/bibliography.ts'
 import { formula } from '../trace/formula.ts'
 import type { Sheet } from '../trace/sheet.ts'
 import type { Term } from '../trace/term.ts'
+import { alongPile } from './along-pile.ts'
 import { groupSettlement } from './group-settlement.ts'
 import { pilePlaces } from './pile-places.ts'
+import type { PileResponse, SettlementPlaces } from './pile-response.ts'
 import type { CapLoadTerms } from './prepared-group.ts'
-import { randolphWroth, type SettlementPlaces } from './randolph-wroth-1978.ts'
-
-export { interactionOf } from './interaction.ts'
+import { pileResponse } from './settlement-method.ts'
 
 export const loadPerPile = formula({
   symbol: 'P',
@@ -26,7 +28,7 @@ export const headSettlement = formula({
   unit: 'mm',
   text: 'P / k',
   where: { P: 'kN', k: 'kN/m' },
-  source: cite('randolph-wroth-1978', 'load settlement ratio'),
+  source: statics('stiffness of the head'),
 })
 export const influenceFactorOf = formula({
   symbol: 'I',
@@ -44,12 +46,7 @@ export function settlement(
   at: SettlementPlaces,
   notice: (n: Notice) => void,
 ) {
-  const pile = randolphWroth(sheet, request.pile, request.ground, at, notice)
-  notice({
-    code: 'approximation',
-    level: 'info',
-    text: 'randolph-wroth-1978 is a closed form: about 7 to 10 % low in settlement for short piles, up to 18 % high for long compressible ones.',
-  })
+  const pile = pileResponse(sheet, request.method, request.pile, request.ground, at, notice)
   const load = loadTerms(sheet, request, at.load)
   const places = request.layout && pilePlaces(sheet.within('group'), request.layout, at.layout)
   const label = { symbol: 'n', name: 'number of piles', unit: '1' } as const
@@ -58,12 +55,14 @@ export function settlement(
     : sheet.assumed(label, 1, 'no layout was given: one pile', practice('single pile'))
   const P = sheet.step(loadPerPile, { V: load.V, n })
   const s = sheet.step(headSettlement, { P, k: pile.stiffness })
+  const axial = alongPile(sheet.within('axial'), pile, P)
   const single = {
     load: P,
     settlement: s,
     stiffness: pile.stiffness,
     baseLoadShare: pile.baseLoadShare,
     influenceFactor: sheet.step(influenceFactorOf, { E_s: pile.toeModulus, d: pile.width, k: pile.stiffness }),
+    ...(axial && { axial }),
   }
   if (!request.layout || !places) return { single }
   const points = places.map((p) => ({ x: p.x.value, y: p.y.value }))
@@ -78,9 +77,29 @@ export function settlement(
       places,
       n,
       load,
+      coupled: coupledPiles(request, pile, points),
       pointer: at.load,
     }),
   }
+}
+
+/** So many piles may be coupled element by element. */
+const COUPLED = 64
+
+function coupledPiles({ coupling }: SettlementRequest, { elements }: PileResponse, points: readonly Point[]) {
+  if (coupling !== 'full') return undefined
+  const method = 'elastic-continuum'
+  if (!elements)
+    refuse('method-not-applicable', '/coupling', {
+      method,
+      reason: 'coupling "full" is of the method elastic-continuum',
+    })
+  if (points.length > COUPLED)
+    refuse('method-not-applicable', '/coupling', {
+      method,
+      reason: `coupling "full" takes up to ${COUPLED} piles, ${points.length} are laid out; leave it out to superpose interaction factors`,
+    })
+  return elements.coupled(points)
 }
 
 function loadTerms(sheet: Sheet, { load }: SettlementRequest, pointer: string): CapLoadTerms {

@@ -109,6 +109,27 @@ export const bibliography = {
     year: 1978,
     basis: 'memory',
   },
+  'mindlin-1936': {
+    key: 'mindlin-1936',
+    title: 'Force at a point in the interior of a semi-infinite solid, Physics 7(5)',
+    author: 'Mindlin, R. D.',
+    year: 1936,
+    basis: 'memory',
+  },
+  'poulos-davis-1980': {
+    key: 'poulos-davis-1980',
+    title: 'Pile Foundation Analysis and Design',
+    author: 'Poulos, H. G.; Davis, E. H.',
+    year: 1980,
+    basis: 'memory',
+  },
+  'fleming-1992': {
+    key: 'fleming-1992',
+    title: 'A new method for single pile settlement prediction and analysis, Geotechnique 42(3)',
+    author: 'Fleming, W. G. K.',
+    year: 1992,
+    basis: 'memory',
+  },
 } as const satisfies Record<string, Source>
 
 export type SourceKey = keyof typeof bibliography

@@ -4,7 +4,7 @@ import type { UnitCode } from '../quantities/units.ts'
 import type { Citation } from '../sources/source.ts'
 import type { Formula, TermsOf } from './formula.ts'
 import { joined, plain } from './plain-string.ts'
-import type { OperandLine, RangeLine, Step } from './step.ts'
+import type { OperandLine, RangeLine, SolutionTable, Step } from './step.ts'
 import type { Term } from './term.ts'
 
 export type Labelled<U extends UnitCode> = { readonly symbol: string; readonly name: string; readonly unit: U }
@@ -15,6 +15,8 @@ export type Solution<U extends UnitCode> = Labelled<U> & {
   readonly unknowns: readonly { readonly symbol: string; readonly value: number; readonly unit: UnitCode }[]
   readonly residuals: readonly { readonly name: string; readonly value: number }[]
   readonly tolerance: number
+  readonly mesh?: readonly number[]
+  readonly table?: SolutionTable
   readonly source: Citation
 }
 
@@ -165,13 +167,11 @@ export class Sheet {
 
   /** Records the outcome of a numerical solve. */
   solution<const U extends UnitCode>(s: Solution<U>, id = s.symbol): Term<U> {
-    const { method, unknowns, residuals, tolerance, source } = s
+    const { method, unknowns, residuals, tolerance, mesh, table, source } = s
     return this.#combined(s, s.value, s.operands, id, {
-      kind: 'solution',
-      method,
-      unknowns,
-      residuals,
-      tolerance,
+      ...{ kind: 'solution', method, unknowns, residuals, tolerance },
+      ...(mesh && { mesh }),
+      ...(table && { table }),
       source,
     })
   }

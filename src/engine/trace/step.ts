@@ -58,7 +58,15 @@ export type SolutionStep = Line & {
   readonly unknowns: readonly { readonly symbol: string; readonly value: number; readonly unit: UnitCode }[]
   readonly residuals: readonly { readonly name: string; readonly value: number }[]
   readonly tolerance: number
+  /** Depths between the elements that were solved for, m. */
+  readonly mesh?: readonly number[]
+  readonly table?: SolutionTable
   readonly source: Citation
+}
+/** Values that the solution is read from: one symbol and unit a column, one row a line. */
+export type SolutionTable = {
+  readonly columns: readonly { readonly symbol: string; readonly unit: UnitCode }[]
+  readonly rows: readonly (readonly number[])[]
 }
 export type Step = InputStep | FormulaStep | SumStep | LookupStep | ChoiceStep | SolutionStep
 

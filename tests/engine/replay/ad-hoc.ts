@@ -59,8 +59,11 @@ const weight = formula({
   symbol: 'W',
   name: 'weight',
   unit: 'kN',
-  text: 'gamma * (V_c + kappa * I_4) + s / a_s',
-  where: { gamma: 'kN/m3', V_c: 'm3', s: 'm', a_s: 'm/kN', kappa: '1/m', I_4: 'm4' },
+  text: 'gamma * (V_c + kappa * I_4) + s / a_s + theta / b_s + theta * k_s',
+  where: {
+    ...{ gamma: 'kN/m3', V_c: 'm3', s: 'm', a_s: 'm/kN', kappa: '1/m', I_4: 'm4' },
+    ...{ theta: 'rad', b_s: '1/kN', k_s: 'kN/rad' },
+  },
   source,
 })
 
@@ -85,6 +88,9 @@ function weightTerms(sheet: Sheet) {
     a_s: given('a_s', 'm/kN', 2e-4),
     kappa: given('kappa', '1/m', 0.3),
     I_4: given('I_4', 'm4', 0.7),
+    theta: given('theta', 'rad', 0.001),
+    b_s: given('b_s', '1/kN', 4e-5),
+    k_s: given('k_s', 'kN/rad', 30_000),
   }
 }
 

@@ -10,6 +10,7 @@ const request = (layers: Layer[], rest: Partial<SettlementRequest['pile']> = {})
   pile: { section: { shape: 'circular', diameter: 0.6 }, length: 12, headDepth: 1, installation: 'bored', ...rest },
   ground: { layers },
   load: { V: 800 },
+  method: 'randolph-wroth-1978',
 })
 const run = (r: SettlementRequest) => calculateSettlement(r, { trace: true })
 const step = (r: SettlementRequest, id: string) => run(r).trace!.steps.find((s) => s.id === id)

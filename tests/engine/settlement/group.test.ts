@@ -10,6 +10,7 @@ import { groupResponse, prepareGroup } from '../../../src/engine/settlement/prep
 import { Sheet } from '../../../src/engine/trace/sheet.ts'
 
 const base: Omit<SettlementRequest, 'load'> = {
+  method: 'randolph-wroth-1978',
   pile: { section: { shape: 'circular', diameter: 0.6 }, length: 15, installation: 'bored', youngsModulus: 30e6 },
   ground: {
     layers: [
@@ -186,7 +187,7 @@ test('a prepared group answers a combination with four steps, and agrees with th
       const asked: Layout = { kind: 'points', points }
       const { group } = settle(points, load).result
       const sheet = Sheet.recording()
-      const prepared = prepareGroup(sheet, base.pile, base.ground, asked, at, () => {})
+      const prepared = prepareGroup(sheet, base.pile, base.ground, asked, at, 'randolph-wroth-1978', () => {})
       const own = terms(sheet, load)
       const before = sheet.steps.length
       const response = groupResponse(sheet.within('S1'), prepared, own)
@@ -196,7 +197,7 @@ test('a prepared group answers a combination with four steps, and agrees with th
         response.settlement.value + 1000 * (response.tiltAlongX.value * c.x + response.tiltAlongY.value * c.y)
       expect(centre / group.settlement).toBeCloseTo(1, 9)
       expect(response.tilt.value).toBeCloseTo(Math.hypot(group.tilt.alongX, group.tilt.alongY), 12)
-      const silent = prepareGroup(Sheet.silent, base.pile, base.ground, asked, at, () => {})
+      const silent = prepareGroup(Sheet.silent, base.pile, base.ground, asked, at, 'randolph-wroth-1978', () => {})
       expect(groupResponse(Sheet.silent, silent, own).settlement.value).toBe(response.settlement.value)
     }),
     { numRuns: 60 },

@@ -46,6 +46,7 @@ test.each([
       ],
     },
     load: { V: 1500 },
+    method: 'randolph-wroth-1978',
   }
   const { single } = calculateSettlement(request, { trace: false }).result
   const G = (E: number) => E / (2 * (1 + c.nu))
