@@ -536,6 +536,18 @@ export interface components {
              */
             readonly method?: "elastic-continuum" | "randolph-wroth-1978";
             /**
+             * @description hyperbolic: the pile's own springs soften towards its resistance by `methods`; gives load-settlement curves (elastic-continuum)
+             * @enum {string}
+             */
+            readonly nonlinearity?: "hyperbolic";
+            readonly failureRatio?: {
+                /** @description R_f of the shaft; left out 0.5 */
+                readonly shaft?: number | string;
+                /** @description R_f of the base; left out 0.9 */
+                readonly base?: number | string;
+            };
+            readonly methods?: components["schemas"]["MethodChoices"];
+            /**
              * @description full: every element of every pile acts on every other (elastic-continuum, up to 64 piles); left out: superposed interaction factors
              * @enum {string}
              */
@@ -550,6 +562,8 @@ export interface components {
              * @enum {string}
              */
             readonly settlementMethod?: "elastic-continuum" | "randolph-wroth-1978";
+            /** @description true: each cap also settles in the field of all others; left out: caps settle alone */
+            readonly capInteraction?: boolean;
             readonly ground: {
                 readonly [key: string]: components["schemas"]["GroundProfile"];
             };
@@ -1090,6 +1104,13 @@ export interface components {
                         /** @description mean on the element above this depth */
                         readonly shaftStress: number;
                     }[];
+                    /** @description load-settlement curve, with nonlinearity hyperbolic */
+                    readonly curve?: readonly {
+                        /** @description load */
+                        readonly load: number;
+                        /** @description settlement */
+                        readonly settlement: number;
+                    }[];
                 };
                 readonly group?: {
                     /** @description at the centroid of the piles */
@@ -1106,6 +1127,13 @@ export interface components {
                     readonly largest?: number;
                     /** @description flexible cap */
                     readonly differential?: number;
+                    /** @description load-settlement curve, with nonlinearity hyperbolic */
+                    readonly curve?: readonly {
+                        /** @description load */
+                        readonly load: number;
+                        /** @description settlement */
+                        readonly settlement: number;
+                    }[];
                     readonly piles: readonly {
                         /** @description position */
                         readonly x: number;
@@ -1244,6 +1272,8 @@ export interface components {
                 readonly kind: string;
                 readonly title: string;
                 readonly validity: string;
+                readonly theory?: string;
+                readonly errorBounds?: string;
                 readonly needs: readonly string[];
                 readonly source: {
                     readonly key: string;
@@ -1264,6 +1294,8 @@ export interface components {
                 readonly kind: string;
                 readonly title: string;
                 readonly validity: string;
+                readonly theory?: string;
+                readonly errorBounds?: string;
                 readonly needs: readonly string[];
                 readonly source: {
                     readonly key: string;

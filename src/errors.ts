@@ -329,6 +329,20 @@ export const catalogue: Readonly<Record<ErrorCode, ErrorEntry>> = {
     'Two piles would stand in one place.',
     'Increase the spacing.',
   ),
+  'piles-too-close': entry(
+    422,
+    'Piles too close for the method',
+    'The closest piles stand {spacing} m apart, less than {limit} m (1.5 diameters), which {method} cannot answer for.',
+    'Piles are taken as lines of load beside one another; closer than 1.5 diameters that is no longer so.',
+    'Increase the spacing, or ask for the settlement by randolph-wroth-1978.',
+  ),
+  'load-beyond-resistance': entry(
+    422,
+    'Load beyond the resistance',
+    'The load of {load} {unit} exceeds the {resistance} {unit} that the softening pile or group can carry.',
+    'With nonlinearity "hyperbolic" the settlement grows without limit towards the ultimate resistance.',
+    'Reduce the load, add piles, or leave nonlinearity out for the elastic settlement.',
+  ),
   'too-many-piles': entry(
     422,
     'Too many piles',

@@ -83,6 +83,10 @@ const atOrigin = z
     ),
   })
   .meta({ description: "rigid cap at the cap's origin, pressing signs: ready for a structural model" })
+const curve = z
+  .array(z.strictObject({ load: out('kN', 'load'), settlement: out('mm', 'settlement') }))
+  .optional()
+  .meta({ description: 'load-settlement curve, with nonlinearity hyperbolic' })
 const stiffness = z.strictObject({
   vertical: out('kN/m', 'vertical'),
   rockingAlongX: out('kN.m/rad', 'rocking along x; 0 where the piles cannot take it'),
@@ -106,6 +110,7 @@ export const settlementResult = z.strictObject({
       )
       .optional()
       .meta({ description: 'along the pile from the head down (elastic-continuum)' }),
+    curve,
   }),
   group: z
     .strictObject({
@@ -114,6 +119,7 @@ export const settlementResult = z.strictObject({
       tilt,
       largest: out('mm', 'flexible cap').optional(),
       differential: out('mm', 'flexible cap').optional(),
+      curve,
       piles: z.array(
         z.strictObject({
           x: out('m', 'position'),
@@ -211,7 +217,16 @@ export const problemReply = z.strictObject({
   traceId: text.optional(),
   errors: z.array(z.looseObject({ pointer: text, code: text, detail: text })).optional(),
 })
-const card = z.looseObject({ id: text, kind: text, title: text, validity: text, needs: z.array(text), source })
+const card = z.looseObject({
+  id: text,
+  kind: text,
+  title: text,
+  validity: text,
+  theory: text.optional(),
+  errorBounds: text.optional(),
+  needs: z.array(text),
+  source,
+})
 export const methodList = z.strictObject({ methods: z.array(card) })
 export const methodReply = z.strictObject({ id: text, methods: z.array(card) })
 export const sourceList = z.strictObject({ sources: z.array(source) })

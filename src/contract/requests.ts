@@ -56,6 +56,17 @@ export const settlementRequest = z.strictObject({
   }),
   cap: z.enum(['rigid', 'flexible']).optional(),
   method: settlementMethod.optional(),
+  nonlinearity: z.enum(['hyperbolic']).optional().meta({
+    description:
+      "hyperbolic: the pile's own springs soften towards its resistance by `methods`; gives load-settlement curves (elastic-continuum)",
+  }),
+  failureRatio: z
+    .strictObject({
+      shaft: quantity('1', 'R_f of the shaft; left out 0.5', { min: 0, max: 0.99 }).optional(),
+      base: quantity('1', 'R_f of the base; left out 0.9', { min: 0, max: 0.99 }).optional(),
+    })
+    .optional(),
+  methods: methodChoices.optional(),
   coupling: z.enum(['full']).optional().meta({
     description:
       'full: every element of every pile acts on every other (elastic-continuum, up to 64 piles); left out: superposed interaction factors',

@@ -57,6 +57,10 @@ export const scheduleRequest = z.strictObject({
   designBasis,
   methods: methodChoices.optional(),
   settlementMethod: settlementMethod.optional(),
+  capInteraction: z
+    .boolean()
+    .optional()
+    .meta({ description: 'true: each cap also settles in the field of all others; left out: caps settle alone' }),
   ground: named(groundProfile),
   pileTypes: named(pileType),
   caps: z.array(cap).min(1).max(limits.caps),

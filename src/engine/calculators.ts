@@ -6,6 +6,7 @@ import { group, sumOfPilesFormula } from './resistance/group.ts'
 import { calculatorPlaces, type ResistanceJob } from './resistance/job.ts'
 import { type PileTerms, singlePile } from './resistance/single-pile.ts'
 import { settlement } from './settlement/settlement.ts'
+import type { UltimateTerms } from './settlement/softening.ts'
 import { type Plain, settleTerms, traceOf } from './trace/outcome.ts'
 import { plainTexts } from './trace/plain-string.ts'
 import { Sheet } from './trace/sheet.ts'
@@ -99,5 +100,18 @@ export const calculateGroup = (request: GroupRequest, option: TraceOption) =>
 
 const settlementPlaces = { pile: '/pile', ground: '/ground', layout: '/layout', load: '/load' }
 
+/** What the pile can carry at most, where its springs soften towards it. */
+function ultimateOf(sheet: Sheet, request: SettlementRequest, notice: (n: Notice) => void): UltimateTerms | undefined {
+  if (!request.nonlinearity) return undefined
+  const { pile, ground, methods, load } = request
+  const terms = singlePile(
+    sheet.within('resistance'),
+    jobOf({ pile, ground, methods, direction: load.V < 0 ? 'uplift' : 'compression' }, notice),
+  )
+  return { layers: terms.layers, shaft: terms.shaftResistance, base: terms.baseResistance }
+}
+
 export const calculateSettlement = (request: SettlementRequest, option: TraceOption) =>
-  answer(option, (sheet, notice) => settlement(sheet, request, settlementPlaces, notice))
+  answer(option, (sheet, notice) =>
+    settlement(sheet, request, settlementPlaces, notice, ultimateOf(sheet, request, notice)),
+  )

@@ -13,6 +13,8 @@ export type FaultCode =
   | 'toe-in-uncovered-soil'
   | 'section-impossible'
   | 'piles-overlap'
+  | 'piles-too-close'
+  | 'load-beyond-resistance'
   | 'too-many-piles'
   | 'unknown-reference'
   | 'duplicate-mark'

@@ -23,4 +23,8 @@ export type SettlementRequest = {
   readonly method?: SettlementMethod
   /** `full` lets every element of every pile act on every other, up to 64 piles; left out: superposed interaction factors. */
   readonly coupling?: 'full'
+  /** `hyperbolic`: the pile's own springs soften towards its resistance by `methods`. */
+  readonly nonlinearity?: 'hyperbolic'
+  readonly failureRatio?: { readonly shaft?: number; readonly base?: number }
+  readonly methods?: MethodChoices
 }

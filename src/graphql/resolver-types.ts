@@ -102,6 +102,18 @@ export type SettlementRequestInput = {
   readonly method?: InputMaybe<Scalars['String']['input']>;
   /** full: every element of every pile acts on every other (elastic-continuum, up to 64 piles). Default: superposed interaction factors. */
   readonly coupling?: InputMaybe<Scalars['String']['input']>;
+  /** hyperbolic: the pile's own springs soften towards its resistance by `methods` (elastic-continuum). */
+  readonly nonlinearity?: InputMaybe<Scalars['String']['input']>;
+  readonly failureRatio?: InputMaybe<FailureRatioInput>;
+  /** Of the resistance that a softening pile tends to. */
+  readonly methods?: InputMaybe<MethodChoicesInput>;
+};
+
+export type FailureRatioInput = {
+  /** R_f of the shaft. Default 0.5. */
+  readonly shaft?: InputMaybe<Scalars['Quantity']['input']>;
+  /** R_f of the base. Default 0.9. */
+  readonly base?: InputMaybe<Scalars['Quantity']['input']>;
 };
 
 export type PileTypeInput = {
@@ -427,6 +439,16 @@ export type SinglePileSettlement = {
   readonly baseLoadShare: Scalars['Float']['output'];
   /** Along the pile from the head down (elastic-continuum). */
   readonly axial?: Maybe<ReadonlyArray<AxialLoad>>;
+  /** With nonlinearity hyperbolic. */
+  readonly curve?: Maybe<ReadonlyArray<CurvePoint>>;
+};
+
+export type CurvePoint = {
+  readonly __typename?: 'CurvePoint';
+  /** kN */
+  readonly load: Scalars['Float']['output'];
+  /** mm */
+  readonly settlement: Scalars['Float']['output'];
 };
 
 export type AxialLoad = {
@@ -453,6 +475,8 @@ export type GroupSettlement = {
   readonly largest?: Maybe<Scalars['Float']['output']>;
   /** mm, of a flexible cap */
   readonly differential?: Maybe<Scalars['Float']['output']>;
+  /** At the centroid, the load growing in proportion; with nonlinearity hyperbolic under a rigid cap. */
+  readonly curve?: Maybe<ReadonlyArray<CurvePoint>>;
 };
 
 export type Tilt = {
@@ -611,6 +635,10 @@ export type Method = {
   readonly parameters: ReadonlyArray<MethodParameter>;
   readonly formulas: ReadonlyArray<MethodFormula>;
   readonly validity: Scalars['String']['output'];
+  /** How it works, where the formulas alone do not tell. */
+  readonly theory?: Maybe<Scalars['String']['output']>;
+  /** How far from the truth it is known to lie. */
+  readonly errorBounds?: Maybe<Scalars['String']['output']>;
   readonly source: Source;
 };
 
@@ -750,6 +778,7 @@ export type ResolversTypes = {
   SinglePileRequestInput: SinglePileRequestInput;
   GroupRequestInput: GroupRequestInput;
   SettlementRequestInput: SettlementRequestInput;
+  FailureRatioInput: FailureRatioInput;
   PileTypeInput: PileTypeInput;
   SectionResistanceInput: SectionResistanceInput;
   SectionInput: SectionInput;
@@ -779,6 +808,7 @@ export type ResolversTypes = {
   Int: ResolverTypeWrapper<Scalars['Int']['output']>;
   SettlementResult: ResolverTypeWrapper<SettlementResult>;
   SinglePileSettlement: ResolverTypeWrapper<SinglePileSettlement>;
+  CurvePoint: ResolverTypeWrapper<CurvePoint>;
   AxialLoad: ResolverTypeWrapper<AxialLoad>;
   GroupSettlement: ResolverTypeWrapper<GroupSettlement>;
   Tilt: ResolverTypeWrapper<Tilt>;
@@ -813,6 +843,7 @@ export type ResolversParentTypes = {
   SinglePileRequestInput: SinglePileRequestInput;
   GroupRequestInput: GroupRequestInput;
   SettlementRequestInput: SettlementRequestInput;
+  FailureRatioInput: FailureRatioInput;
   PileTypeInput: PileTypeInput;
   SectionResistanceInput: SectionResistanceInput;
   SectionInput: SectionInput;
@@ -842,6 +873,7 @@ export type ResolversParentTypes = {
   Int: Scalars['Int']['output'];
   SettlementResult: SettlementResult;
   SinglePileSettlement: SinglePileSettlement;
+  CurvePoint: CurvePoint;
   AxialLoad: AxialLoad;
   GroupSettlement: GroupSettlement;
   Tilt: Tilt;
@@ -1001,6 +1033,12 @@ export type SinglePileSettlementResolvers<ContextType = MercuriusContext, Parent
   influenceFactor?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   baseLoadShare?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   axial?: Resolver<Maybe<ReadonlyArray<ResolversTypes['AxialLoad']>>, ParentType, ContextType>;
+  curve?: Resolver<Maybe<ReadonlyArray<ResolversTypes['CurvePoint']>>, ParentType, ContextType>;
+};
+
+export type CurvePointResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['CurvePoint'] = ResolversParentTypes['CurvePoint']> = {
+  load?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
+  settlement?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
 };
 
 export type AxialLoadResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['AxialLoad'] = ResolversParentTypes['AxialLoad']> = {
@@ -1017,6 +1055,7 @@ export type GroupSettlementResolvers<ContextType = MercuriusContext, ParentType 
   stiffness?: Resolver<ResolversTypes['GroupStiffness'], ParentType, ContextType>;
   largest?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
   differential?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
+  curve?: Resolver<Maybe<ReadonlyArray<ResolversTypes['CurvePoint']>>, ParentType, ContextType>;
 };
 
 export type TiltResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['Tilt'] = ResolversParentTypes['Tilt']> = {
@@ -1132,6 +1171,8 @@ export type MethodResolvers<ContextType = MercuriusContext, ParentType extends R
   parameters?: Resolver<ReadonlyArray<ResolversTypes['MethodParameter']>, ParentType, ContextType>;
   formulas?: Resolver<ReadonlyArray<ResolversTypes['MethodFormula']>, ParentType, ContextType>;
   validity?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  theory?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
+  errorBounds?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
   source?: Resolver<ResolversTypes['Source'], ParentType, ContextType>;
 };
 
@@ -1185,6 +1226,7 @@ export type Resolvers<ContextType = MercuriusContext> = {
   GroupResult?: GroupResultResolvers<ContextType>;
   SettlementResult?: SettlementResultResolvers<ContextType>;
   SinglePileSettlement?: SinglePileSettlementResolvers<ContextType>;
+  CurvePoint?: CurvePointResolvers<ContextType>;
   AxialLoad?: AxialLoadResolvers<ContextType>;
   GroupSettlement?: GroupSettlementResolvers<ContextType>;
   Tilt?: TiltResolvers<ContextType>;

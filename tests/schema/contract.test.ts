@@ -117,7 +117,7 @@ describe('the typed client', () => {
     const client = kentledge({ baseUrl })
     const { result } = await client.singlePile(single, { trace: 'none' })
     expect(result.ultimateResistance).toBeGreaterThan(0)
-    expect((await client.methods()).methods.length).toBe(23)
+    expect((await client.methods()).methods.length).toBe(25)
   })
 
   test('turns a problem into an error with its faults', async () => {

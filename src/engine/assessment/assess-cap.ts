@@ -2,6 +2,7 @@ import { limitStateFor } from '../design-basis/design-resistance.ts'
 import { practice } from '../sources/bibliography.ts'
 import { Sheet } from '../trace/sheet.ts'
 import type { Term } from '../trace/term.ts'
+import type { CapField } from './cap-field.ts'
 import { type CapActions, capActions } from './cap-loads.ts'
 import { settlementCheck, tiltCheck } from './checks/serviceability.ts'
 import type { Demand, LoadedCap, StrengthCheck, StrengthKind } from './checks/strength-check.ts'
@@ -38,6 +39,7 @@ export function assessCap(
   set: ResistanceSet,
   rows: readonly Row[],
   every: boolean,
+  field?: CapField,
 ) {
   const sheet = root.within(`caps/${idPart(cap.mark)}`)
   const label = { symbol: 'W_c', name: 'weight of the cap', unit: 'kN' } as const
@@ -69,10 +71,9 @@ export function assessCap(
       },
     ]
   })
-  const service = rows.some((r) => r.limitState === 'serviceability') ? 'serviceability' : 'working'
-  const settlement = rows
-    .filter((r) => r.limitState === service)
-    .map(({ row, index: at }) => settleCap(sheet, set, schedule.loads, at, row, weight))
+  const settlement = serviceRows(rows).map(({ row, index: at }) =>
+    settleCap(sheet, set, schedule.loads, at, row, weight, field?.(index, row.combination)),
+  )
   const limits = schedule.limits ?? {}
   const limited =
     settlement.length === 0
@@ -91,6 +92,12 @@ export function assessCap(
             : [{ check: 'tilt' as const, ...tiltCheck(sheet.within('tilt'), settlement, limits.tilt) }]),
         ].map((c): CheckTerms => ({ ...c, satisfied: c.utilisation.value <= 1 }))
   return { settlement, checks: [...checks, ...limited] }
+}
+
+/** Rows that a cap settles under: serviceability ones, or working ones where there are none. */
+export function serviceRows(rows: readonly Row[]): readonly Row[] {
+  const service = rows.some((r) => r.limitState === 'serviceability') ? 'serviceability' : 'working'
+  return rows.filter((r) => r.limitState === service)
 }
 
 function compare(check: StrengthCheck, row: Row, at: LoadedCap): Compared[] {

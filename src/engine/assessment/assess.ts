@@ -4,11 +4,10 @@ import { statics } from '../sources/bibliography.ts'
 import { formula } from '../trace/formula.ts'
 import { settleTerms, traceOf } from '../trace/outcome.ts'
 import { Sheet } from '../trace/sheet.ts'
-import type { Term } from '../trace/term.ts'
-import { assessCap, type Row } from './assess-cap.ts'
+import { assessCap, type Row, serviceRows } from './assess-cap.ts'
+import { capField } from './cap-field.ts'
 import { utilisationRatio } from './checks/serviceability.ts'
 import { neighbourPairs } from './neighbours.ts'
-import { idPart } from './places.ts'
 import { type ResistanceSet, resistanceSet } from './resistance-set.ts'
 import type { Cap, Schedule } from './schedule.ts'
 import { refuseFaults } from './schedule-faults.ts'
@@ -65,12 +64,19 @@ export function assess(schedule: Schedule, options: AssessOptions) {
   for (const [index, row] of schedule.loads.rows.entries()) {
     rowsOf.get(row.cap)!.push({ index, row, limitState: schedule.loads.combinations[row.combination]!.limitState })
   }
-  const assessed = schedule.caps.map((cap, index): Assessed => {
+  const setOf = schedule.caps.map((cap, index) => {
     const key = JSON.stringify([cap.pileType, cap.ground, cap.layout, cap.mark === alone])
-    const sheet = sheetOf(cap)
-    const set = sets.get(key) ?? resistanceSet(sheet, schedule, cap, index, sets.size + 1)
+    const set = sets.get(key) ?? resistanceSet(sheetOf(cap), schedule, cap, index, sets.size + 1)
     sets.set(key, set)
-    return { cap, set, ...assessCap(sheet, schedule, cap, index, set, rowsOf.get(cap.mark)!, cap.mark === alone) }
+    return set
+  })
+  const field = schedule.capInteraction
+    ? capField(schedule, setOf, [...rowsOf.values()].flatMap(serviceRows))
+    : undefined
+  const assessed = schedule.caps.map((cap, index): Assessed => {
+    const set = setOf[index]!
+    const rows = rowsOf.get(cap.mark)!
+    return { cap, set, ...assessCap(sheetOf(cap), schedule, cap, index, set, rows, cap.mark === alone, field) }
   })
   const common = alone === undefined ? book : Sheet.silent
   const tree = {
@@ -82,13 +88,20 @@ export function assess(schedule: Schedule, options: AssessOptions) {
       block: set.block,
       checks,
       settlement,
-      stiffness: stiffness(sheetOf(cap), cap, set),
+      stiffness: set.stiffness,
       notices: set.notices,
     })),
     neighbours: neighbours(common, schedule, assessed),
   }
   const { result, links } = settleTerms(tree)
   const notices: Notice[] = [usualCautions]
+  if (field && sets.size > 1)
+    notices.push({
+      code: 'approximation',
+      level: 'info',
+      pointer: '/capInteraction',
+      text: 'Between caps on different piles or ground the interaction of two piles is the mean of what either gives alone.',
+    })
   return { result, notices, ...(options.trace && { trace: traceOf(book, links) }) }
 }
 
@@ -109,33 +122,6 @@ function summary(sheet: Sheet, assessed: readonly Assessed[]) {
     satisfied: count('n_s', 'caps with every check satisfied', good),
     exceeded: count('n_e', 'caps with a check exceeded', assessed.length - good),
     worst,
-  }
-}
-
-function stiffness(sheet: Sheet, cap: Cap, set: ResistanceSet) {
-  const here = sheet.within(`caps/${idPart(cap.mark)}/stiffness`)
-  const { f, r_x, r_y } = set.prepared.flexibility
-  const term = <const U extends 'kN/m' | 'kN.m/rad'>(symbol: string, name: string, unit: U, i: number): Term<U> => {
-    const own = set.prepared.elastic.flexibility[i * 4]!
-    const value = own > 0 ? 1 / own : 0
-    return here.solution({
-      symbol,
-      name,
-      unit,
-      value,
-      method: 'inverse of the flexibility about the centroid of the piles',
-      operands: [f, r_x, r_y, set.prepared.stiffness],
-      unknowns: [{ symbol, value, unit }],
-      residuals: [{ name: 'stiffness times flexibility, less 1', value: own > 0 ? Math.abs(value * own - 1) : 0 }],
-      tolerance: 1e-9,
-      source: statics('inverse of the plane flexibility'),
-    })
-  }
-  return {
-    vertical: term('K_v', 'vertical stiffness', 'kN/m', 0),
-    rockingAlongX: term('K_rx', 'rocking stiffness along x', 'kN.m/rad', 1),
-    rockingAlongY: term('K_ry', 'rocking stiffness along y', 'kN.m/rad', 2),
-    atOrigin: set.matrices,
   }
 }
 

@@ -6,7 +6,7 @@ import type { BlockTerms } from '../resistance/block.ts'
 import { group, sumOfPilesFormula } from '../resistance/group.ts'
 import type { GroupJob } from '../resistance/job.ts'
 import type { PileTerms } from '../resistance/single-pile.ts'
-import { capMatrices } from '../settlement/cap-matrices.ts'
+import { capStiffness } from '../settlement/cap-stiffness.ts'
 import { type PreparedGroup, prepareGroup } from '../settlement/prepared-group.ts'
 import { plainTexts } from '../trace/plain-string.ts'
 import type { Sheet } from '../trace/sheet.ts'
@@ -30,7 +30,7 @@ export type ResistanceSet = {
   readonly statics: RigidCap
   readonly plan: PilePlan
   readonly prepared: PreparedGroup
-  readonly matrices: ReturnType<typeof capMatrices>
+  readonly stiffness: ReturnType<typeof capStiffness>
   readonly notices: readonly Notice[]
 }
 
@@ -106,7 +106,7 @@ export function resistanceSet(root: Sheet, schedule: Schedule, cap: Cap, index: 
     statics: rigidCap(points),
     plan: pilePlan(sheet.within('plan'), cap.layout, at.layout, compression.terms.pileCount),
     prepared,
-    matrices: capMatrices(sheet.within('settlement'), prepared),
+    stiffness: capStiffness(sheet.within('settlement'), prepared),
     get notices() {
       return [...notices.values()]
     },

@@ -52,6 +52,8 @@ export type Schedule = {
   readonly designBasis: DesignBasis
   readonly methods?: MethodChoices
   readonly settlementMethod?: SettlementMethod
+  /** Each cap also settles in the field of all others. */
+  readonly capInteraction?: boolean
   readonly ground: Readonly<Record<string, GroundProfile>>
   readonly pileTypes: Readonly<Record<string, PileType>>
   readonly caps: readonly Cap[]

@@ -19,7 +19,7 @@ export type Parameter = {
 /** The shape that every resistance method has in common; the catalogue prints it. */
 export type MethodCard = {
   readonly id: string
-  readonly kind: 'cohesive-shaft' | 'cohesive-base' | 'granular-shaft' | 'granular-base'
+  readonly kind: 'cohesive-shaft' | 'cohesive-base' | 'granular-shaft' | 'granular-base' | 'settlement'
   readonly title: string
   readonly installations: readonly Installation[]
   /** Layer parameters that the method needs, by their field names. */
@@ -27,6 +27,10 @@ export type MethodCard = {
   readonly parameters: Readonly<Record<string, Parameter>>
   readonly formulas: readonly Formula[]
   readonly validity: string
+  /** How it works, where the formulas alone do not tell. */
+  readonly theory?: string
+  /** How far from the truth it is known to lie. */
+  readonly errorBounds?: string
   /** The source key of the method itself (not of auxiliary formulas). */
   readonly source: string
 }

@@ -4,12 +4,14 @@ import { practice, statics } from '../sources/bibliography.ts'
 import { formula } from '../trace/formula.ts'
 import type { Sheet } from '../trace/sheet.ts'
 import type { Term } from '../trace/term.ts'
-import { capMatrices } from './cap-matrices.ts'
+import { capStiffness } from './cap-stiffness.ts'
 import type { CoupledPiles } from './continuum/coupled-piles.ts'
 import { type ElasticGroup, elasticGroup, type Plane, superposed } from './group.ts'
 import type { PilePlace } from './pile-places.ts'
 import type { PileResponse } from './pile-response.ts'
 import { type CapLoadTerms, groupResponse, type PreparedGroup, prepareFrom } from './prepared-group.ts'
+import { groupCurve, softPlane, softSettlements } from './soft-group.ts'
+import { curveTerms, type Softening } from './softening.ts'
 
 export const planeSettlement = formula({
   symbol: 's',
@@ -62,6 +64,7 @@ export type GroupJob = {
   readonly n: Term<'1'>
   readonly load: CapLoadTerms
   readonly coupled: CoupledPiles | undefined
+  readonly soft: Softening | undefined
   /** Place of the load in the request. */
   readonly pointer: string
 }
@@ -84,17 +87,56 @@ export function groupSettlement(sheet: Sheet, job: GroupJob) {
     tilt,
     ...spread,
     piles: job.places.map((p, i) => ({ x: p.x, y: p.y, ...piles[i]! })),
-    stiffness: { ...capStiffness(sheet, job, prepared), atOrigin: capMatrices(sheet, prepared) },
+    curve: job.soft && groupCurveTerms(sheet, job, prepared, job.soft),
+    stiffness: capStiffness(sheet, prepared),
+  }
+}
+
+/** How a rigid cap moves, and the loads of its piles. */
+function movement(sheet: Sheet, job: GroupJob, prepared: PreparedGroup) {
+  const { load, pile, soft, pointer } = job
+  const { elastic } = prepared
+  const asked = { V: load.V.value, Mx: load.Mx.value, My: load.My.value }
+  if (!soft) {
+    const response = groupResponse(sheet, prepared, load, pointer)
+    const plane = elastic.plane(asked, pointer)
+    const { settlement: s_o, tiltAlongX: theta_x, tiltAlongY: theta_y } = response
+    return { s_o, theta_x, theta_y, plane, loads: elastic.pileLoads(plane), method: SOLVE }
+  }
+  const { plane, loads, residual } = softPlane(elastic, pile, soft, asked, pointer)
+  const { x, y } = elastic.centroid
+  const method = 'rigid plane on softening piles, elastic between them; Newton'
+  const term = <const U extends 'mm' | '1'>(symbol: string, name: string, unit: U, value: number) =>
+    sheet.solution({
+      symbol,
+      name,
+      unit,
+      value,
+      method,
+      operands: [load.V, load.Mx, load.My, ...soft.operands, ...prepared.basis],
+      unknowns: unknownsOf(plane),
+      residuals: [{ name: 'change of the last step, relative', value: residual }],
+      tolerance: 1e-6,
+      source: pile.source,
+    })
+  return {
+    s_o: term(
+      's_o',
+      'settlement of the cap at its origin',
+      'mm',
+      1000 * (plane.centre - plane.alongX * x - plane.alongY * y),
+    ),
+    theta_x: term('theta_x', 'tilt along x', '1', plane.alongX),
+    theta_y: term('theta_y', 'tilt along y', '1', plane.alongY),
+    plane,
+    loads,
+    method,
   }
 }
 
 function rigid(sheet: Sheet, job: GroupJob, prepared: PreparedGroup) {
   const { places, load, n, pile } = job
-  const { elastic } = prepared
-  const response = groupResponse(sheet, prepared, load, job.pointer)
-  const { settlement: s_o, tiltAlongX: theta_x, tiltAlongY: theta_y } = response
-  const plane = elastic.plane({ V: load.V.value, Mx: load.Mx.value, My: load.My.value }, job.pointer)
-  const loads = elastic.pileLoads(plane)
+  const { s_o, theta_x, theta_y, plane, loads, method } = movement(sheet, job, prepared)
   const residuals = equilibrium(loads, job)
   const piles = places.map(({ x, y }, i) => ({
     load: sheet.solution(
@@ -103,7 +145,7 @@ function rigid(sheet: Sheet, job: GroupJob, prepared: PreparedGroup) {
         name: `load of pile ${i + 1}`,
         unit: 'kN',
         value: loads[i]!,
-        method: SOLVE,
+        method,
         operands: [load.V, load.Mx, load.My, pile.stiffness, ...prepared.basis],
         unknowns: unknownsOf(plane),
         residuals,
@@ -133,11 +175,24 @@ function rigid(sheet: Sheet, job: GroupJob, prepared: PreparedGroup) {
   }
 }
 
+/** Load-settlement curve of the group under a rigid cap. */
+function groupCurveTerms(
+  sheet: Sheet,
+  { pile, load, cap }: GroupJob,
+  { elastic, basis }: PreparedGroup,
+  soft: Softening,
+) {
+  if (cap === 'flexible') return undefined
+  const asked = { V: load.V.value, Mx: load.Mx.value, My: load.My.value }
+  return curveTerms(sheet.within('curve'), groupCurve(elastic, pile, soft, asked), [...soft.operands, ...basis])
+}
+
 /** A flexible cap hands each pile its share by statics; the tilt is that of the plane that fits the settlements best. */
 function flexible(sheet: Sheet, job: GroupJob, { elastic, basis }: PreparedGroup) {
   const { pile, n } = job
   const loads = pileLoads(sheet.within('statics'), job.places, n, job.load, job.pointer)
-  const settled = elastic.settlements(Float64Array.from(loads, (p) => p.value))
+  const given = Float64Array.from(loads, (p) => p.value)
+  const settled = job.soft ? softSettlements(elastic, pile, job.soft, given) : elastic.settlements(given)
   const fit = bestPlane(elastic, settled)
   const solution = <const U extends 'mm' | '1'>(
     symbol: string,
@@ -211,31 +266,6 @@ function bestPlane({ points, centroid }: ElasticGroup, settled: Float64Array): {
   const My = total((i) => points[i]!.x - centroid.x)
   const Mx = total((i) => points[i]!.y - centroid.y)
   return { alongX: F[4]! * My + F[5]! * Mx, alongY: F[7]! * My + F[8]! * Mx }
-}
-
-function capStiffness(sheet: Sheet, { pile }: GroupJob, { elastic, flexibility }: PreparedGroup) {
-  const f = elastic.flexibility
-  const term = <const U extends 'kN/m' | 'kN.m/rad'>(symbol: string, name: string, unit: U, i: number) => {
-    const own = f[i * 4]!
-    const value = own > 0 ? 1 / own : 0
-    return sheet.solution({
-      symbol,
-      name,
-      unit,
-      value,
-      method: SOLVE,
-      operands: [flexibility.f, flexibility.r_x, flexibility.r_y, pile.stiffness],
-      unknowns: [{ symbol, value, unit }],
-      residuals: [{ name: 'stiffness times flexibility, less 1', value: own > 0 ? Math.abs(value * own - 1) : 0 }],
-      tolerance: TOLERANCE,
-      source: pile.source,
-    })
-  }
-  return {
-    vertical: term('K_v', 'vertical stiffness of the cap at the centroid of the piles', 'kN/m', 0),
-    rockingAlongX: term('K_rx', 'rocking stiffness along x about the centroid', 'kN.m/rad', 1),
-    rockingAlongY: term('K_ry', 'rocking stiffness along y about the centroid', 'kN.m/rad', 2),
-  }
 }
 
 const unknownsOf = (plane: Plane) => [

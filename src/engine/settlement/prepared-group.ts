@@ -8,6 +8,7 @@ import { statics } from '../sources/bibliography.ts'
 import { formula } from '../trace/formula.ts'
 import type { Sheet } from '../trace/sheet.ts'
 import type { Term } from '../trace/term.ts'
+import { assertSpacing } from './assert-spacing.ts'
 import type { CoupledPiles } from './continuum/coupled-piles.ts'
 import { type ElasticGroup, elasticGroup, type PileAnswers, superposed } from './group.ts'
 import type { PileResponse, SettlementPlaces } from './pile-response.ts'
@@ -96,6 +97,7 @@ export function prepareGroup(
   notice: (n: Notice) => void,
 ): PreparedGroup {
   const response = pileResponse(sheet, method, pile, ground, at, notice)
+  assertSpacing(response, smallestSpacing(positions(layout), 0, at.layout), at.layout)
   return prepareFrom(sheet.within('group'), response, layout, at.load)
 }
 

@@ -8,11 +8,13 @@ import { formula } from '../trace/formula.ts'
 import type { Sheet } from '../trace/sheet.ts'
 import type { Term } from '../trace/term.ts'
 import { alongPile } from './along-pile.ts'
+import { assertSpacing } from './assert-spacing.ts'
 import { groupSettlement } from './group-settlement.ts'
 import { pilePlaces } from './pile-places.ts'
 import type { PileResponse, SettlementPlaces } from './pile-response.ts'
 import type { CapLoadTerms } from './prepared-group.ts'
 import { pileResponse } from './settlement-method.ts'
+import { curveTerms, softening, type UltimateTerms } from './softening.ts'
 
 export const loadPerPile = formula({
   symbol: 'P',
@@ -45,6 +47,7 @@ export function settlement(
   request: SettlementRequest,
   at: SettlementPlaces,
   notice: (n: Notice) => void,
+  resistance: UltimateTerms | undefined,
 ) {
   const pile = pileResponse(sheet, request.method, request.pile, request.ground, at, notice)
   const load = loadTerms(sheet, request, at.load)
@@ -54,8 +57,10 @@ export function settlement(
     ? sheet.input(label, places.length, at.layout)
     : sheet.assumed(label, 1, 'no layout was given: one pile', practice('single pile'))
   const P = sheet.step(loadPerPile, { V: load.V, n })
-  const s = sheet.step(headSettlement, { P, k: pile.stiffness })
-  const axial = alongPile(sheet.within('axial'), pile, P)
+  const soft = resistance && softening(sheet, request, pile, resistance)
+  const s = soft ? soft.settle(P, `${at.load}/V`) : sheet.step(headSettlement, { P, k: pile.stiffness })
+  // Shares of the load along the pile are those of the elastic solution; a softening pile sheds load downwards as it slips.
+  const axial = soft ? undefined : alongPile(sheet.within('axial'), pile, P)
   const single = {
     load: P,
     settlement: s,
@@ -63,10 +68,12 @@ export function settlement(
     baseLoadShare: pile.baseLoadShare,
     influenceFactor: sheet.step(influenceFactorOf, { E_s: pile.toeModulus, d: pile.width, k: pile.stiffness }),
     ...(axial && { axial }),
+    ...(soft && { curve: curveTerms(sheet.within('curve'), soft.curve, soft.operands) }),
   }
   if (!request.layout || !places) return { single }
   const points = places.map((p) => ({ x: p.x.value, y: p.y.value }))
-  smallestSpacing(points, pile.width.value, at.layout)
+  const spacing = smallestSpacing(points, pile.width.value, at.layout)
+  assertSpacing(pile, spacing, at.layout)
   return {
     single,
     group: groupSettlement(sheet.within('group'), {
@@ -78,6 +85,7 @@ export function settlement(
       n,
       load,
       coupled: coupledPiles(request, pile, points),
+      soft,
       pointer: at.load,
     }),
   }
@@ -86,8 +94,17 @@ export function settlement(
 /** So many piles may be coupled element by element. */
 const COUPLED = 64
 
-function coupledPiles({ coupling }: SettlementRequest, { elements }: PileResponse, points: readonly Point[]) {
+function coupledPiles(
+  { coupling, nonlinearity }: SettlementRequest,
+  { elements }: PileResponse,
+  points: readonly Point[],
+) {
   if (coupling !== 'full') return undefined
+  if (nonlinearity)
+    refuse('method-not-applicable', '/coupling', {
+      method: 'elastic-continuum',
+      reason: 'coupling "full" is elastic throughout: leave out nonlinearity or coupling',
+    })
   const method = 'elastic-continuum'
   if (!elements)
     refuse('method-not-applicable', '/coupling', {

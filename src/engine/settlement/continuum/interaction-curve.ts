@@ -21,7 +21,7 @@ export function interactionAt(pile: SolvedPile, spacing: number): number {
   return pile.stiffness / stiffness - 1
 }
 
-/** The curve on a log-spaced grid; between its nodes a cubic spline of spacing times factor over ln(spacing). Beyond the last it falls as 1/s. */
+/** The curve on a log-spaced grid; between its nodes a cubic spline of spacing times factor over ln(spacing). Beyond the last it falls as 1/s; closer than a diameter it stays. */
 export function interactionCurve(pile: SolvedPile, nodes = NODES): InteractionCurve {
   const { radius, toe } = pile.soil.pile
   const least = 2 * radius
@@ -36,7 +36,8 @@ export function interactionCurve(pile: SolvedPile, nodes = NODES): InteractionCu
     alpha,
     at: (s) => {
       const place = Math.log(s / least) / step
-      return (place >= nodes - 1 ? last : spline(Math.max(0, place))) / s
+      if (place >= nodes - 1) return last / s
+      return place <= 0 ? alpha[0]! : spline(place) / s
     },
   }
 }

@@ -42,7 +42,7 @@ const units = [
  * Flexibility and stiffness of a rigid cap at its origin, symmetric 3 x 3: V, My, Mx (kN, kN.m) against settlement (m), slope along x,
  * slope along y (rad). Ready for a structural model. Rows that a single pile or a line of piles cannot take are 0 in both.
  */
-export function capMatrices(sheet: Sheet, { flexibility, stiffness: k }: PreparedGroup) {
+function capMatrices(sheet: Sheet, { flexibility, stiffness: k }: PreparedGroup) {
   const { f, a_x, a_y, r_x, e_x, c_x, r_y, e_y, c_y } = flexibility
   const here = sheet.within('matrix')
   const F: Term[][] = [
@@ -108,4 +108,34 @@ function degenerate(a: Float64Array, n: number): boolean {
   factor(l, n)
   for (let i = 0; i < n; i++) if (l[i * n + i]! ** 2 < 1e-10) return true
   return false
+}
+
+/**
+ * Stiffness of a rigid cap: about the centroid of the piles, each component acting alone (0: it cannot be taken), and as matrices at the
+ * cap's origin.
+ */
+export function capStiffness(sheet: Sheet, prepared: PreparedGroup) {
+  const { flexibility, elastic, stiffness: k } = prepared
+  const term = <const U extends 'kN/m' | 'kN.m/rad'>(symbol: string, name: string, unit: U, i: number) => {
+    const own = elastic.flexibility[i * 4]!
+    const value = own > 0 ? 1 / own : 0
+    return sheet.solution({
+      symbol,
+      name,
+      unit,
+      value,
+      method: 'inverse of the flexibility about the centroid of the piles',
+      operands: [flexibility.f, flexibility.r_x, flexibility.r_y, k],
+      unknowns: [{ symbol, value, unit }],
+      residuals: [{ name: 'stiffness times flexibility, less 1', value: own > 0 ? Math.abs(value * own - 1) : 0 }],
+      tolerance: 1e-9,
+      source,
+    })
+  }
+  return {
+    vertical: term('K_v', 'vertical stiffness of the cap at the centroid of the piles', 'kN/m', 0),
+    rockingAlongX: term('K_rx', 'rocking stiffness along x about the centroid', 'kN.m/rad', 1),
+    rockingAlongY: term('K_ry', 'rocking stiffness along y about the centroid', 'kN.m/rad', 2),
+    atOrigin: capMatrices(sheet, prepared),
+  }
 }
