@@ -7,6 +7,7 @@ const parts: Readonly<Record<string, () => Promise<readonly Finding[]>>> = {
   b: async () => (await import('./trace-cost.ts')).traceCost(),
   c: async () => (await import('./assessment-cost.ts')).assessmentCost(),
   d: async () => (await import('./formula-step.ts')).formulaStep(),
+  h: async () => (await import('./continuum.ts')).continuum(),
   e: async () => [
     ...(await (await import('./probe-under-load.ts')).probeUnderLoad()),
     ...(await (await import('./overload.ts')).overload()),

@@ -15,6 +15,9 @@ export class LocalInverse {
   readonly #values: Float64Array
   readonly #counts: Int32Array
   readonly #inner: Float64Array
+  readonly #local = new Float64Array(NEIGHBOURS * NEIGHBOURS)
+  readonly #side = new Float64Array(NEIGHBOURS)
+  readonly #given = new Float64Array(NEIGHBOURS)
   /** False when the matrix is not positive definite. */
   readonly definite: boolean
 
@@ -52,13 +55,13 @@ export class LocalInverse {
 
   #row(i: number, near: Int32Array, count: number, entry: (i: number, j: number) => number): boolean {
     const width = NEIGHBOURS + 1
-    const local = new Float64Array(count * count)
-    const b = new Float64Array(count)
+    const local = this.#local
+    const b = this.#side
+    const given = this.#given
     for (let r = 0; r < count; r++) {
-      b[r] = entry(i, near[r]!)
-      for (let c = 0; c <= r; c++) local[r * count + c] = local[c * count + r] = entry(near[r]!, near[c]!)
+      b[r] = given[r] = entry(i, near[r]!)
+      for (let c = 0; c <= r; c++) local[r * count + c] = entry(near[r]!, near[c]!)
     }
-    const given = Float64Array.from(b)
     if (count > 0 && !factor(local, count)) return false
     solveFactored(local, count, b)
     let rest = entry(i, i)

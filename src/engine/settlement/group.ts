@@ -36,7 +36,7 @@ export type PileAnswers = {
 }
 
 /** From so many piles on the interaction comes from a table. */
-const TABLED = 120
+const TABLED = 48
 
 /** Piles that act on each other by superposed interaction factors: stiffness of one pile (kN/m) and the factor at a spacing. */
 export function superposed(
@@ -45,7 +45,8 @@ export function superposed(
   interaction: (s: number) => number,
 ): PileAnswers {
   const factorAt = points.length > TABLED ? tabled(points, interaction) : interaction
-  const entry = (distance: number) => (distance === 0 ? 1 : factorAt(distance)) / stiffness
+  const own = 1 / stiffness
+  const entry = (distance: number) => (distance === 0 ? own : factorAt(distance) * own)
   return {
     modes: (about, fold, modes) => solveModes(about, fold, modes, entry),
     settlements: (loads) =>

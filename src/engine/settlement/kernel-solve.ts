@@ -108,7 +108,9 @@ function solveClass(points: readonly Point[], fold: Fold, packed: Float64Array, 
   const n = fold.kept.length
   const at = (i: number, j: number) => packed[i >= j ? (i * (i + 1)) / 2 + j : (j * (j + 1)) / 2 + i]!
   if (n <= DIRECT) {
-    const full = Float64Array.from({ length: n * n }, (_, k) => at(Math.floor(k / n), k % n))
+    // Only the lower triangle is read.
+    const full = new Float64Array(n * n)
+    for (let i = 0, o = 0; i < n; i++) for (let j = 0; j <= i; j++, o++) full[i * n + j] = packed[o]!
     if (!factor(full, n)) refuse('not-finite', '/layout', { symbol: 'group flexibility' })
     const x = rhs.map((b) => {
       const s = Float64Array.from(b)
