@@ -61,7 +61,7 @@ test.each(cases.map((c) => [c.id, c] as const))('%s', (_, c) => {
   }
 })
 
-test('all 22 cases are there', () => expect(cases).toHaveLength(22))
+test('all 37 cases are there', () => expect(cases).toHaveLength(37))
 
 const pairs = read('interaction.json') as {
   tolerance: number
