@@ -364,6 +364,13 @@ export const catalogue: Readonly<Record<ErrorCode, ErrorEntry>> = {
     'Two caps share one mark.',
     'Give each cap its own mark.',
   ),
+  'duplicate-row': entry(
+    422,
+    'Duplicate row',
+    'Cap "{cap}" has a second row for combination "{combination}"; the first is row {first}.',
+    'Two rows name the same cap and combination; which of them holds would be a guess, and so would their sum.',
+    'Leave one row for each cap and combination.',
+  ),
   'missing-combination': entry(
     422,
     'Missing combination',
