@@ -132,7 +132,7 @@ export const settlementResult = z.strictObject({
     })
     .optional(),
 })
-const checkKinds = [
+export const checkKinds = [
   'pile-compression',
   'pile-uplift',
   'group-compression',

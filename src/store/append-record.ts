@@ -24,24 +24,30 @@ async function insertRows(trx: Transaction<Tables>, table: RowTable, record: str
   }
 }
 
+export type AppendOptions = {
+  /** An id that was told before the record was computed. */
+  readonly id?: string
+  /** Done in the transaction of the record, before it ends. */
+  readonly also?: (trx: Transaction<Tables>, record: RecordRow) => Promise<void>
+}
+
 /**
  * Adds a record to a project: takes the next revision, links the chain and inserts every row, all in one transaction, so that
- * no revision is used twice or skipped. `also` is done in the same transaction, before it ends. The record is on the disk when
- * this returns. Throws `no-such-project`.
+ * no revision is used twice or skipped. The record is on the disk when this returns. Throws `no-such-project`.
  */
 export function appendRecord(
   store: Store,
   project: string,
   actor: Actor,
   draft: Draft,
-  also: (trx: Transaction<Tables>, record: RecordRow) => Promise<void> = async () => undefined,
+  { id = randomUUIDv7(), also = async () => undefined }: AppendOptions = {},
 ): Promise<RecordRow> {
   return store.db.transaction().execute(async (trx) => {
     const place = await store.capabilities.lockProject(trx, project)
     if (!place) throw new Problem('no-such-project', { slug: project })
     const link = {
       ...draft.record,
-      id: randomUUIDv7(),
+      id,
       project,
       revision: place.revision + 1,
       created_at: store.clock().toISOString(),

@@ -7,22 +7,22 @@ import type { ProjectRow } from './tables.ts'
 export const findProject = (store: Store, slug: string): Promise<ProjectRow | undefined> =>
   store.reader.selectFrom('projects').selectAll().where('slug', '=', slug).executeTakeFirst()
 
-/** What became of a PUT: the row now, and how. With `expected`, the row is changed only where it agrees. */
-export type Put = { readonly row: ProjectRow; readonly outcome: 'created' | 'same' | 'changed' | 'refused' }
+/** What became of a PUT: the row now, and how. */
+export type Put = { readonly row: ProjectRow; readonly outcome: 'created' | 'same' | 'changed' }
 
-/** Makes a project, or changes its title where `expected` allows the row as it is. */
+/** Makes a project, or changes its title. `guard` sees the row as it is, under its lock, and throws where it must not change. */
 export function putProject(
   store: Store,
   slug: string,
   title: string,
-  expected: (row: ProjectRow | undefined) => boolean,
+  guard: (row: ProjectRow | undefined) => void = () => undefined,
 ): Promise<Put> {
   return store.db.transaction().execute(async (trx): Promise<Put> => {
     const now = store.clock().toISOString()
     const found = await store.capabilities.lockProject(trx, slug)
     if (!found) {
       const row = { slug, title, created_at: now, updated_at: now, revision: 0, head: NOTHING }
-      if (!expected(undefined)) return { row, outcome: 'refused' }
+      guard(undefined)
       const made = await trx
         .insertInto('projects')
         .values(row)
@@ -33,7 +33,7 @@ export function putProject(
     }
     // Another replica made it between the two statements.
     const here = found ?? (await store.capabilities.lockProject(trx, slug))!
-    if (!expected(here)) return { row: here, outcome: 'refused' }
+    guard(here)
     if (here.title === title) return { row: here, outcome: 'same' }
     const row = { ...here, title, updated_at: now }
     await trx.updateTable('projects').set({ title, updated_at: now }).where('slug', '=', slug).execute()

@@ -17,7 +17,7 @@ afterEach(closeStores)
 describe.each(bothDatabases())('on $name', (database) => {
   const project = async () => {
     const store = await emptyStore(database)
-    await putProject(store, 'quay', 'Quay', () => true)
+    await putProject(store, 'quay', 'Quay')
     return store
   }
 

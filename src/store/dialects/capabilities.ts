@@ -4,6 +4,8 @@ import type { Tables } from '../tables.ts'
 /** Where the two databases differ, each difference named once. All other SQL is the same. */
 export type Capabilities = {
   readonly name: 'sqlite' | 'postgres'
+  /** Whether one service alone serves the database: what it left unfinished when it ended is nobody's. */
+  readonly alone: boolean
   /** Column type of bytes, and of text that sorts by code points whatever the locale. */
   readonly blob: RawBuilder<unknown>
   readonly text: RawBuilder<unknown>

@@ -24,6 +24,7 @@ export const POSTGRES_BEGIN = 'begin'
 
 export const postgresCapabilities: Capabilities = {
   name: 'postgres',
+  alone: false,
   blob: sql`bytea`,
   text: sql`text collate "C"`,
   lockMigrations: async (db) => {

@@ -62,6 +62,7 @@ const refusal = (table: string, event: string) => {
 
 export const sqliteCapabilities: Capabilities = {
   name: 'sqlite',
+  alone: true,
   blob: sql`blob`,
   text: sql`text`,
   // One writer at a time, from `begin immediate` on.
