@@ -40,6 +40,8 @@ const rooms: Readonly<Record<string, Room>> = {
   graphql: { floor: 13, only: ['operations', 'contract', 'errors.ts', 'engine'] },
   'app.ts': { floor: 14 },
   'main.ts': { floor: 15 },
+  'keys.ts': { floor: 15, only: ['config.ts', 'store'] },
+  'backup.ts': { floor: 15, only: ['config.ts', 'store'] },
 }
 
 /** Type imports that the table lets through: plain declarations of what a request or notice is, beside or above their reader. */
@@ -262,8 +264,12 @@ test('export by name, and the engine has the only index file', () => {
   expect(defaults.map((s) => s.path)).toEqual([])
 })
 
-test('only main.ts reads the environment', () => {
-  expect(sources.filter((s) => /\bprocess\.env\b/.test(s.text)).map((s) => s.path)).toEqual(['main.ts'])
+test('only the programs read the environment', () => {
+  expect(sources.filter((s) => /\bprocess\.env\b/.test(s.text)).map((s) => s.path)).toEqual([
+    'backup.ts',
+    'keys.ts',
+    'main.ts',
+  ])
 })
 
 test('what src/ imports is a runtime dependency: the container installs nothing else', () => {
