@@ -5,7 +5,7 @@ import type { Capabilities } from './capabilities.ts'
 /** Any number that no other program in the same database locks by. */
 const MIGRATION_LOCK = 7_305_921_446
 
-/** Connections to a PostgreSQL server. `report` hears of idle connections that were lost; the next call makes new ones. */
+/** Connections to a PostgreSQL server. `report` hears of connections that were lost; the next call makes new ones. */
 export function openPostgres(url: string, report: (fault: Error) => void): Pool {
   const pool = new Pool({
     connectionString: url,
@@ -15,6 +15,8 @@ export function openPostgres(url: string, report: (fault: Error) => void): Pool 
     application_name: 'kentledge',
   })
   pool.on('error', report)
+  // One that is lost in the middle of a transaction, between two queries, would end the process with nobody listening.
+  pool.on('connect', (client) => client.on('error', report))
   return pool
 }
 
