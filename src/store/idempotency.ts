@@ -7,7 +7,7 @@ import type { Tables } from './tables.ts'
 /** A reply is kept so long. */
 const KEPT_MS = 24 * 3600 * 1000
 /** A run that has not renewed its claim for so long is taken for dead. */
-export const LEASE_MS = 5000
+export const LEASE_MS = 3000
 
 export type Reply = {
   readonly status: number
