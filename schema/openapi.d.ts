@@ -1626,6 +1626,13 @@ export interface components {
                         readonly rockingAlongX: number;
                         /** @description rocking along y; 0 where the piles cannot take it */
                         readonly rockingAlongY: number;
+                        /** @description rigid cap at the cap's origin, pressing signs: ready for a structural model */
+                        readonly atOrigin: {
+                            /** @description rows: settlement (m), slope along x, slope along y (rad); columns: V (kN), My, Mx (kN.m). Units m/kN, 1/kN, rad/(kN.m). Symmetric */
+                            readonly flexibility: readonly (readonly number[])[];
+                            /** @description its inverse: rows V, My, Mx; columns settlement, slope along x, slope along y. Units kN/m, kN/rad, kN.m/rad. Symmetric; 0 where the piles cannot take it */
+                            readonly stiffness: readonly (readonly number[])[];
+                        };
                     };
                     readonly notices: readonly components["schemas"]["Notice"][];
                 }[];
@@ -1696,6 +1703,13 @@ export interface components {
                     readonly rockingAlongX: number;
                     /** @description rocking along y; 0 where the piles cannot take it */
                     readonly rockingAlongY: number;
+                    /** @description rigid cap at the cap's origin, pressing signs: ready for a structural model */
+                    readonly atOrigin: {
+                        /** @description rows: settlement (m), slope along x, slope along y (rad); columns: V (kN), My, Mx (kN.m). Units m/kN, 1/kN, rad/(kN.m). Symmetric */
+                        readonly flexibility: readonly (readonly number[])[];
+                        /** @description its inverse: rows V, My, Mx; columns settlement, slope along x, slope along y. Units kN/m, kN/rad, kN.m/rad. Symmetric; 0 where the piles cannot take it */
+                        readonly stiffness: readonly (readonly number[])[];
+                    };
                 };
                 readonly notices: readonly components["schemas"]["Notice"][];
             };

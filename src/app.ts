@@ -69,7 +69,7 @@ export async function buildService(config: Config, store: Store): Promise<Servic
   guard(app, authenticate(office, config.AUTH))
   negotiate(app)
   problems(app, config.BODY_LIMIT)
-  metrics(app, engineVersion, pool)
+  metrics(app, engineVersion, pool, () => store.capabilities.size(store.reader))
   probes(app, () => probe(store))
   calculators(app)
   const bodyLimit = config.BODY_LIMIT

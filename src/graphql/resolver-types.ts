@@ -1041,7 +1041,7 @@ export type CurvePointResolvers<ContextType = MercuriusContext, ParentType exten
   settlement?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
 };
 
-export type AxialLoadResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['AxialLoad'] = ResolversParentTypes['AxialLoad']> = {
+export type AxialLoadResolvers<ContextType = Context, ParentType extends ResolversParentTypes['AxialLoad'] = ResolversParentTypes['AxialLoad']> = {
   depth?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   axialLoad?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   shaftStress?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
@@ -1077,7 +1077,7 @@ export type GroupStiffnessResolvers<ContextType = Context, ParentType extends Re
   atOrigin?: Resolver<ResolversTypes['CapMatrices'], ParentType, ContextType>;
 };
 
-export type CapMatricesResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['CapMatrices'] = ResolversParentTypes['CapMatrices']> = {
+export type CapMatricesResolvers<ContextType = Context, ParentType extends ResolversParentTypes['CapMatrices'] = ResolversParentTypes['CapMatrices']> = {
   flexibility?: Resolver<ReadonlyArray<ReadonlyArray<ResolversTypes['Float']>>, ParentType, ContextType>;
   stiffness?: Resolver<ReadonlyArray<ReadonlyArray<ResolversTypes['Float']>>, ParentType, ContextType>;
 };
@@ -1114,12 +1114,12 @@ export type StepResolvers<ContextType = Context, ParentType extends ResolversPar
   table?: Resolver<Maybe<ResolversTypes['SolutionTable']>, ParentType, ContextType>;
 };
 
-export type SolutionTableResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['SolutionTable'] = ResolversParentTypes['SolutionTable']> = {
+export type SolutionTableResolvers<ContextType = Context, ParentType extends ResolversParentTypes['SolutionTable'] = ResolversParentTypes['SolutionTable']> = {
   columns?: Resolver<ReadonlyArray<ResolversTypes['TableColumn']>, ParentType, ContextType>;
   rows?: Resolver<ReadonlyArray<ReadonlyArray<ResolversTypes['Float']>>, ParentType, ContextType>;
 };
 
-export type TableColumnResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['TableColumn'] = ResolversParentTypes['TableColumn']> = {
+export type TableColumnResolvers<ContextType = Context, ParentType extends ResolversParentTypes['TableColumn'] = ResolversParentTypes['TableColumn']> = {
   symbol?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   unit?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
 };
