@@ -3,6 +3,7 @@ import type { Config } from './config.ts'
 import { readExamples } from './contract/examples.ts'
 import { limits } from './contract/limits.ts'
 import { openapi } from './contract/openapi.ts'
+import { readJson } from './contract/read-json.ts'
 import { engineVersion } from './engine/index.ts'
 import { Problem } from './errors.ts'
 import { graphqlPlugin } from './graphql/plugin.ts'
@@ -45,14 +46,14 @@ export async function buildService(config: Config, store: Store): Promise<Servic
     return503OnClosing: false,
     // A mark of 200 letters, each of up to twelve signs once it is percent-encoded.
     routerOptions: { maxParamLength: 2400 },
-    // The strict schemas name these fields like any other unknown one.
-    onProtoPoisoning: 'ignore',
-    onConstructorPoisoning: 'ignore',
     // An unreadable URL never reaches the error handler.
     frameworkErrors: (error, _request, reply) =>
       sendProblem(reply, new Problem('malformed-url', { reason: error.message })),
   })
-  app.removeContentTypeParser('text/plain')
+  app.removeContentTypeParser(['text/plain', 'application/json'])
+  app.addContentTypeParser('application/json', { parseAs: 'string' }, async (_request: unknown, body: string) =>
+    readJson(body),
+  )
   const pool = new WorkerPool({
     workers: config.WORKERS,
     queue: config.WORK_QUEUE,

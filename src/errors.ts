@@ -20,6 +20,7 @@ type Contract =
   | 'invalid-request'
   | 'unknown-field'
   | 'missing-field'
+  | 'duplicate-field'
   | 'wrong-type'
   | 'out-of-range'
   | 'unknown-choice'
@@ -134,6 +135,13 @@ export const catalogue: Readonly<Record<ErrorCode, ErrorEntry>> = {
     'Unknown field "{field}".',
     'A field is misspelt or does not belong here.',
     'Remove or rename the field.',
+  ),
+  'duplicate-field': entry(
+    422,
+    'Field given twice',
+    'The field "{field}" stands twice.',
+    'One object holds the same name twice; which of the two holds would be a guess.',
+    'Leave one of them out.',
   ),
   'missing-field': entry(
     422,

@@ -1,16 +1,9 @@
 import { csvRows, withLines } from '../contract/csv-loads.ts'
+import { readJson } from '../contract/read-json.ts'
 import { Problem } from '../errors.ts'
 
 /** A schedule as it came over the wire, and its loads as CSV where they came apart from it. */
 export type ScheduleText = { readonly schedule: string; readonly loads?: string }
-
-function readJson(text: string): unknown {
-  try {
-    return JSON.parse(text)
-  } catch (fault) {
-    throw new Problem('malformed-json', { reason: (fault as Error).message })
-  }
-}
 
 const isObject = (value: unknown): value is Readonly<Record<string, unknown>> =>
   typeof value === 'object' && value !== null && !Array.isArray(value)
