@@ -1036,7 +1036,7 @@ export type SinglePileSettlementResolvers<ContextType = Context, ParentType exte
   curve?: Resolver<Maybe<ReadonlyArray<ResolversTypes['CurvePoint']>>, ParentType, ContextType>;
 };
 
-export type CurvePointResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['CurvePoint'] = ResolversParentTypes['CurvePoint']> = {
+export type CurvePointResolvers<ContextType = Context, ParentType extends ResolversParentTypes['CurvePoint'] = ResolversParentTypes['CurvePoint']> = {
   load?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   settlement?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
 };
