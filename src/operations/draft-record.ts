@@ -1,15 +1,15 @@
 import { canonicalText, sha256 } from '../canonical.ts'
 import { parse } from '../contract/parse.ts'
 import { scheduleRequest } from '../contract/schedule.ts'
-import { assess, engineVersion, sliceTraces } from '../engine/index.ts'
+import { assess, engineVersion, splitTrace } from '../engine/index.ts'
 import { pack } from '../store/blobs.ts'
 import { contentHash, traceHash } from '../store/chain.ts'
 import type { Draft } from '../store/draft.ts'
 import { flatRows } from '../store/flat-rows.ts'
 import { told } from './calculate.ts'
 
-/** The cap that a number of the result belongs to; -1 for summary and neighbours. */
-const capOf = (pointer: string) => Number(/^\/caps\/(\d+)/.exec(pointer)?.[1] ?? -1)
+/** The cap that a number of the result belongs to; summary and neighbours come after the last. */
+const capOf = (pointer: string, caps: number) => Number(/^\/caps\/(\d+)/.exec(pointer)?.[1] ?? caps)
 
 /** Assesses a schedule and makes all of a record but its place in a project. The same schedule gives the same draft, wherever it runs. */
 export function draftRecord(input: unknown): Draft {
@@ -22,9 +22,8 @@ export function draftRecord(input: unknown): Draft {
     caps: result.caps.map(canonicalText),
     request: canonicalText(schedule),
   }
-  const traces = [...sliceTraces(trace!, capOf)]
-    .sort(([a], [b]) => a - b)
-    .map(([cap, slice]) => ({ cap, text: JSON.stringify(slice) }))
+  const split = splitTrace(trace!, (pointer) => capOf(pointer, result.caps.length))
+  const traces = split.map((part, cap) => ({ cap, text: JSON.stringify(part) }))
   return {
     record: {
       title: schedule.title,

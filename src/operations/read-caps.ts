@@ -32,7 +32,7 @@ export async function listCaps(office: Office, actor: Actor, id: string, filter:
   return { record, rows: rows.map((row) => ({ ordinal: row.ordinal, cap: showCap(row) })) }
 }
 
-/** One cap: its part of the result and its trace, both JSON as stored. Throws `no-such-cap`. */
+/** One cap: its part of the result as JSON, and its trace. Throws `no-such-cap`. */
 export async function getCap(office: Office, actor: Actor, id: string, mark: string, trace: boolean) {
   const record = await ownRecord(office, actor, id)
   const cap = await findCap(office.store, id, mark)

@@ -71,6 +71,6 @@ export function* contentPieces({ notices, outcome, caps, request }: ContentParts
 }
 export const contentHash = (parts: ContentParts): string => sha256(contentPieces(parts))
 
-/** Over the traces of a record: that of each cap by its ordinal, and that of no cap (-1). */
+/** Over the parts of the trace of a record, in their order. */
 export const traceHash = (traces: readonly { readonly cap: number; readonly text: string }[]): string =>
   sha256(traces.flatMap(({ cap, text }) => [`${cap}\n`, text, '\n']))

@@ -1,3 +1,4 @@
+import { joinTrace, type Trace, type TracePart } from '../engine/index.ts'
 import { unpack } from './blobs.ts'
 import type { Store } from './open-store.ts'
 import type { Page } from './page.ts'
@@ -75,13 +76,26 @@ export function listChecks(store: Store, record: string, caps?: readonly number[
 export const listNeighbours = (store: Store, record: string): Promise<NeighbourRow[]> =>
   store.reader.selectFrom('neighbours').selectAll().where('record', '=', record).orderBy('ordinal').execute()
 
-/** The trace of one cap (its ordinal) as JSON; -1: of summary and neighbours. */
-export async function findTrace(store: Store, record: string, cap: number): Promise<string | undefined> {
-  const row = await store.reader
+async function tracePart({ reader }: Store, record: string, part: number): Promise<TracePart | undefined> {
+  const row = await reader
     .selectFrom('traces')
     .select('trace')
     .where('record', '=', record)
-    .where('cap', '=', cap)
+    .where('cap', '=', part)
     .executeTakeFirst()
-  return row && unpack(row.trace)
+  return row && (JSON.parse(unpack(row.trace)) as TracePart)
+}
+
+/** The trace of one cap by its ordinal, put together from its own part and the few that hold what it shares with others. */
+export async function findTrace(store: Store, record: string, cap: number): Promise<Trace | undefined> {
+  const parts = new Map<number, TracePart>()
+  const ahead = [cap]
+  for (let next = ahead.pop(); next !== undefined; next = ahead.pop()) {
+    if (parts.has(next)) continue
+    const part = await tracePart(store, record, next)
+    if (!part) return undefined
+    parts.set(next, part)
+    ahead.push(...part.uses)
+  }
+  return joinTrace([...parts].sort(([a], [b]) => a - b).map(([, part]) => part))
 }

@@ -102,7 +102,10 @@ export type NeighbourTable = {
   exceeded: Flag | null
 }
 
-/** The trace of one cap (`cap` is its ordinal), and of what belongs to no cap (`cap` -1). */
+/**
+ * A part of the trace: that of one cap (`cap` is its ordinal), and of summary and neighbours after the last cap. Steps that
+ * several caps need lie in the first of them; a part names those that it uses.
+ */
 export type TraceTable = { record: string; cap: number; trace: Uint8Array }
 
 export type SignatureTable = {

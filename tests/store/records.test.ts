@@ -1,6 +1,8 @@
 import { sql } from 'kysely'
 import { afterEach, describe, expect, test } from 'vitest'
 import { readExamples } from '../../src/contract/examples.ts'
+import { type Step, sliceTrace, type Trace } from '../../src/engine/index.ts'
+import { assessSchedule } from '../../src/operations/assess-schedule.ts'
 import { draftRecord } from '../../src/operations/draft-record.ts'
 import { anonymous } from '../../src/store/actor.ts'
 import { appendRecord } from '../../src/store/append-record.ts'
@@ -33,7 +35,21 @@ describe.each(bothDatabases())('on $name', (database) => {
     expect(await listChecks(store, record.id)).toHaveLength(draft.checks.length)
     const cap = await findCap(store, record.id, caps[0]!.mark)
     expect(JSON.parse(cap!.body)).toMatchObject({ mark: caps[0]!.mark })
-    expect(JSON.parse((await findTrace(store, record.id, 0))!).steps.length).toBeGreaterThan(10)
+    const whole: Trace = JSON.parse(JSON.stringify(assessSchedule(readExamples().assessment, { trace: true }).trace))
+    const byId = (steps: readonly Step[]) => steps.toSorted((a, b) => (a.id < b.id ? -1 : 1))
+    for (const { ordinal } of caps) {
+      const trace = (await findTrace(store, record.id, ordinal))!
+      const slice = sliceTrace(whole, `/caps/${ordinal}`)
+      expect(slice.steps.length).toBeGreaterThan(10)
+      expect(byId(trace.steps)).toEqual(byId(slice.steps))
+      expect(trace.results).toEqual(slice.results)
+      // Closed: each operand comes from a step before.
+      const seen = new Set<string>()
+      for (const step of trace.steps) {
+        for (const operand of 'operands' in step ? step.operands : []) expect(seen.has(operand.from)).toBe(true)
+        seen.add(step.id)
+      }
+    }
   })
 
   test('20 records at once take 20 revisions, each linked to the one before', async () => {

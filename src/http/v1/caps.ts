@@ -32,9 +32,11 @@ export function caps(app: FastifyInstance, office: Office): void {
     const { id, mark } = request.params
     const cap = await getCap(office, request.actor!, id, mark, trace === 'full')
     request.project = cap.record.project
-    // Both parts are JSON already: kept as text they need not be parsed and printed again.
+    // The result is JSON already: kept as text it need not be parsed and printed again.
     return sendTagged(request, reply, cap.record.content_hash, () =>
-      cap.trace === undefined ? `{"result":${cap.result}}` : `{"result":${cap.result},"trace":${cap.trace}}`,
+      cap.trace === undefined
+        ? `{"result":${cap.result}}`
+        : `{"result":${cap.result},"trace":${JSON.stringify(cap.trace)}}`,
     )
   })
 }
