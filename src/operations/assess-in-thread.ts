@@ -1,4 +1,5 @@
 import { move } from 'piscina'
+import { answerText } from '../contract/answer-text.ts'
 import { csvRows, withLines } from '../contract/csv-loads.ts'
 import { Problem } from '../errors.ts'
 import type { Outcome } from '../jobs/pool.ts'
@@ -35,7 +36,7 @@ function assess({ schedule, loads, options }: AssessTask) {
 /** The entry of a worker thread: reading, checking and serialising a large schedule hold up the event loop as much as computing it does. */
 export function assessInThread(task: AssessTask): Outcome {
   try {
-    return move(new TextEncoder().encode(JSON.stringify(assess(task)))) as Uint8Array
+    return move(new TextEncoder().encode(answerText(assess(task)))) as Uint8Array
   } catch (problem) {
     if (!(problem instanceof Problem)) throw problem
     return { code: problem.code, facts: problem.facts, errors: problem.errors }

@@ -63,6 +63,8 @@ export async function overload(): Promise<Finding[]> {
         part: 'e',
         what: `goodput at ${LOAD} times the load : peak`,
         value: `${median(goodput).toFixed(2)} (peak ${Math.round(median(peaks))} a second)`,
+        aim: '>= 0.8',
+        holds: median(goodput) >= 0.8,
       },
       {
         part: 'e',

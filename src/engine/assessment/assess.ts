@@ -62,7 +62,7 @@ export function assess(schedule: Schedule, options: AssessOptions) {
       checks,
       settlement,
       stiffness: set.stiffness,
-      notices: [...missingCombinations(checked, cap.mark, index, rowsOf.get(cap.mark)!), ...set.notices],
+      notices: [...missingCombinations(checked, cap.mark, index, rowsOf.get(cap.mark)!), ...set.notices()],
     })),
     neighbours,
   }
