@@ -1339,11 +1339,36 @@ export interface components {
             }[];
         };
         readonly LimitList: {
+            /** @description layers of a ground profile */
             readonly layers: number;
+            /** @description piles under one cap */
             readonly pilesPerCap: number;
+            /** @description caps of a schedule */
             readonly caps: number;
+            /** @description rows of loads in a schedule */
             readonly rows: number;
+            /** @description bytes of a request; a larger one is a 413 */
             readonly bodyBytes: number;
+            /** @description bytes of all header fields; more are a 431 */
+            readonly headerBytes: number;
+            /** @description seconds until a request must have arrived whole; then 408 */
+            readonly requestSeconds: number;
+            /** @description seconds of an assessment, waiting included; then 504 */
+            readonly assessmentSeconds: number;
+            /** @description assessments that wait for a thread; beyond that 503 with Retry-After */
+            readonly assessmentsWaiting: number;
+            readonly graphql: {
+                /** @description fields above one another in a document */
+                readonly depth: number;
+                /** @description aliases in a document */
+                readonly aliases: number;
+                /** @description tokens of a document */
+                readonly tokens: number;
+                /** @description cost of a document: 10 for group and settlement, 5 for singlePile and block, 1 for other fields */
+                readonly cost: number;
+                /** @description characters of a document */
+                readonly characters: number;
+            };
         };
     };
     responses: never;
@@ -1460,7 +1485,7 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description The body is larger than the limit */
+            /** @description The body is larger than the limit (`bodyBytes` of GET /v1/limits) */
             readonly 413: {
                 headers: {
                     readonly [name: string]: unknown;
@@ -1603,7 +1628,7 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description The body is larger than the limit */
+            /** @description The body is larger than the limit (`bodyBytes` of GET /v1/limits) */
             readonly 413: {
                 headers: {
                     readonly [name: string]: unknown;
@@ -1749,7 +1774,7 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description The body is larger than the limit */
+            /** @description The body is larger than the limit (`bodyBytes` of GET /v1/limits) */
             readonly 413: {
                 headers: {
                     readonly [name: string]: unknown;
@@ -1887,7 +1912,7 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description The body is larger than the limit */
+            /** @description The body is larger than the limit (`bodyBytes` of GET /v1/limits) */
             readonly 413: {
                 headers: {
                     readonly [name: string]: unknown;
@@ -2374,7 +2399,7 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description The body is larger than the limit */
+            /** @description The body is larger than the limit (`bodyBytes` of GET /v1/limits) */
             readonly 413: {
                 headers: {
                     readonly [name: string]: unknown;
@@ -2452,7 +2477,7 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description The body is larger than the limit */
+            /** @description The body is larger than the limit (`bodyBytes` of GET /v1/limits) */
             readonly 413: {
                 headers: {
                     readonly [name: string]: unknown;

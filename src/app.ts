@@ -1,3 +1,4 @@
+import { maxHeaderSize } from 'node:http'
 import fastify, { type FastifyInstance, LogController } from 'fastify'
 import type { Config } from './config.ts'
 import { readExamples } from './contract/examples.ts'
@@ -5,6 +6,7 @@ import { limits } from './contract/limits.ts'
 import { openapi } from './contract/openapi.ts'
 import { engineVersion } from './engine/index.ts'
 import { Problem } from './errors.ts'
+import { limits as documentLimits } from './graphql/limits.ts'
 import { graphqlPlugin } from './graphql/plugin.ts'
 import { accessLog, traceIdOf } from './http/access-log.ts'
 import { answerClientError } from './http/client-errors.ts'
@@ -63,7 +65,15 @@ export async function buildService(config: Config): Promise<Service> {
   app.get('/v1/methods', async () => listMethods())
   app.get<{ Params: { id: string } }>('/v1/methods/:id', async (request) => getMethod(request.params.id))
   app.get('/v1/sources', async () => listSources())
-  app.get('/v1/limits', async () => ({ ...limits, bodyBytes: config.BODY_LIMIT }))
+  app.get('/v1/limits', async () => ({
+    ...limits,
+    bodyBytes: config.BODY_LIMIT,
+    headerBytes: maxHeaderSize,
+    requestSeconds: config.REQUEST_TIMEOUT,
+    assessmentSeconds: config.WORK_TIMEOUT,
+    assessmentsWaiting: config.WORK_QUEUE,
+    graphql: documentLimits,
+  }))
   await graphqlPlugin(app, { production: config.NODE_ENV === 'production' })
   return { app, stop }
 }

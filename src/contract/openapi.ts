@@ -120,7 +120,7 @@ const problem = (description: string) => ({
 })
 const failures = {
   '400': problem('The body or URL cannot be read'),
-  '413': problem('The body is larger than the limit'),
+  '413': problem('The body is larger than the limit (`bodyBytes` of GET /v1/limits)'),
   '415': problem('The content type is not accepted'),
   '422': problem('The request is invalid or physically impossible; `errors` lists every fault'),
   '503': problem('The service is busy or stopping'),
@@ -175,7 +175,7 @@ export function openapi(examples: Readonly<Record<string, unknown>>) {
     },
   }
   const description =
-    'Axial design of pile foundations. Units: m, kN, kPa, kN/m3, degrees; settlement in mm. Every quantity also takes a string with a unit.'
+    'Axial design of pile foundations. Units: m, kN, kPa, kN/m3, degrees; settlement in mm. Every quantity also takes a string with a unit. What one request may hold: GET /v1/limits.'
   return {
     openapi: '3.1.0',
     info: {
