@@ -1524,11 +1524,36 @@ export interface components {
             }[];
         };
         readonly LimitList: {
+            /** @description layers of a ground profile */
             readonly layers: number;
+            /** @description piles under one cap */
             readonly pilesPerCap: number;
+            /** @description caps of a schedule */
             readonly caps: number;
+            /** @description rows of loads in a schedule */
             readonly rows: number;
+            /** @description bytes of a request; a larger one is a 413 */
             readonly bodyBytes: number;
+            /** @description bytes of all header fields; more are a 431 */
+            readonly headerBytes: number;
+            /** @description seconds until a request must have arrived whole; then 408 */
+            readonly requestSeconds: number;
+            /** @description seconds of an assessment, waiting included; then 504 */
+            readonly assessmentSeconds: number;
+            /** @description assessments that wait for a thread; beyond that 503 with Retry-After */
+            readonly assessmentsWaiting: number;
+            readonly graphql: {
+                /** @description fields above one another in a document */
+                readonly depth: number;
+                /** @description aliases in a document */
+                readonly aliases: number;
+                /** @description tokens of a document */
+                readonly tokens: number;
+                /** @description cost of a document: 10 for group and settlement, 5 for singlePile and block, 1 for other fields */
+                readonly cost: number;
+                /** @description characters of a document */
+                readonly characters: number;
+            };
         };
         readonly Project: {
             readonly slug: string;
@@ -1571,15 +1596,34 @@ export interface components {
             readonly recordHash: string;
             readonly summary: {
                 readonly caps: number;
+                /** @description caps with every check satisfied */
                 readonly satisfied: number;
+                /** @description caps with a check exceeded; neighbours are counted in `checks` alone */
                 readonly exceeded: number;
+                /** @description of all caps and neighbours */
                 readonly worst?: {
                     readonly cap: string;
-                    readonly check: string;
+                    /** @description the other cap of an angular distortion */
+                    readonly neighbour?: string;
+                    /** @enum {string} */
+                    readonly check: "pile-compression" | "pile-uplift" | "group-compression" | "block-compression" | "group-uplift" | "block-uplift" | "pile-section" | "settlement" | "tilt" | "angular-distortion";
                     readonly combination: string;
                     /** @description largest */
                     readonly utilisation: number;
                 };
+                /** @description the worst of each kind of check, how many were made and how many exceed */
+                readonly checks: readonly {
+                    readonly cap: string;
+                    /** @description the other cap of an angular distortion */
+                    readonly neighbour?: string;
+                    /** @enum {string} */
+                    readonly check: "pile-compression" | "pile-uplift" | "group-compression" | "block-compression" | "group-uplift" | "block-uplift" | "pile-section" | "settlement" | "tilt" | "angular-distortion";
+                    readonly combination: string;
+                    /** @description largest */
+                    readonly utilisation: number;
+                    readonly count: number;
+                    readonly exceeded: number;
+                }[];
             };
         };
         readonly AssessmentList: {
@@ -1596,15 +1640,34 @@ export interface components {
             readonly result: {
                 readonly summary: {
                     readonly caps: number;
+                    /** @description caps with every check satisfied */
                     readonly satisfied: number;
+                    /** @description caps with a check exceeded; neighbours are counted in `checks` alone */
                     readonly exceeded: number;
+                    /** @description of all caps and neighbours */
                     readonly worst?: {
                         readonly cap: string;
-                        readonly check: string;
+                        /** @description the other cap of an angular distortion */
+                        readonly neighbour?: string;
+                        /** @enum {string} */
+                        readonly check: "pile-compression" | "pile-uplift" | "group-compression" | "block-compression" | "group-uplift" | "block-uplift" | "pile-section" | "settlement" | "tilt" | "angular-distortion";
                         readonly combination: string;
                         /** @description largest */
                         readonly utilisation: number;
                     };
+                    /** @description the worst of each kind of check, how many were made and how many exceed */
+                    readonly checks: readonly {
+                        readonly cap: string;
+                        /** @description the other cap of an angular distortion */
+                        readonly neighbour?: string;
+                        /** @enum {string} */
+                        readonly check: "pile-compression" | "pile-uplift" | "group-compression" | "block-compression" | "group-uplift" | "block-uplift" | "pile-section" | "settlement" | "tilt" | "angular-distortion";
+                        readonly combination: string;
+                        /** @description largest */
+                        readonly utilisation: number;
+                        readonly count: number;
+                        readonly exceeded: number;
+                    }[];
                 };
                 readonly caps: readonly {
                     readonly mark: string;
@@ -1920,7 +1983,7 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description The body is larger than the limit */
+            /** @description The body is larger than the limit (`bodyBytes` of GET /v1/limits) */
             readonly 413: {
                 headers: {
                     readonly [name: string]: unknown;
@@ -2090,7 +2153,7 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description The body is larger than the limit */
+            /** @description The body is larger than the limit (`bodyBytes` of GET /v1/limits) */
             readonly 413: {
                 headers: {
                     readonly [name: string]: unknown;
@@ -2263,7 +2326,7 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description The body is larger than the limit */
+            /** @description The body is larger than the limit (`bodyBytes` of GET /v1/limits) */
             readonly 413: {
                 headers: {
                     readonly [name: string]: unknown;
@@ -2428,7 +2491,7 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description The body is larger than the limit */
+            /** @description The body is larger than the limit (`bodyBytes` of GET /v1/limits) */
             readonly 413: {
                 headers: {
                     readonly [name: string]: unknown;
@@ -2942,7 +3005,7 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description The body is larger than the limit */
+            /** @description The body is larger than the limit (`bodyBytes` of GET /v1/limits) */
             readonly 413: {
                 headers: {
                     readonly [name: string]: unknown;
@@ -3047,7 +3110,7 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description The body is larger than the limit */
+            /** @description The body is larger than the limit (`bodyBytes` of GET /v1/limits) */
             readonly 413: {
                 headers: {
                     readonly [name: string]: unknown;

@@ -1,4 +1,5 @@
 import { move } from 'piscina'
+import { answerText } from '../contract/answer-text.ts'
 import { outcomeOf, type Work } from '../jobs/pool.ts'
 import { assessSchedule } from './assess-schedule.ts'
 import type { Options } from './calculate.ts'
@@ -10,7 +11,7 @@ export type AssessTask = ScheduleText & { readonly options: Options }
 export const assessInThread = (task: AssessTask) =>
   outcomeOf(() => {
     const answer = withSchedule(task, (input) => assessSchedule(input, task.options))
-    return move(new TextEncoder().encode(JSON.stringify(answer))) as Uint8Array
+    return move(new TextEncoder().encode(answerText(answer))) as Uint8Array
   })
 
 export const assessing: Work<AssessTask, Uint8Array> = { entry: new URL(import.meta.url), name: 'assessInThread' }

@@ -1,4 +1,5 @@
 import type { FastifyInstance, FastifyRequest } from 'fastify'
+import { answerText } from '../../contract/answer-text.ts'
 import { Problem } from '../../errors.ts'
 import type { Options } from '../../operations/calculate.ts'
 import { calculateBlock } from '../../operations/calculate-block.ts'
@@ -25,11 +26,11 @@ const routes = {
   '/v1/settlement': calculateSettlement,
 }
 
-/** The calculators: pure, nothing is stored. Plain JSON.stringify is the fastest serializer for replies of this size. */
+/** The calculators: pure, nothing is stored. */
 export function calculators(app: FastifyInstance): void {
   for (const [url, operation] of Object.entries(routes)) {
     app.post(url, async (request, reply) =>
-      reply.type('application/json; charset=utf-8').send(JSON.stringify(operation(request.body, optionsOf(request)))),
+      reply.type('application/json; charset=utf-8').send(answerText(operation(request.body, optionsOf(request)))),
     )
   }
 }
