@@ -1571,15 +1571,34 @@ export interface components {
             readonly recordHash: string;
             readonly summary: {
                 readonly caps: number;
+                /** @description caps with every check satisfied */
                 readonly satisfied: number;
+                /** @description caps with a check exceeded; neighbours are counted in `checks` alone */
                 readonly exceeded: number;
+                /** @description of all caps and neighbours */
                 readonly worst?: {
                     readonly cap: string;
-                    readonly check: string;
+                    /** @description the other cap of an angular distortion */
+                    readonly neighbour?: string;
+                    /** @enum {string} */
+                    readonly check: "pile-compression" | "pile-uplift" | "group-compression" | "block-compression" | "group-uplift" | "block-uplift" | "pile-section" | "settlement" | "tilt" | "angular-distortion";
                     readonly combination: string;
                     /** @description largest */
                     readonly utilisation: number;
                 };
+                /** @description the worst of each kind of check, how many were made and how many exceed */
+                readonly checks: readonly {
+                    readonly cap: string;
+                    /** @description the other cap of an angular distortion */
+                    readonly neighbour?: string;
+                    /** @enum {string} */
+                    readonly check: "pile-compression" | "pile-uplift" | "group-compression" | "block-compression" | "group-uplift" | "block-uplift" | "pile-section" | "settlement" | "tilt" | "angular-distortion";
+                    readonly combination: string;
+                    /** @description largest */
+                    readonly utilisation: number;
+                    readonly count: number;
+                    readonly exceeded: number;
+                }[];
             };
         };
         readonly AssessmentList: {
@@ -1596,15 +1615,34 @@ export interface components {
             readonly result: {
                 readonly summary: {
                     readonly caps: number;
+                    /** @description caps with every check satisfied */
                     readonly satisfied: number;
+                    /** @description caps with a check exceeded; neighbours are counted in `checks` alone */
                     readonly exceeded: number;
+                    /** @description of all caps and neighbours */
                     readonly worst?: {
                         readonly cap: string;
-                        readonly check: string;
+                        /** @description the other cap of an angular distortion */
+                        readonly neighbour?: string;
+                        /** @enum {string} */
+                        readonly check: "pile-compression" | "pile-uplift" | "group-compression" | "block-compression" | "group-uplift" | "block-uplift" | "pile-section" | "settlement" | "tilt" | "angular-distortion";
                         readonly combination: string;
                         /** @description largest */
                         readonly utilisation: number;
                     };
+                    /** @description the worst of each kind of check, how many were made and how many exceed */
+                    readonly checks: readonly {
+                        readonly cap: string;
+                        /** @description the other cap of an angular distortion */
+                        readonly neighbour?: string;
+                        /** @enum {string} */
+                        readonly check: "pile-compression" | "pile-uplift" | "group-compression" | "block-compression" | "group-uplift" | "block-uplift" | "pile-section" | "settlement" | "tilt" | "angular-distortion";
+                        readonly combination: string;
+                        /** @description largest */
+                        readonly utilisation: number;
+                        readonly count: number;
+                        readonly exceeded: number;
+                    }[];
                 };
                 readonly caps: readonly {
                     readonly mark: string;
