@@ -577,7 +577,10 @@ const shown = (fact: unknown): string =>
 /** The sentence of a fault: the template with its facts. */
 export const detailOf = (code: ErrorCode, facts: Readonly<Record<string, unknown>>): string =>
   catalogue[code].template
-    .replaceAll(/\{(\w+)\}/g, (_, name: string) => shown(facts[name]))
+    .replaceAll(/( ?)\{(\w+)\}/g, (_, gap: string, name: string) =>
+      // A ratio has no unit to show.
+      name === 'unit' && facts[name] === '1' ? '' : gap + shown(facts[name]),
+    )
     .replaceAll(/ +([;.])/g, '$1')
 
 /** A problem that is told to the caller (RFC 9457). */
