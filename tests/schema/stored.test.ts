@@ -33,7 +33,12 @@ beforeAll(async () => {
 afterAll(() => app.close())
 
 /** Sends a request to a documented path and holds the answer to what is documented for its status. */
-async function send(method: 'GET' | 'PUT' | 'POST', path: string, at: Record<string, string>, more: object = {}) {
+async function send(
+  method: 'GET' | 'PUT' | 'POST' | 'DELETE',
+  path: string,
+  at: Record<string, string>,
+  more: object = {},
+) {
   const url = path.replaceAll(/\{(\w+)\}/g, (_, name: string) => encodeURIComponent(at[name]!)) + (at.query ?? '')
   const operation = paths[path]![method.toLowerCase()]!
   const reply = await app.inject({ method, url, ...more })
@@ -57,7 +62,12 @@ test('every route of records, in each of its statuses that a request can bring a
   const assessments = `${project}/assessments`
   const record = '/v1/assessments/{id}'
   const statuses: Record<string, number[]> = {}
-  const tell = async (method: 'GET' | 'PUT' | 'POST', path: string, at: Record<string, string>, more: object = {}) => {
+  const tell = async (
+    method: 'GET' | 'PUT' | 'POST' | 'DELETE',
+    path: string,
+    at: Record<string, string>,
+    more: object = {},
+  ) => {
     const reply = await send(method, path, at, more)
     const list = statuses[`${method} ${path}`] ?? []
     statuses[`${method} ${path}`] = list
@@ -91,6 +101,24 @@ test('every route of records, in each of its statuses that a request can bring a
   await tell('POST', assessments, { slug }, { payload: '{', headers: { 'content-type': 'application/json' } })
   await tell('POST', assessments, { slug }, { payload: 'x', headers: { 'content-type': 'text/csv' } })
   await tell('POST', assessments, { slug }, json({ title: 'x'.repeat(1_100_000) }))
+  const queued = (await tell('POST', assessments, { slug }, json(example, { prefer: 'respond-async' }))).json()
+  const cancelled = (await tell('POST', assessments, { slug }, json(example, { prefer: 'respond-async' }))).json()
+  expect(queued.state).toBe('queued')
+  // One worker: the second waits for the first.
+  await tell('DELETE', record, { id: cancelled.id })
+  await tell('DELETE', record, { id: cancelled.id })
+  await tell('DELETE', record, { id })
+  await tell('DELETE', record, { id: 'none' })
+  await tell('GET', record, { id: cancelled.id })
+  for (const rest of ['/content', '/caps', '/signatures']) await tell('GET', record + rest, { id: cancelled.id })
+  await tell('GET', record, { id: queued.id })
+  const events = (await tell('GET', `${record}/events`, { id: queued.id })).body
+  expect(events.trim().split('\n\n').at(-1)).toMatch(/^event: completed\ndata: \{.*\}$/)
+  for (const [, data] of events.matchAll(/^data: (.*)$/gm))
+    expect(ajv.getSchema('contract#/components/schemas/JobProgress')!(JSON.parse(data!))).toBe(true)
+  await tell('GET', `${record}/events`, { id: 'none' })
+  await tell('GET', `${record}/events`, { id }, { headers: { accept: 'application/json' } })
+  await tell('GET', record, { id: queued.id })
   await tell('GET', assessments, { slug, query: '?limit=1' })
   await tell('GET', assessments, { slug: 'none' })
   await tell('GET', `${project}/integrity`, { slug })
@@ -122,7 +150,7 @@ test('every route of records, in each of its statuses that a request can bring a
   )
   expect(Object.keys(statuses).sort()).toEqual(stored.sort())
   expect(new Set(Object.values(statuses).flat())).toEqual(
-    new Set([200, 201, 304, 400, 401, 403, 404, 406, 409, 412, 413, 415, 422, 428]),
+    new Set([200, 201, 202, 304, 400, 401, 403, 404, 406, 409, 412, 413, 415, 422, 428]),
   )
 })
 

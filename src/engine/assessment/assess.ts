@@ -15,6 +15,8 @@ export type AssessOptions = {
   readonly trace: boolean
   /** Mark of one cap: the trace then holds every combination of that cap, and nothing of the others. */
   readonly cap?: string
+  /** Told after each cap; `done` caps of the schedule are through. */
+  readonly told?: (done: number) => void
 }
 
 /** The main job: every check of every cap of a schedule. Refuses a schedule with faults, all of them at once. */
@@ -54,7 +56,9 @@ export function assess(schedule: Schedule, options: AssessOptions) {
   const assessed = eachOf(schedule.caps, (cap, index) => {
     const set = setOf[index]!
     const rows = rowsOf.get(cap.mark)!
-    return { cap, set, ...assessCap(sheetOf(cap), schedule, cap, index, set, rows, cap.mark === alone, field) }
+    const checked = assessCap(sheetOf(cap), schedule, cap, index, set, rows, cap.mark === alone, field)
+    options.told?.(index + 1)
+    return { cap, set, ...checked }
   })
   const checked = checkedCombinations(schedule)
   const common = alone === undefined ? book : Sheet.silent
