@@ -1661,7 +1661,7 @@ export interface components {
             /** @description how often it was begun */
             readonly attempts: number;
             readonly progress: {
-                /** @description caps that are through */
+                /** @description caps whose piles are computed */
                 readonly done: number;
                 /** @description of so many; null until the schedule has been read */
                 readonly caps: number | null;
@@ -1675,7 +1675,7 @@ export interface components {
             readonly id: string;
             /** @enum {string} */
             readonly state: "queued" | "running" | "failed" | "cancelled" | "completed";
-            /** @description caps that are through */
+            /** @description caps whose piles are computed */
             readonly done: number;
             /** @description of so many; null until the schedule has been read */
             readonly caps: number | null;

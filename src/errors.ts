@@ -402,7 +402,7 @@ export const catalogue: Readonly<Record<ErrorCode, ErrorEntry>> = {
   'job-abandoned': entry(
     500,
     'The assessment was given up',
-    'The assessment was begun {attempts} times and never came to its end; {reason}.',
+    'The assessment was begun {attempts} times and never came to its end. {reason}',
     'Each time the worker or the service itself was lost, or the time ran out.',
     'Split the schedule, or tell the operator the trace id.',
   ),

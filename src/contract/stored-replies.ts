@@ -41,7 +41,7 @@ export const assessment = z.strictObject({
 
 const jobState = z.enum(['queued', 'running', 'failed', 'cancelled'])
 const capsDone = {
-  done: z.int().meta({ description: 'caps that are through' }),
+  done: z.int().meta({ description: 'caps whose piles are computed' }),
   caps: z.int().nullable().meta({ description: 'of so many; null until the schedule has been read' }),
 }
 

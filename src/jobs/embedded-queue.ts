@@ -25,13 +25,10 @@ export function embeddedQueue(
         out.delete(id)
         wake()
       },
-      (fault) => {
-        if (stopped) return
-        report(fault)
+      () =>
         later(() => {
           if (!stopped) giveOut(id)
-        })
-      },
+        }),
     )
   }
   async function look(): Promise<void> {

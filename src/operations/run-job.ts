@@ -51,7 +51,10 @@ export function runJob(office: Office, log: Log): RunJob {
   const { store } = office
   const ended = (state: JobEnd) => office.line.ended(state)
   return async (id, lost) => {
-    const claimed = await claimJob(store, id)
+    const claimed = await claimJob(store, id).catch((err) => {
+      log.error({ job: id, err }, 'job')
+      throw err
+    })
     // Cancelled, or ended by a run that was taken for dead.
     if (!claimed) return
     const { job, hold, text } = claimed
@@ -71,7 +74,7 @@ export function runJob(office: Office, log: Log): RunJob {
       ended('failed')
     }
     if (job.attempts > TRIES) {
-      const reason = 'the service was lost each time'
+      const reason = 'Each time the service itself was lost.'
       return giveUp(new Problem('job-abandoned', { attempts: TRIES, reason }))
     }
     log.info(facts('running'), 'job')
