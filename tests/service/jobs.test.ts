@@ -53,7 +53,8 @@ const lines = ({ log }: Started) =>
     .filter((line) => line.includes('"msg":"job"'))
     .map((line) => JSON.parse(line) as { job: string; state: string; traceId: string; attempt: number })
 
-const slow = slowSchedule(120)
+const JOBS = 8
+const slow = slowSchedule(40)
 
 describe.each(bothDatabases())('on $name', (database) => {
   test(
@@ -88,7 +89,7 @@ describe.each(bothDatabases())('on $name', (database) => {
     const { env } = await database.place()
     const first = await start(env, { SHUTDOWN_TIMEOUT: '30' })
     const traceId = 'c0ffee'.repeat(6).slice(0, 32)
-    const { id: short } = await post(first, slowSchedule(20), {
+    const { id: short } = await post(first, slowSchedule(10), {
       prefer: 'respond-async',
       traceparent: `00-${traceId}-00f067aa0ba902b7-01`,
     })
@@ -122,7 +123,7 @@ const [sqlite, postgres] = bothDatabases()
 test('a job whose service is lost each time is given up, and the jobs behind it run', async () => {
   const { env } = await sqlite!.place()
   let service = await start(env, { WORKERS: '1' })
-  const { id: poison } = await post(service, slowSchedule(600))
+  const { id: poison } = await post(service, slowSchedule(400))
   const { id: good } = await post(service, readExamples().assessment as object)
   for (let attempts = 1; attempts <= 3; attempts++) {
     await until(service, poison, (answer) => isRunning(answer) && answer.attempts === attempts)
@@ -149,25 +150,26 @@ test(
       for (const one of [stays, leaves]) await post(one, readExamples().assessment as object, {})
       const before = lines(stays).length
       const ids: string[] = []
-      for (const to of [stays, leaves, stays, leaves, stays, leaves]) ids.push((await post(to, slow)).id)
-      const runs = () => lines(leaves).filter((line) => line.state === 'running').length
-      for (const end = Date.now() + patience; runs() === 0 && Date.now() < end; ) await wait(10)
-      await wait(300 * Math.random())
+      for (let i = 0; i < JOBS; i++) ids.push((await post(i % 2 ? stays : leaves, slow)).id)
+      const count = (state: string) => lines(leaves).filter((line) => line.state === state).length
+      const isAtIt = () => count('completed') > 0 && count('running') > count('completed')
+      for (const end = Date.now() + patience; !isAtIt() && Date.now() < end; ) await wait(10)
       await kill(leaves)
-      const left = lines(leaves).filter((line) => line.state === 'completed').length
+      const left = count('completed')
       for (const id of ids)
         expect(await until(stays, id, isEnded)).toMatchObject({ id, state: 'completed', contentHash })
       const own = lines(stays)
         .slice(before)
         .filter((line) => line.state === 'completed' && ids.includes(line.job)).length
-      expect(runs()).toBeGreaterThan(0)
+      expect(left).toBeGreaterThan(0)
       expect(own).toBeGreaterThan(0)
-      expect(own + left).toBeGreaterThanOrEqual(ids.length - 1)
+      // The kill may have come between a record and its line in the log.
+      expect([JOBS - 1, JOBS]).toContain(own + left)
       shares.push(own)
     }
     const integrity = await (await fetch(`${stays.address}/v1/projects/quay/integrity`)).json()
-    expect(integrity).toMatchObject({ holds: true, records: 1 + rounds * 8 })
-    console.info(`two replicas: ${rounds} kills, of 6 jobs the one that stayed ended ${shares.join(', ')}`)
+    expect(integrity).toMatchObject({ holds: true, records: 1 + rounds * (JOBS + 2) })
+    console.info(`two replicas: ${rounds} kills, of ${JOBS} jobs the one that stayed ended ${shares.join(', ')}`)
   },
   60_000 + rounds * 120_000,
 )
@@ -176,7 +178,7 @@ test('on PostgreSQL a job is picked up within milliseconds', async () => {
   const { env } = await postgres!.place()
   const [here, there] = [await start(env, { WORKERS: '1' }), await start(env, { WORKERS: '1' })]
   const times: number[] = []
-  for (let i = 0; i < 20; i++) {
+  for (let i = 0; i < 11; i++) {
     const { id } = await post(here, readExamples().assessment as object)
     await until(here, id, isEnded)
     const record = (await (await fetch(`${here.address}/v1/assessments/${id}/content`)).json()) as object
@@ -186,7 +188,7 @@ test('on PostgreSQL a job is picked up within milliseconds', async () => {
     times.push((JSON.parse(line) as { time: number }).time - Number.parseInt(id.replaceAll('-', '').slice(0, 12), 16))
   }
   times.sort((a, b) => a - b)
-  console.info(`pick-up: median ${times[10]} ms, 95 % ${times[18]} ms`)
+  console.info(`pick-up: median ${times[5]} ms, largest ${times[10]} ms`)
   // Polling alone would take half a second on average.
-  expect(times[10]).toBeLessThan(250)
+  expect(times[5]).toBeLessThan(250)
 })
