@@ -1560,6 +1560,10 @@ export interface components {
             readonly assessmentSeconds: number;
             /** @description assessments that wait for a thread; beyond that 503 with Retry-After */
             readonly assessmentsWaiting: number;
+            /** @description assessments by `Prefer: respond-async` that wait or run; beyond that 503 with Retry-After */
+            readonly jobs: number;
+            /** @description seconds that `Prefer: wait` is heeded */
+            readonly waitSeconds: number;
             readonly graphql: {
                 /** @description fields above one another in a document */
                 readonly depth: number;

@@ -2,7 +2,7 @@ import { maxHeaderSize } from 'node:http'
 import fastify, { type FastifyInstance, LogController } from 'fastify'
 import type { Config } from './config.ts'
 import { readExamples } from './contract/examples.ts'
-import { limits } from './contract/limits.ts'
+import { LONGEST_WAIT, limits } from './contract/limits.ts'
 import { openapi } from './contract/openapi.ts'
 import { readJson } from './contract/read-json.ts'
 import { engineVersion } from './engine/index.ts'
@@ -119,6 +119,8 @@ export async function buildService(config: Config, store: Store): Promise<Servic
     requestSeconds: config.REQUEST_TIMEOUT,
     assessmentSeconds: config.WORK_TIMEOUT,
     assessmentsWaiting: config.WORK_QUEUE,
+    jobs: config.JOB_QUEUE,
+    waitSeconds: LONGEST_WAIT,
     graphql: documentLimits,
   }))
   await graphqlPlugin(app, { production: config.NODE_ENV === 'production', actorOf: (request) => request.actor! })

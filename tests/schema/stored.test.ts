@@ -8,6 +8,7 @@ import { readExamples } from '../../src/contract/examples.ts'
 import { openapi } from '../../src/contract/openapi.ts'
 import { makeKey } from '../../src/store/keys.ts'
 import { openStore, type Store } from '../../src/store/open-store.ts'
+import { slowSchedule } from '../jobs/slow-schedule.ts'
 
 /** Every answer of the routes of projects and records against the schema that the document names for its status. */
 type Response = { content?: Record<string, { schema: { $ref?: string } }> }
@@ -186,5 +187,26 @@ describe('the typed client', () => {
     const fault = await client.assessment('none').catch((e: unknown) => e)
     expect((fault as KentledgeProblem).problem.type).toBe('/problems/no-such-assessment')
     expect(fault).toBeInstanceOf(KentledgeProblem)
+  })
+
+  test('puts a schedule in line, waits for its record, and hears why there is none', async () => {
+    const { key } = await makeKey(store, { name: 'Pipeline', scopes: ['read', 'write'], projects: ['pier'] })
+    const client = kentledge({ baseUrl, key })
+    await client.putProject('pier', 'Pier')
+    const { id, state } = await client.queue('pier', example)
+    expect(state).toBe('queued')
+    const told: Schemas['Job']['progress'][] = []
+    const record = await client.waitFor(id, (progress) => told.push(progress))
+    expect(record).toMatchObject({ id, revision: 1, state: 'completed', actor: 'Pipeline' })
+    expect(told.length).toBeGreaterThan(0)
+    const problemOf = (run: Promise<unknown>) => run.catch((e: unknown) => (e as KentledgeProblem).problem.type)
+    const wrong = { ...example, title: '' }
+    expect(await problemOf(client.queue('pier', wrong).then((job) => client.waitFor(job.id)))).toBe(
+      '/problems/invalid-request',
+    )
+    const one = await client.queue('pier', slowSchedule(300) as never)
+    expect((await client.cancel(one.id)).state).toBe('cancelled')
+    expect(await problemOf(client.waitFor(one.id))).toBe('/problems/assessment-cancelled')
+    expect(await problemOf(client.cancel(id))).toBe('/problems/assessment-ended')
   })
 })

@@ -1,4 +1,5 @@
 import type { FastifyRequest } from 'fastify'
+import { LONGEST_WAIT } from '../../contract/limits.ts'
 import { answerBetter, answerOnce, type Keep, type Reply } from '../../operations/answer-once.ts'
 import type { Office } from '../../operations/office.ts'
 import { queueAssessment } from '../../operations/queue-assessment.ts'
@@ -9,8 +10,6 @@ import { watchJob } from '../../operations/watch-job.ts'
 import type { Preferences } from '../prefer.ts'
 import { recordReply } from './record-reply.ts'
 
-/** A client waits at most so long, s: proxies end longer requests. */
-export const LONGEST_WAIT = 60
 /** Clients that poll do so about this often, s. */
 export const POLL = '1'
 
