@@ -2,6 +2,7 @@ import multipart from '@fastify/multipart'
 import type { FastifyInstance } from 'fastify'
 import type { AssessTask } from '../../operations/assess-in-thread.ts'
 import type { Office } from '../../operations/office.ts'
+import { leaves } from '../leaves.ts'
 import { optionsOf } from './calculators.ts'
 import { projectAssessments } from './project-assessments.ts'
 import { scheduleBody } from './schedule-body.ts'
@@ -24,9 +25,7 @@ export async function assessments(app: FastifyInstance, { assess, bodyLimit, off
   app.post('/v1/assessments', async (request, reply) => {
     const options = optionsOf(request)
     const schedule = await scheduleBody(request, bodyLimit)
-    const gone = new AbortController()
-    reply.raw.on('close', () => gone.abort())
-    const bytes = await assess({ ...schedule, options }, gone.signal)
+    const bytes = await assess({ ...schedule, options }, leaves(reply.raw))
     return reply.type('application/json; charset=utf-8').send(bytes)
   })
   projectAssessments(app, office, bodyLimit)
