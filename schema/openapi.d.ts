@@ -1423,17 +1423,29 @@ export interface operations {
             };
         };
         readonly responses: {
-            /** @description The answer */
+            /** @description The answer; with `Accept: text/html` as a page */
             readonly 200: {
                 headers: {
+                    /** @description Accept */
+                    readonly Vary?: string;
                     readonly [name: string]: unknown;
                 };
                 content: {
                     readonly "application/json": components["schemas"]["SinglePileAnswer"];
+                    readonly "text/html": string;
                 };
             };
             /** @description The body or URL cannot be read */
             readonly 400: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Neither JSON nor HTML is accepted */
+            readonly 406: {
                 headers: {
                     readonly [name: string]: unknown;
                 };
@@ -1566,17 +1578,29 @@ export interface operations {
             };
         };
         readonly responses: {
-            /** @description The answer */
+            /** @description The answer; with `Accept: text/html` as a page */
             readonly 200: {
                 headers: {
+                    /** @description Accept */
+                    readonly Vary?: string;
                     readonly [name: string]: unknown;
                 };
                 content: {
                     readonly "application/json": components["schemas"]["BlockAnswer"];
+                    readonly "text/html": string;
                 };
             };
             /** @description The body or URL cannot be read */
             readonly 400: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Neither JSON nor HTML is accepted */
+            readonly 406: {
                 headers: {
                     readonly [name: string]: unknown;
                 };
@@ -1712,17 +1736,29 @@ export interface operations {
             };
         };
         readonly responses: {
-            /** @description The answer */
+            /** @description The answer; with `Accept: text/html` as a page */
             readonly 200: {
                 headers: {
+                    /** @description Accept */
+                    readonly Vary?: string;
                     readonly [name: string]: unknown;
                 };
                 content: {
                     readonly "application/json": components["schemas"]["GroupAnswer"];
+                    readonly "text/html": string;
                 };
             };
             /** @description The body or URL cannot be read */
             readonly 400: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Neither JSON nor HTML is accepted */
+            readonly 406: {
                 headers: {
                     readonly [name: string]: unknown;
                 };
@@ -1850,17 +1886,29 @@ export interface operations {
             };
         };
         readonly responses: {
-            /** @description The answer */
+            /** @description The answer; with `Accept: text/html` as a page */
             readonly 200: {
                 headers: {
+                    /** @description Accept */
+                    readonly Vary?: string;
                     readonly [name: string]: unknown;
                 };
                 content: {
                     readonly "application/json": components["schemas"]["SettlementAnswer"];
+                    readonly "text/html": string;
                 };
             };
             /** @description The body or URL cannot be read */
             readonly 400: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Neither JSON nor HTML is accepted */
+            readonly 406: {
                 headers: {
                     readonly [name: string]: unknown;
                 };
@@ -2337,17 +2385,29 @@ export interface operations {
             };
         };
         readonly responses: {
-            /** @description The answer */
+            /** @description The answer; with `Accept: text/html` as a page */
             readonly 200: {
                 headers: {
+                    /** @description Accept */
+                    readonly Vary?: string;
                     readonly [name: string]: unknown;
                 };
                 content: {
                     readonly "application/json": components["schemas"]["AssessmentAnswer"];
+                    readonly "text/html": string;
                 };
             };
             /** @description The body or URL cannot be read */
             readonly 400: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Neither JSON nor HTML is accepted */
+            readonly 406: {
                 headers: {
                     readonly [name: string]: unknown;
                 };

@@ -10,6 +10,7 @@ import { accessLog, traceIdOf } from './http/access-log.ts'
 import { answerClientError } from './http/client-errors.ts'
 import { type Drain, drain } from './http/drain.ts'
 import { metrics } from './http/metrics.ts'
+import { pageScripts } from './http/pages.ts'
 import { probes } from './http/probes.ts'
 import { problems, sendProblem } from './http/problems.ts'
 import { reference } from './http/reference.ts'
@@ -58,6 +59,7 @@ export async function buildService(config: Config): Promise<Service> {
   probes(app)
   calculators(app)
   await app.register(assessments, { assess: (task, gone) => pool.run(task, gone), bodyLimit: config.BODY_LIMIT })
+  await pageScripts(app)
   await app.register(reference, { document: openapi(readExamples()) })
   app.post('/v1/replay', async (request) => replayTrace(request.body))
   app.get('/v1/methods', async () => listMethods())

@@ -35,7 +35,7 @@ const rooms: Readonly<Record<string, Room>> = {
   store: { floor: 10, only: ['engine', 'errors.ts'] },
   jobs: { floor: 10, only: ['engine', 'errors.ts'] },
   operations: { floor: 11 },
-  http: { floor: 12, only: ['operations', 'contract', 'errors.ts', 'engine'] },
+  http: { floor: 12, only: ['operations', 'contract', 'print', 'errors.ts', 'engine'] },
   graphql: { floor: 12, only: ['operations', 'contract', 'errors.ts', 'engine'] },
   'app.ts': { floor: 13 },
   'main.ts': { floor: 14 },

@@ -114,6 +114,12 @@ const json = (id: string, description: string) => ({
   description,
   content: { 'application/json': { schema: schemaRef(id) } },
 })
+/** A calculator's answer, or the sheet of it to look at and to sign. */
+const answerOrPage = (id: string) => ({
+  description: 'The answer; with `Accept: text/html` as a page',
+  headers: { Vary: { description: 'Accept', schema: { type: 'string' } } },
+  content: { 'application/json': { schema: schemaRef(id) }, 'text/html': { schema: { type: 'string' } } },
+})
 const problem = (description: string) => ({
   description,
   content: { 'application/problem+json': { schema: schemaRef('Problem') } },
@@ -150,6 +156,7 @@ export function openapi(examples: Readonly<Record<string, unknown>>) {
         },
       }
     }
+    const acceptable = example ? { '406': problem('Neither JSON nor HTML is accepted') } : {}
     const slow = path === '/v1/assessments' ? { '504': problem('The work took longer than the service allows') } : {}
     paths[path] = {
       post: {
@@ -158,7 +165,12 @@ export function openapi(examples: Readonly<Record<string, unknown>>) {
         tags: ['calculators'],
         ...(example && { parameters: path === '/v1/assessments' ? [...options, oneCap] : options }),
         requestBody: { required: true, content },
-        responses: { '200': json(answer, 'The answer'), ...failures, ...slow },
+        responses: {
+          '200': example ? answerOrPage(answer) : json(answer, 'The answer'),
+          ...failures,
+          ...acceptable,
+          ...slow,
+        },
       },
     }
   }

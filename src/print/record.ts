@@ -6,7 +6,9 @@ import type {
   calculateSettlement,
   calculateSinglePile,
 } from '../engine/index.ts'
+import type { Notice } from '../engine/notice.ts'
 import type { GroupRequest, SettlementRequest, SinglePileRequest } from '../engine/requests.ts'
+import type { Trace } from '../engine/trace/step.ts'
 
 /** What the pages are made from: plain objects as they are stored or answered. Nothing here is made up by `print/`. */
 
@@ -29,8 +31,12 @@ export type Issue = {
   readonly signatures: readonly Signature[]
 }
 
-export type AssessmentReply = ReturnType<typeof assess>
-export type AssessmentResult = AssessmentReply['result']
+export type AssessmentResult = ReturnType<typeof assess>['result']
+export type AssessmentReply = {
+  readonly result: AssessmentResult
+  readonly notices: readonly Notice[]
+  readonly trace?: Trace
+}
 export type CapResult = AssessmentResult['caps'][number]
 export type CheckResult = CapResult['checks'][number]
 export type NeighbourResult = AssessmentResult['neighbours'][number]

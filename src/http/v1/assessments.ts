@@ -2,6 +2,7 @@ import multipart from '@fastify/multipart'
 import type { FastifyInstance, FastifyRequest } from 'fastify'
 import { Problem, problemError, problemOf } from '../../errors.ts'
 import type { AssessTask } from '../../operations/assess-in-thread.ts'
+import { pageHeaders, pageWanted } from '../pages.ts'
 import { optionsOf } from './calculators.ts'
 
 type Options = {
@@ -19,11 +20,13 @@ export async function assessments(app: FastifyInstance, { assess, bodyLimit }: O
     done(null, body),
   )
   app.post('/v1/assessments', async (request, reply) => {
+    const page = pageWanted(request, reply)
     const options = optionsOf(request)
     const parts = request.isMultipart() ? await formParts(request, bodyLimit) : { schedule: String(request.body ?? '') }
     const gone = new AbortController()
     reply.raw.on('close', () => gone.abort())
-    const bytes = await assess({ ...parts, options }, gone.signal)
+    const bytes = await assess({ ...parts, options, page }, gone.signal)
+    if (page) return pageHeaders(reply).send(bytes)
     return reply.type('application/json; charset=utf-8').send(bytes)
   })
 }

@@ -5,6 +5,8 @@ import { calculateBlock } from '../../operations/calculate-block.ts'
 import { calculateGroup } from '../../operations/calculate-group.ts'
 import { calculateSettlement } from '../../operations/calculate-settlement.ts'
 import { calculateSinglePile } from '../../operations/calculate-single-pile.ts'
+import { printCalculation } from '../../operations/print-calculation.ts'
+import { pageHeaders, pageWanted } from '../pages.ts'
 
 /** `?trace=none` leaves the trace out; `?of=<pointer>` gives only the steps behind one part of the result. */
 export function optionsOf(request: FastifyRequest): Options {
@@ -18,18 +20,22 @@ export function optionsOf(request: FastifyRequest): Options {
   return { trace: trace === 'full', of, cap }
 }
 
-const routes = {
-  '/v1/single-pile': calculateSinglePile,
-  '/v1/block': calculateBlock,
-  '/v1/group': calculateGroup,
-  '/v1/settlement': calculateSettlement,
-}
+const operations = {
+  'single-pile': calculateSinglePile,
+  block: calculateBlock,
+  group: calculateGroup,
+  settlement: calculateSettlement,
+} as const
 
 /** The calculators: pure, nothing is stored. Plain JSON.stringify is the fastest serializer for replies of this size. */
 export function calculators(app: FastifyInstance): void {
-  for (const [url, operation] of Object.entries(routes)) {
-    app.post(url, async (request, reply) =>
-      reply.type('application/json; charset=utf-8').send(JSON.stringify(operation(request.body, optionsOf(request)))),
-    )
+  for (const kind of Object.keys(operations) as (keyof typeof operations)[]) {
+    app.post(`/v1/${kind}`, async (request, reply) => {
+      const page = pageWanted(request, reply)
+      const options = optionsOf(request)
+      if (page) return pageHeaders(reply).send(printCalculation(kind, request.body, options))
+      const answer = JSON.stringify(operations[kind](request.body, options))
+      return reply.type('application/json; charset=utf-8').send(answer)
+    })
   }
 }

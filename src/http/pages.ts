@@ -1,0 +1,32 @@
+import { readFile } from 'node:fs/promises'
+import type { FastifyInstance, FastifyReply, FastifyRequest } from 'fastify'
+import { preferred } from '../contract/accepted.ts'
+import { Problem } from '../errors.ts'
+import { pagePolicy } from '../print/page.ts'
+
+const offered = ['application/json', 'text/html'] as const
+
+/** Whether the answer is to be a page; JSON where nothing is said. Throws a problem where neither is acceptable. */
+export function pageWanted(request: FastifyRequest, reply: FastifyReply): boolean {
+  reply.header('vary', 'Accept')
+  const type = preferred(request.headers.accept, offered)
+  if (!type) throw new Problem('not-acceptable')
+  return type === 'text/html'
+}
+
+/** What goes with every page: its policy, and that it is of no use to others. */
+export const pageHeaders = (reply: FastifyReply): FastifyReply =>
+  reply
+    .header('content-security-policy', pagePolicy)
+    .header('x-content-type-options', 'nosniff')
+    .header('referrer-policy', 'no-referrer')
+    .header('cache-control', 'no-store')
+    .type('text/html; charset=utf-8')
+
+/** The scripts that pages load: additions to what is readable without. */
+export async function pageScripts(app: FastifyInstance): Promise<void> {
+  const plan = await readFile(new URL('../print/plan.js', import.meta.url))
+  app.get('/print/plan.js', async (_request, reply) =>
+    reply.header('x-content-type-options', 'nosniff').type('text/javascript; charset=utf-8').send(plan),
+  )
+}
