@@ -31,7 +31,8 @@ function patient(retries: number, base: typeof fetch): typeof fetch {
 /** The way an exporter written in TypeScript calls the service: typed requests and answers, problems as errors. */
 export function kentledge({ baseUrl, retries = 3, fetch: base = globalThis.fetch }: ClientOptions) {
   const http = patient(retries, base)
-  const client = createClient<paths>({ baseUrl, fetch: (request) => http(request) })
+  // The pages that the same routes answer with are for eyes.
+  const client = createClient<paths, 'application/json'>({ baseUrl, fetch: (request) => http(request) })
   type Trace = { readonly trace?: 'none'; readonly of?: string; readonly cap?: string }
   const taken = <T>({ data, error }: { data?: T; error?: unknown }): T => {
     if (data !== undefined) return data

@@ -1,9 +1,12 @@
+import type { SettlementRequest } from '../engine/requests.ts'
+import type { Trace } from '../engine/trace/step.ts'
 import { curveFigure } from './draw/curve-figure.ts'
 import { depthFigure } from './draw/depth-figure.ts'
 import { layoutFigure } from './draw/layout-figure.ts'
 import { givenWords } from './given-words.ts'
 import { html, type Markup } from './markup.ts'
 import { answerLine, type Outcome, outcomeTable } from './outcome-table.ts'
+import { unitLabel } from './quantity.ts'
 import type { Calculation } from './record.ts'
 import { type SheetParts, sheetPage } from './sheet.ts'
 import { blockAngle, pilePoints, shaftStretches } from './trace-views.ts'
@@ -160,7 +163,8 @@ function partsOf(c: Calculation): Parts {
                 }),
               ]
             : []),
-          depth(),
+          settledDepth(c.request, single),
+          ...interactionCurves(trace),
           ...(curve
             ? [
                 curveFigure('curve', {
@@ -224,3 +228,45 @@ export const blockOutcomes = (at: string, r: BlockNumbers): Outcome[] => [
   { name: 'sides of the block', pointer: `${at}/sideResistance`, value: r.sideResistance, unit: 'kN' },
   { name: 'base of the block', pointer: `${at}/baseResistance`, value: r.baseResistance, unit: 'kN' },
 ]
+
+type SettledPile = Extract<Calculation, { kind: 'settlement' }>['answer']['result']['single']
+
+/** Ground and pile under the load that it settles by; with stress and load along it where the method solves for them. */
+function settledDepth({ ground, pile }: SettlementRequest, single: SettledPile): Markup {
+  const { axial } = single
+  const head = pile.headDepth ?? 0
+  const shaft = (axial ?? []).map((a, i) => ({
+    top: axial![i - 1]?.depth ?? head,
+    bottom: a.depth,
+    unit: a.shaftStress,
+  }))
+  const along = [
+    { depth: head, load: single.load },
+    ...(axial ?? []).map((a) => ({ depth: a.depth, load: a.axialLoad })),
+  ]
+  return depthFigure('depth', {
+    ground,
+    pile,
+    shaft,
+    ...(axial && { axial: { head: single.load, toe: axial.at(-1)!.axialLoad, along } }),
+    uplift: single.load < 0,
+  })
+}
+
+/** Interaction of two piles with their spacing, where a solution was read from such a table. */
+function interactionCurves(trace: Trace): Markup[] {
+  return trace.steps.flatMap((step, i) => {
+    if (step.kind !== 'solution' || !step.table || step.symbol !== 'alpha') return []
+    const [x, y] = step.table.columns
+    if (!x || !y) return []
+    return [
+      curveFigure(`interaction-${i}`, {
+        title: 'Interaction of two piles',
+        description: "Share of a pile's settlement that its neighbour takes, by spacing; dots are the computed points.",
+        x: { title: x.symbol, unit: unitLabel(x.unit) },
+        y: { title: 'interaction factor', unit: '–' },
+        curve: step.table.rows.map(([s = 0, alpha = 0]) => ({ x: s, y: alpha })),
+      }),
+    ]
+  })
+}

@@ -30,7 +30,7 @@ function split(digits: string): { main: string; guard: string } {
   const point = digits.indexOf('.')
   if (point === -1) return { main: digits, guard: '' }
   const leading = /^0\.0*/.exec(digits)?.[0].length ?? 0
-  const after = leading > 0 ? leading + PLAIN : Math.max(point, PLAIN + 1)
+  const after = leading > 0 ? leading + PLAIN : point >= PLAIN ? point : PLAIN + 1
   return { main: digits.slice(0, after), guard: digits.slice(after) }
 }
 

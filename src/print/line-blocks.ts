@@ -1,20 +1,22 @@
 import type { OperandLine, RangeLine, Step } from '../engine/trace/step.ts'
 import { formulaLine, numbersLine } from './formula-line.ts'
+import { from, head, SHORT } from './line-head.ts'
 import type { Group, Line, Lines } from './lines.ts'
 import { html, joined, type Markup } from './markup.ts'
 import { number, quantity, unitLabel } from './quantity.ts'
 import { lineNumber, reference, usedIn } from './references.ts'
 import { lineLabels } from './sections.ts'
+import { solution, solutionTable } from './solution-block.ts'
 import { symbol } from './symbol.ts'
 
 type OfKind<K extends Step['kind']> = Extract<Step, { kind: K }>
-type Cited = { readonly source: { readonly key: string; readonly locator: string } }
 
 /** How one bundle of lines is printed: what it is called, the formula, the numbers put in, the result, the source. */
 export function lineBlock(group: Group, lines: Lines, layerNames: readonly string[]): Markup {
   const [first] = group.lines
   const { step } = first!
-  if (group.lines.length > 1) return table(group, lines, layerNames)
+  if (group.lines.length > 1)
+    return step.kind === 'solution' ? solutionTable(group, lines, layerNames) : table(group, lines, layerNames)
   return html`<section class="line" id="s${first!.number}" data-step="${step.id}">
 ${head(step, first)}${body(step, lines)}
 <p class="foot">${foot(step, lines)}${after(first!, lines)}</p>
@@ -22,19 +24,10 @@ ${head(step, first)}${body(step, lines)}
 `
 }
 
-function head(step: Step, line?: Line): Markup {
-  return html`<h4>${line && lineNumber(line.number)} ${symbol(step.symbol)} <span class="name">${step.name}</span>${
-    'source' in step && step.source && cite({ source: step.source })
-  }</h4>`
-}
-
-const cite = ({ source }: Cited): Markup =>
-  html`<a class="cite" href="#source-${source.key}">${source.key}, ${source.locator}</a>`
-
 function body(step: Step, lines: Lines): Markup {
   switch (step.kind) {
     case 'formula':
-      return html`<div class="wide">${formulaLine(step)}${numbersLine(step)}</div>`
+      return html`<div class="set">${formulaLine(step)}${numbersLine(step)}</div>`
     case 'sum':
       return sum(step, lines)
     case 'lookup':
@@ -46,11 +39,6 @@ function body(step: Step, lines: Lines): Markup {
     case 'input':
       return html``
   }
-}
-
-function from(operand: OperandLine, lines: Lines): Markup | undefined {
-  const line = lines.of(operand.from)
-  return line && reference(line.number)
 }
 
 function foot(step: Step, lines: Lines): Markup {
@@ -106,12 +94,6 @@ function lookup(step: OfKind<'lookup'>, lines: Lines): Markup {
   }${x && html` at ${symbol(x.symbol)} = <span class="in">${quantity(x.value, x.unit)}</span>${from(x, lines)}`}: <span class="out">${quantity(step.value, step.unit)}</span></p>`
 }
 
-function solution(step: OfKind<'solution'>): Markup {
-  const residuals = step.residuals.map((r) => html`<li>${r.name}: ${number(r.value)}</li>`)
-  const unknowns = step.unknowns.map((u, i) => html`${i > 0 && ', '}${symbol(u.symbol)} = ${quantity(u.value, u.unit)}`)
-  return html`<p class="sum">= <span class="out">${quantity(step.value, step.unit)}</span></p><p class="solved">Solved numerically: ${step.method}. Unknowns: ${joined(unknowns)}. Residuals, each to stay below ${number(step.tolerance)}:</p><ul class="residuals">${joined(residuals)}</ul>`
-}
-
 /** Lines of one formula: typeset once, its numbers in columns. What is the same in every line stands above the columns. */
 function table(group: Group, lines: Lines, layerNames: readonly string[]): Markup {
   const all = group.lines as readonly (Line & { readonly step: OfKind<'formula'> })[]
@@ -134,8 +116,8 @@ function table(group: Group, lines: Lines, layerNames: readonly string[]): Marku
     )}<td class="num out">${number(line.step.value)}</td><td class="uses">${usedIn(users)}</td></tr>
 `
   })
-  return html`<section class="line several">
-${head(step)}<div class="pair"><div class="rule"><div class="wide">${formulaLine(step)}</div>${
+  return html`<section class="line several${all.length <= SHORT && ' whole'}">
+${head(step)}<div class="pair"><div class="rule"><div class="set">${formulaLine(step)}</div>${
     constants.length > 0 &&
     html`<p class="with">with ${constants.map((o, i) => html`${i > 0 && ', '}${symbol(o.symbol)} = <span class="in" data-symbol="${o.symbol}">${quantity(o.value, o.unit)}</span>${from(o, lines)}`)}</p>`
   }${

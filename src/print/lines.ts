@@ -65,12 +65,19 @@ function distinct(steps: readonly Step[]): { drafts: Draft[]; byId: Map<string, 
   return { drafts: [...bySaying.values()], byId }
 }
 
-/** What steps of one bundle have alike; anything but a formula stands alone. */
+/** What steps of one bundle have alike: formulas one text, solutions one method; all others stand alone. */
 function alike(step: Step): string {
+  if (step.kind === 'solution' && !step.table && !step.mesh) {
+    const parts = [...step.operands, ...step.residuals].map((o) => ('symbol' in o ? o.symbol : o.name))
+    return [sectionOf(step.id).key, nameOfMany(step.name), step.method, step.unit, ...parts].join('|')
+  }
   if (step.kind !== 'formula') return step.id
   const operands = step.operands.map((o) => `${o.symbol} ${o.unit}`).join(',')
   return [sectionOf(step.id).key, step.symbol, step.name, step.formula, step.unit, operands].join('|')
 }
+
+/** The name of lines that only a number in it tells apart. */
+export const nameOfMany = (name: string): string => name.replace(/ \d+\b/g, '')
 
 function bundled(drafts: readonly Draft[]): Bundle[] {
   const made = new Map<string, Bundle>()

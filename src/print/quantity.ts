@@ -18,6 +18,8 @@ const written: Readonly<Record<UnitCode, string>> = {
   'kN.m/rad': 'kN·m/rad',
   'rad/(kN.m)': 'rad/(kN·m)',
   'm/kN': 'm/kN',
+  '1/kN': '1/kN',
+  'kN/rad': 'kN/rad',
   deg: '°',
   rad: 'rad',
 }
@@ -49,7 +51,7 @@ export function shortQuantity(value: number, unit: UnitCode): string {
 const mathUnit = (unit: UnitCode): string => {
   const label = unitLabel(unit)
   if (label === '') return ''
-  return `${label === '°' ? '' : '<mspace width="0.17em"/>'}<mtext>${label}</mtext>`
+  return `${label === '°' ? '' : '<mspace width="0.17em"></mspace>'}<mtext>${label}</mtext>`
 }
 
 /** The same in MathML. */

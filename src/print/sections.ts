@@ -16,6 +16,7 @@ const titles: readonly (readonly [pattern: RegExp, title: string])[] = [
   [/^block\/side\//, 'Sides of the block'],
   [/^block\//, 'The block of soil and piles'],
   [/^design\//, 'Margin by the design basis'],
+  [/^axial\//, 'Load along the pile'],
   [/^plan\//, 'The piles in plan'],
   [/^group\/(flexibility|K_)/, 'Stiffness of the group'],
   [/^group\/statics\//, 'Loads of the piles by statics'],

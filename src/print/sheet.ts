@@ -24,7 +24,7 @@ export type SheetParts = {
 
 /** The stated rule of rounding (target 37). The test of printed lines holds the service to it. */
 export const roundingRule =
-  'Numbers are printed with seven figures, fewer where they are exact in fewer; those set small are guard figures. A line computed again from its operands as they are printed gives the printed result within one unit of its last full-size figure; where operands cancel, within what the last printed figure of the operands makes of it. Verdict and drawings show four figures.'
+  'Numbers are printed with seven figures, fewer where they are exact in fewer; those set small are guard figures. A line computed again from its operands as they are printed gives the printed result within half a unit of its fourth figure; where operands cancel, within what half a unit of their last printed figures makes of it. Verdict and drawings show four figures.'
 
 /** A calculation sheet: the verdict first, then what it rests on, in the order in which a checker follows it. */
 export function sheetPage(sheet: SheetParts): string {

@@ -132,7 +132,7 @@ export function slottedMathml(
   const index = new Map(operands.map((o, i) => [o.symbol, i]))
   const root = parsed(formula)
   const write = (o: OperandLine) => ({ tex: `\\text{@${index.get(o.symbol)}@}`, power: powers[index.get(o.symbol)!]! })
-  const pieces = render(texFormula(root, numbers(root, operands, write))).split(/<mtext>@(\d+)@<\/mtext>/)
+  const pieces = render(texFormula(root, numbers(root, operands, write))).split(/<mtext[^>]*>@(\d+)@<\/mtext>/)
   if (slotted.size < MOST_SLOTTED) slotted.set(key, pieces)
   return pieces
 }

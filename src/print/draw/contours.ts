@@ -23,7 +23,7 @@ export function contours(spots: readonly Spot[], levels: readonly number[]): Con
       const corners = [0, 1, 2].map((k) => spots[triangles[i + k]!]!)
       const cut = corners.flatMap((a, k) => crossing(a, corners[(k + 1) % 3]!, level))
       const [p, q] = cut
-      if (p && q) segments.push([p[0], p[1], q[0], q[1]])
+      if (p && q && (p[0] !== q[0] || p[1] !== q[1])) segments.push([p[0], p[1], q[0], q[1]])
     }
     return segments.length === 0 ? [] : [{ level, segments }]
   })

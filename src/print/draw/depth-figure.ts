@@ -11,14 +11,21 @@ export type Stretch = {
   readonly top: number
   readonly bottom: number
   readonly unit: number
-  readonly resistance: number
+  readonly resistance?: number
 }
 export type DepthView = {
   readonly ground: GroundProfile
   readonly pile: PileType
   readonly shaft: readonly Stretch[]
-  /** Load at head and toe of the pile when the ultimate resistance is reached, kN. */
-  readonly axial?: { readonly head: number; readonly toe: number }
+  /**
+   * Load at head and toe of the pile, kN: those at which the ultimate resistance is reached; with `along`, loads at depths under
+   * a given load.
+   */
+  readonly axial?: {
+    readonly head: number
+    readonly toe: number
+    readonly along?: readonly { readonly depth: number; readonly load: number }[]
+  }
   readonly uplift: boolean
 }
 
@@ -50,7 +57,14 @@ export function depthFigure(id: string, view: DepthView): Markup {
       unit: 'kPa',
     },
     ...(view.shaft.length > 0
-      ? [{ width: 118, draw: (p: Panel) => unitShaft(p, view.shaft, z), title: 'unit shaft resistance', unit: 'kPa' }]
+      ? [
+          {
+            width: 118,
+            draw: (p: Panel) => unitShaft(p, view.shaft, z),
+            title: view.axial?.along ? 'shaft stress' : 'unit shaft resistance',
+            unit: 'kPa',
+          },
+        ]
       : []),
     ...(view.axial
       ? [
@@ -76,7 +90,11 @@ export function depthFigure(id: string, view: DepthView): Markup {
       height: TOP + HEIGHT + 26,
       title: `Ground and pile with depth${ground.name ? `, ${ground.name}` : ''}`,
       description: `Depth in m below the surface, pile to scale. Dashes: cohesive, dots: granular, courses: rock; triangle: water table and its depth.${
-        view.axial ? ' Loads are those at which the ultimate resistance is reached.' : ''
+        view.axial?.along
+          ? ' Stress and load are those under the given load.'
+          : view.axial
+            ? ' Loads are those at which the ultimate resistance is reached.'
+            : ''
       }`,
     },
     html`${patterns(id)}${depthAxis(z, x)}${joined(panels)}`,
@@ -216,17 +234,23 @@ function unitShaft(panel: Panel, shaft: readonly Stretch[], z: ScaleLinear<numbe
 function axial(panel: Panel, view: DepthView, z: ScaleLinear<number, number>, head: number, toe: number): Markup {
   const ends = view.axial!
   const { x, axis } = across(panel, ends.head)
-  let load = ends.head
-  const points: [number, number][] = [[load, head]]
-  for (const s of view.shaft) {
-    points.push([load, s.top])
-    load -= s.resistance
-    points.push([load, s.bottom])
-  }
-  points.push([load, toe])
+  const points =
+    ends.along?.map((p): [number, number] => [p.load, p.depth]) ?? shedLoads(view.shaft, ends.head, head, toe)
   const path = points
     .map(([q, depth], i) => `${i === 0 ? 'M' : 'L'}${round(x(Math.max(0, q)))} ${round(z(depth))}`)
     .join('')
   const toeLeft = x(ends.toe) > panel.x + panel.width * 0.55
   return html`${axis}<path class="profile" d="${path}"/><path class="profile" d="M${panel.x} ${round(z(toe))}H${round(x(ends.toe))}"/><text class="label halo end" x="${round(x(ends.head) - 4)}" y="${round(z(head) - 4)}">${short(ends.head)}</text><text class="label halo ${toeLeft ? 'end' : ''}" x="${round(x(ends.toe) + (toeLeft ? -4 : 4))}" y="${round(z(toe) + 13)}">${short(ends.toe)}</text>`
+}
+
+/** The ultimate resistance from the head down, less what the shaft has taken. */
+function shedLoads(shaft: readonly Stretch[], atHead: number, head: number, toe: number): [number, number][] {
+  let load = atHead
+  const points: [number, number][] = [[load, head]]
+  for (const s of shaft) {
+    points.push([load, s.top])
+    load -= s.resistance ?? 0
+    points.push([load, s.bottom])
+  }
+  return [...points, [load, toe]]
 }
