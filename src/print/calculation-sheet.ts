@@ -6,7 +6,7 @@ import { layoutFigure } from './draw/layout-figure.ts'
 import { givenWords } from './given-words.ts'
 import { html, type Markup } from './markup.ts'
 import { answerLine, type Outcome, outcomeTable } from './outcome-table.ts'
-import { unitLabel } from './quantity.ts'
+import { shortQuantity, unitLabel } from './quantity.ts'
 import type { Calculation } from './record.ts'
 import { type SheetParts, sheetPage } from './sheet.ts'
 import { blockAngle, pilePoints, shaftStretches } from './trace-views.ts'
@@ -105,7 +105,6 @@ function partsOf(c: Calculation): Parts {
     }
     case 'settlement': {
       const { single, group } = c.answer.result
-      const curve = curveOf(c.answer.result)
       const main = group ?? single
       return {
         subject: `Settlement${where}`,
@@ -165,27 +164,34 @@ function partsOf(c: Calculation): Parts {
             : []),
           settledDepth(c.request, single),
           ...interactionCurves(trace),
-          ...(curve
-            ? [
-                curveFigure('curve', {
-                  title: 'Load and settlement',
-                  description: 'Settlement of the pile head under a rising load; dots are the computed points.',
-                  x: { title: 'load', unit: 'kN' },
-                  y: { title: 'settlement', unit: 'mm', downward: true },
-                  curve,
-                }),
-              ]
-            : []),
+          ...settlementCurves(c.answer.result, c.request.load.V),
         ],
       }
     }
   }
 }
 
-/** A load–settlement curve, where the method of settlement gives one. */
-function curveOf(result: object): { x: number; y: number }[] | undefined {
-  const { curve } = result as { curve?: readonly { load: number; settlement: number }[] }
-  return curve && curve.length > 1 ? curve.map((p) => ({ x: p.load, y: p.settlement })) : undefined
+type Settled = Extract<Calculation, { kind: 'settlement' }>['answer']['result']
+
+/** Load–settlement curves, where the method gives them; the cross is the load that was asked about. */
+function settlementCurves({ single, group }: Settled, V: number): Markup[] {
+  const one = (id: string, of: string, points: Settled['single']['curve'], at: { load: number; settlement: number }) =>
+    points === undefined || points.length < 2
+      ? []
+      : [
+          curveFigure(id, {
+            title: `Load and settlement of ${of}`,
+            description: 'Settlement under a rising load; dots are the computed points, the cross is the given load.',
+            x: { title: 'load', unit: 'kN' },
+            y: { title: 'settlement', unit: 'mm', downward: true },
+            curve: points.map((p) => ({ x: p.load, y: p.settlement })),
+            marks: [{ x: at.load, y: at.settlement, name: shortQuantity(at.settlement, 'mm') }],
+          }),
+        ]
+  return [
+    ...one('curve-one', 'one pile', single.curve, single),
+    ...(group ? one('curve-group', 'the group', group.curve, { load: V, settlement: group.settlement }) : []),
+  ]
 }
 
 function safeAnswer(words: string, r: Safe): Markup {
