@@ -26,7 +26,12 @@ const operandsOf = (step: Step) => ('operands' in step ? step.operands : [])
  */
 export function linesOf(trace: Trace): Lines {
   const { drafts, byId } = distinct(trace.steps)
-  const given = drafts.filter((d) => d.step.kind === 'input')
+  const given = [
+    ...Map.groupBy(
+      drafts.filter((d) => d.step.kind === 'input'),
+      (d) => alikeInput(d.step),
+    ).values(),
+  ].flat()
   const bundles = inOrder(bundled(drafts.filter((d) => d.step.kind !== 'input')))
   let count = 0
   for (const draft of [...given, ...bundles.flatMap((b) => b.drafts)]) draft.number = ++count
@@ -74,6 +79,12 @@ function alike(step: Step): string {
   if (step.kind !== 'formula') return step.id
   const operands = step.operands.map((o) => `${o.symbol} ${o.unit}`).join(',')
   return [sectionOf(step.id).key, step.symbol, step.name, step.formula, step.unit, operands].join('|')
+}
+
+/** What inputs have alike that only a number in their name, or their value, tells apart. */
+export function alikeInput(step: Step): string {
+  const why = step.kind === 'input' ? (step.from ?? step.reason) : undefined
+  return JSON.stringify([step.symbol, nameOfMany(step.name), why])
 }
 
 /** The name of lines that only a number in it tells apart. */

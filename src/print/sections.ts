@@ -3,6 +3,7 @@ export type Section = { readonly key: string; readonly title: string }
 
 const titles: readonly (readonly [pattern: RegExp, title: string])[] = [
   [/^settlement\/(pile|ground|stiffness)\//, 'Stiffness of a single pile'],
+  [/^settlement\/(K_|matrix\/)/, 'Stiffness handed back to the structural model'],
   [/^settlement\/group\//, 'Stiffness of the group'],
   [/^(stiffness)\//, 'Stiffness of a single pile'],
   [/^pile\//, 'The pile'],
@@ -16,6 +17,8 @@ const titles: readonly (readonly [pattern: RegExp, title: string])[] = [
   [/^block\/side\//, 'Sides of the block'],
   [/^block\//, 'The block of soil and piles'],
   [/^design\//, 'Margin by the design basis'],
+  [/^(softening|curve)\//, 'Softening under load'],
+  [/^(V|Mx|My|n|P|s|I)$/, 'Load and settlement of one pile'],
   [/^axial\//, 'Load along the pile'],
   [/^plan\//, 'The piles in plan'],
   [/^group\/(flexibility|K_)/, 'Stiffness of the group'],
@@ -28,13 +31,16 @@ const titles: readonly (readonly [pattern: RegExp, title: string])[] = [
   [/^summary\//, 'Summary'],
 ]
 
+/** Resistances that several caps, or a settlement, rest on. */
+const shared = /^resistance\/(\d+\/)?/
+
 const made = new Map<string, Section>()
 
 /** Resistances of a schedule are shared by caps of one kind: `resistance/<n>/` says nothing to a reader. */
 export function sectionOf(id: string): Section {
   const known = made.get(id)
   if (known) return known
-  const own = id.replace(/^resistance\/\d+\//, '')
+  const own = id.replace(shared, '')
   const title = titles.find(([pattern]) => pattern.test(own))?.[1] ?? 'The calculation'
   const section = { key: title, title }
   if (made.size < 20_000) made.set(id, section)
@@ -46,7 +52,7 @@ export function sectionOf(id: string): Section {
  * counts layers and is given as the layer's name.
  */
 export function lineLabels(ids: readonly (readonly string[])[], layerNames: readonly string[]): string[] {
-  const parts = ids.map((same) => same.map((id) => id.replace(/^resistance\/\d+\//, '').split('/')))
+  const parts = ids.map((same) => same.map((id) => id.replace(shared, '').split('/')))
   const all = parts.flat()
   const length = Math.min(...all.map((p) => p.length))
   const head = (i: number) => all.every((p) => p[i] === all[0]![i])

@@ -12,6 +12,7 @@ const parts: Readonly<Record<string, () => Promise<readonly Finding[]>>> = {
     ...(await (await import('./probe-under-load.ts')).probeUnderLoad()),
     ...(await (await import('./overload.ts')).overload()),
   ],
+  f: async () => (await import('./pages.ts')).pages(),
 }
 
 const print = (line: string) => process.stdout.write(`${line}\n`)
