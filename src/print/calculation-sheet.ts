@@ -268,8 +268,9 @@ function interactionCurves(trace: Trace): Markup[] {
     return [
       curveFigure(`interaction-${i}`, {
         title: 'Interaction of two piles',
-        description: "Share of a pile's settlement that its neighbour takes, by spacing; dots are the computed points.",
-        x: { title: x.symbol, unit: unitLabel(x.unit) },
+        description:
+          "Share of a pile's settlement that its neighbour takes, by spacing on a logarithmic scale; dots are the computed points.",
+        x: { title: 'spacing', unit: unitLabel(x.unit), log: true },
         y: { title: 'interaction factor', unit: '–' },
         curve: step.table.rows.map(([s = 0, alpha = 0]) => ({ x: s, y: alpha })),
       }),

@@ -23,6 +23,9 @@ export function formulaLine(step: Pick<FormulaStep, 'symbol' | 'formula'>): Mark
   return line
 }
 
+/** MathML is not broken into lines: a longer one is set smaller, so that it stands on a sheet of paper. */
+const LONG = 90
+
 /** The formula with its numbers put in, and the result. */
 export function numbersLine(step: FormulaStep): Markup {
   const powers = step.operands.map((o) => hasPower(o.value))
@@ -38,5 +41,6 @@ export function numbersLine(step: FormulaStep): Markup {
     .replace(/^<math[^>]*>/, '')
     .replace(/<\/math>$/, '')
   const result = `<mrow class="out">${mathQuantity(step.value, step.unit)}</mrow>`
-  return trusted(`<math display="block" class="numbers"><mo>=</mo>${line}<mo>=</mo>${result}</math>`)
+  const long = line.replace(/<[^>]*>/g, '').length > LONG && ' long'
+  return trusted(`<math display="block" class="numbers${long || ''}"><mo>=</mo>${line}<mo>=</mo>${result}</math>`)
 }

@@ -1,5 +1,4 @@
 import { checkWords } from './check-words.ts'
-import { courses } from './draw/courses.ts'
 import { short } from './figure.ts'
 import { html, joined } from './markup.ts'
 import { page } from './page.ts'
@@ -13,10 +12,10 @@ export function pileSchedule(record: AssessmentRecord, csv?: string): string {
   const rows = pileRows(record).map(
     (
       r,
-    ) => html`<tr class="${r.check?.satisfied === false && 'exceeds'}"><th scope="row">${r.cap}</th><td class="num">${r.pile}</td><td>${r.type}</td><td class="num place">${r.x.toFixed(3)}</td><td class="num place">${r.y.toFixed(3)}</td><td class="num">${short(r.cutOff)}</td><td class="num">${short(r.toe)}</td>${
+    ) => html`<tr class="${r.check?.satisfied === false && 'exceeds'}"><th scope="row">${r.cap}</th><td class="num">${r.pile}</td><td>${r.type}</td><td class="num place">${millimetres(r.x)}</td><td class="num place">${millimetres(r.y)}</td><td class="num">${short(r.cutOff)}</td><td class="num">${short(r.toe)}</td>${
       r.check
-        ? html`<td class="num">${shortQuantity(r.check.demand, 'kN')}</td><td class="num">${shortQuantity(r.check.resistance, 'kN')}</td><td class="num">${short(r.check.utilisation)}</td><td class="sign">${courses(r.check.utilisation)}</td><td>${checkWords[r.check.check].name}, ${r.check.combination}</td>`
-        : html`<td class="num">–</td><td class="num">–</td><td class="num">–</td><td></td><td></td>`
+        ? html`<td class="num">${shortQuantity(r.check.demand, 'kN')}</td><td class="num">${shortQuantity(r.check.resistance, 'kN')}</td><td class="num">${short(r.check.utilisation)}</td><td>${checkWords[r.check.check].name}, ${r.check.combination}</td>`
+        : html`<td class="num">–</td><td class="num">–</td><td class="num">–</td><td></td>`
     }</tr>
 `,
   )
@@ -30,8 +29,10 @@ export function pileSchedule(record: AssessmentRecord, csv?: string): string {
     body: html`${titleBlock(record, subject, 'Schedule of piles')}
 <main><section id="piles"><h2>Piles</h2>
 <p class="rule">x and y are the place of the cap plus that of the pile in its layout. Cut-off and toe are depths below the surface of the cap's ground profile. Load, resistance and utilisation are those of the most loaded pile of the cap: all piles of a cap are built alike.${csv !== undefined && html` <a href="${csv}">The same as CSV</a>`}</p>
-<div class="wide" tabindex="0" role="region" aria-label="Piles"><table class="checks"><thead><tr>${head('cap')}${head('pile', '', true)}${head('type')}${head('x', 'm', true)}${head('y', 'm', true)}${head('cut-off', 'm', true)}${head('toe level', 'm', true)}${head('design load', '', true)}${head('resistance', '', true)}${head('utilisation', '', true)}<th scope="col"><span class="unseen">drawn</span></th>${head('governs')}</tr></thead><tbody>
+<div class="wide" tabindex="0" role="region" aria-label="Piles"><table class="checks"><thead><tr>${head('cap')}${head('pile', '', true)}${head('type')}${head('x', 'm', true)}${head('y', 'm', true)}${head('cut-off', 'm', true)}${head('toe level', 'm', true)}${head('design load', '', true)}${head('resistance', '', true)}${head('utilisation', '', true)}${head('governs')}</tr></thead><tbody>
 ${joined(rows)}</tbody></table></div>
 <p class="caution">${record.reply.notices[0]?.text}</p></section></main>`,
   })
 }
+
+const millimetres = (m: number): string => m.toFixed(3).replace('-', '−')

@@ -38,9 +38,9 @@ const pages: Readonly<Record<string, Ask>> = {
   block: { path: '/v1/block', body: exampleBody('block') },
   group: { path: '/v1/group', body: exampleBody('group') },
   settlement: { path: '/v1/settlement', body: exampleBody('settlement') },
-  'settlement in a continuum': {
+  'settlement of softening piles': {
     path: '/v1/settlement',
-    body: { ...exampleBody('settlement'), method: 'elastic-continuum' },
+    body: { ...exampleBody('settlement'), method: 'elastic-continuum', nonlinearity: 'hyperbolic' },
   },
   'one cap': { path: '/v1/assessments?cap=C2', body: demoBody() },
   plan: { path: '/v1/assessments', body: demoBody() },

@@ -19,7 +19,7 @@ test('the schedule of piles has every pile, in place, with the check that govern
   expect(Number(third.utilisation)).toBe(check.utilisation)
   const page = read(pileSchedule(record)).querySelectorAll('#piles tbody tr')
   expect(page.length).toBe(rows.length)
-  expect(page.map((tr) => tr.querySelectorAll('.place').map((td) => Number(td.text)))).toEqual(
+  expect(page.map((tr) => tr.querySelectorAll('.place').map((td) => Number(td.text.replace('−', '-'))))).toEqual(
     rows.map((r) => [Number(r['x [m]']), Number(r['y [m]'])]),
   )
 })
