@@ -59,7 +59,7 @@ export function layoutFigure(id: string, view: LayoutView): Markup {
       height,
       title: 'Piles in plan',
       description: `To scale, numbered in the order of the layout; the cross is the cap's origin.${block ? ' Chain line: outline of the block.' : ''}${
-        loads && loads.some((l) => l !== undefined)
+        loads?.some((l) => l !== undefined)
           ? ` Numbers beside the piles: ${view.loadsAre ?? 'load in kN'}; ring: the largest${crowded ? ', which alone is written where piles stand close' : ''}.`
           : ''
       }`,
