@@ -1,4 +1,5 @@
 import createClient from 'openapi-fetch'
+import { type Patience, patient } from './client-retry.ts'
 import type { components, paths } from './openapi.d.ts'
 
 export type Schemas = components['schemas']
@@ -13,57 +14,112 @@ export class KentledgeProblem extends Error {
   }
 }
 
-export type ClientOptions = { readonly baseUrl: string; readonly retries?: number; readonly fetch?: typeof fetch }
+export type ClientOptions = Partial<Patience> & {
+  readonly baseUrl: string
+  /** The key that the operator made; left out where the service runs without keys. */
+  readonly key?: string
+}
+/** What makes a retry of a stored assessment safe: the same key for the same schedule. A fresh one where it is left out. */
+export type RecordOptions = { readonly idempotencyKey?: string }
 
-const wait = (seconds: number) => new Promise((resolve) => setTimeout(resolve, seconds * 1000))
+type Trace = { readonly trace?: 'none'; readonly of?: string; readonly cap?: string }
+type CapQuery = { readonly check?: string; readonly utilisationAtLeast?: string; readonly exceeded?: 'true' | 'false' }
 
-/** fetch that waits as `Retry-After` says and tries again where the service is busy (503). The calculators are pure, so a retry is safe. */
-function patient(retries: number, base: typeof fetch): typeof fetch {
-  return async (input, init) => {
-    for (let left = retries; ; left--) {
-      const reply = await base(input instanceof Request ? input.clone() : input, init)
-      if (reply.status !== 503 || left <= 0) return reply
-      await wait(Number(reply.headers.get('retry-after') ?? 1))
-    }
-  }
+function formOf(schedule: object, loads: string | Blob): FormData {
+  const form = new FormData()
+  form.set('schedule', JSON.stringify(schedule))
+  form.set('loads', typeof loads === 'string' ? new Blob([loads], { type: 'text/csv' }) : loads, 'loads.csv')
+  return form
 }
 
 /** The way an exporter written in TypeScript calls the service: typed requests and answers, problems as errors. */
-export function kentledge({ baseUrl, retries = 3, fetch: base = globalThis.fetch }: ClientOptions) {
-  const http = patient(retries, base)
+export function kentledge({ baseUrl, key, retries = 3, fetch: base = globalThis.fetch }: ClientOptions) {
+  const http = patient({ retries, fetch: base })
+  const headers = key === undefined ? {} : { authorization: `Bearer ${key}` }
   // The pages that the same routes answer with are for eyes.
-  const client = createClient<paths, 'application/json'>({ baseUrl, fetch: (request) => http(request) })
-  type Trace = { readonly trace?: 'none'; readonly of?: string; readonly cap?: string }
-  const taken = <T>({ data, error }: { data?: T; error?: unknown }): T => {
-    if (data !== undefined) return data
+  const client = createClient<paths, 'application/json'>({ baseUrl, headers, fetch: (request) => http(request) })
+  // Named by their schemas: the types that openapi-fetch derives turn readonly lists into objects.
+  const taken = <Name extends keyof Schemas>({ data, error }: { data?: unknown; error?: unknown }): Schemas[Name] => {
+    if (data !== undefined) return data as Schemas[Name]
     throw new KentledgeProblem(error as Schemas['Problem'])
   }
+  const send = async <Name extends keyof Schemas>(url: string, body: FormData, more: Record<string, string> = {}) => {
+    const reply = await http(new Request(baseUrl + url, { method: 'POST', body, headers: { ...headers, ...more } }))
+    const read: unknown = await reply.json()
+    return taken<Name>(reply.ok ? { data: read } : { error: read })
+  }
+  const onceKey = ({ idempotencyKey = crypto.randomUUID() }: RecordOptions) => ({ 'Idempotency-Key': idempotencyKey })
   return {
     singlePile: async (body: Schemas['SinglePileRequest'], query: Trace = {}) =>
-      taken(await client.POST('/v1/single-pile', { body, params: { query } })),
+      taken<'SinglePileAnswer'>(await client.POST('/v1/single-pile', { body, params: { query } })),
     block: async (body: Schemas['GroupRequest'], query: Trace = {}) =>
-      taken(await client.POST('/v1/block', { body, params: { query } })),
+      taken<'BlockAnswer'>(await client.POST('/v1/block', { body, params: { query } })),
     group: async (body: Schemas['GroupRequest'], query: Trace = {}) =>
-      taken(await client.POST('/v1/group', { body, params: { query } })),
+      taken<'GroupAnswer'>(await client.POST('/v1/group', { body, params: { query } })),
     settlement: async (body: Schemas['SettlementRequest'], query: Trace = {}) =>
-      taken(await client.POST('/v1/settlement', { body, params: { query } })),
-    replay: async (body: Schemas['ReplayRequest']) => taken(await client.POST('/v1/replay', { body })),
-    methods: async () => taken(await client.GET('/v1/methods')),
+      taken<'SettlementAnswer'>(await client.POST('/v1/settlement', { body, params: { query } })),
+    replay: async (body: Schemas['ReplayRequest']) => taken<'ReplayAnswer'>(await client.POST('/v1/replay', { body })),
+    methods: async () => taken<'MethodList'>(await client.GET('/v1/methods')),
     assess: async (body: Schemas['Schedule'], query: Trace = {}) =>
-      taken(await client.POST('/v1/assessments', { body, params: { query } })),
+      taken<'AssessmentAnswer'>(await client.POST('/v1/assessments', { body, params: { query } })),
     /** The schedule without `loads.rows`, the rows as CSV with a header. */
-    assessCsv: async (
-      schedule: object,
-      loads: string | Blob,
-      query: Trace = {},
-    ): Promise<Schemas['AssessmentAnswer']> => {
-      const form = new FormData()
-      form.set('schedule', JSON.stringify(schedule))
-      form.set('loads', typeof loads === 'string' ? new Blob([loads], { type: 'text/csv' }) : loads, 'loads.csv')
-      const search = new URLSearchParams(query as Record<string, string>)
-      const reply = await http(`${baseUrl}/v1/assessments?${search}`, { method: 'POST', body: form })
-      const read: unknown = await reply.json()
-      return taken(reply.ok ? { data: read as Schemas['AssessmentAnswer'] } : { error: read })
+    assessCsv: (schedule: object, loads: string | Blob, query: Trace = {}) =>
+      send<'AssessmentAnswer'>(
+        `/v1/assessments?${new URLSearchParams(query as Record<string, string>)}`,
+        formOf(schedule, loads),
+      ),
+
+    /** Makes a project; leaves one of this title as it is. */
+    putProject: async (slug: string, title: string) =>
+      taken<'Project'>(await client.PUT('/v1/projects/{slug}', { body: { title }, params: { path: { slug } } })),
+    /** Assesses a schedule and keeps it as the next revision of a project. */
+    record: async (slug: string, body: Schemas['Schedule'], options: RecordOptions = {}) =>
+      taken<'Assessment'>(
+        await client.POST('/v1/projects/{slug}/assessments', {
+          body,
+          params: { path: { slug }, header: onceKey(options) },
+        }),
+      ),
+    recordCsv: (slug: string, schedule: object, loads: string | Blob, options: RecordOptions = {}) =>
+      send<'Assessment'>(
+        `/v1/projects/${encodeURIComponent(slug)}/assessments`,
+        formOf(schedule, loads),
+        onceKey(options),
+      ),
+    assessments: async (slug: string, cursor?: string) =>
+      taken<'AssessmentList'>(
+        await client.GET('/v1/projects/{slug}/assessments', { params: { path: { slug }, query: { cursor } } }),
+      ),
+    assessment: async (id: string) =>
+      taken<'Assessment'>(await client.GET('/v1/assessments/{id}', { params: { path: { id } } })),
+    content: async (id: string) =>
+      taken<'Content'>(await client.GET('/v1/assessments/{id}/content', { params: { path: { id } } })),
+    /** Every cap of a record that the filters let through, page after page. */
+    async *caps(id: string, query: CapQuery = {}): AsyncGenerator<Schemas['CapRow']> {
+      for (let cursor: string | undefined; ; ) {
+        const params = { path: { id }, query: { ...query, cursor } }
+        const page: Schemas['CapList'] = taken<'CapList'>(await client.GET('/v1/assessments/{id}/caps', { params }))
+        yield* page.items
+        if (page.next === undefined) return
+        cursor = page.next
+      }
     },
+    cap: async (id: string, mark: string, query: Pick<Trace, 'trace'> = {}) =>
+      taken<'CapReply'>(
+        await client.GET('/v1/assessments/{id}/caps/{mark}', { params: { path: { id, mark }, query } }),
+      ),
+    sign: async (id: string, body: Schemas['SignatureRequest']) =>
+      taken<'Signature'>(await client.POST('/v1/assessments/{id}/signatures', { body, params: { path: { id } } })),
+    integrity: async (slug: string, checkpoint?: { readonly revision: number; readonly hash: string }) =>
+      taken<'IntegrityReply'>(
+        await client.GET('/v1/projects/{slug}/integrity', {
+          params: {
+            path: { slug },
+            query: checkpoint && { revision: String(checkpoint.revision), hash: checkpoint.hash },
+          },
+        }),
+      ),
+    reverify: async (id: string) =>
+      taken<'ReverifyReply'>(await client.POST('/v1/assessments/{id}/reverify', { params: { path: { id } } })),
   }
 }

@@ -22,7 +22,7 @@ export async function resolverTypes(): Promise<string> {
       useTypeImports: true,
       enumsAsTypes: true,
       immutableTypes: true,
-      contextType: 'mercurius#MercuriusContext',
+      contextType: './context.ts#Context',
       scalars: {
         Quantity: 'number | string',
         Varying: 'unknown',

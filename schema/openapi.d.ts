@@ -170,6 +170,179 @@ export interface paths {
         readonly patch?: never;
         readonly trace?: never;
     };
+    readonly "/v1/projects": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** Projects that the key has a right to, by slug */
+        readonly get: operations["listProjects"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/projects/{slug}": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** One project */
+        readonly get: operations["getProject"];
+        /** Make a project, or change its title */
+        readonly put: operations["putProject"];
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/projects/{slug}/assessments": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** Assessments of a project, oldest first */
+        readonly get: operations["listAssessments"];
+        readonly put?: never;
+        /** Assess a schedule and keep it as the next revision of the project */
+        readonly post: operations["recordAssessment"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/projects/{slug}/integrity": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** Recompute every hash, link and row of the records of a project */
+        readonly get: operations["verifyProject"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/assessments/{id}": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** One record: state, summary, hashes */
+        readonly get: operations["getAssessment"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/assessments/{id}/content": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** Request, result and notices as the canonical JSON (RFC 8785) whose SHA-256 is the content hash */
+        readonly get: operations["getContent"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/assessments/{id}/caps": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** Caps of a record as flat rows, in the order of its schedule */
+        readonly get: operations["listCaps"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/assessments/{id}/caps/{mark}": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** One cap of a record: checks, settlement, stiffness, and the trace behind them */
+        readonly get: operations["getCap"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/assessments/{id}/signatures": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** Signatures of a record, in their order */
+        readonly get: operations["listSignatures"];
+        readonly put?: never;
+        /** Sign a record: originator, then checker, then approver, three people */
+        readonly post: operations["signAssessment"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/assessments/{id}/reverify": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /** Compute a record again with the running engine */
+        readonly post: operations["reverifyAssessment"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
 }
 export type webhooks = Record<string, never>;
 export interface components {
@@ -814,6 +987,18 @@ export interface components {
             };
             readonly request?: unknown;
         };
+        readonly ProjectRequest: {
+            readonly title: string;
+        };
+        readonly SignatureRequest: {
+            /**
+             * @description who signs in this order, each once
+             * @enum {string}
+             */
+            readonly role: "originator" | "checker" | "approver";
+            /** @description what the signature says, in words */
+            readonly meaning: string;
+        };
         readonly Step: {
             readonly id: string;
             readonly symbol: string;
@@ -1172,15 +1357,34 @@ export interface components {
             readonly result: {
                 readonly summary: {
                     readonly caps: number;
+                    /** @description caps with every check satisfied */
                     readonly satisfied: number;
+                    /** @description caps with a check exceeded; neighbours are counted in `checks` alone */
                     readonly exceeded: number;
+                    /** @description of all caps and neighbours */
                     readonly worst?: {
                         readonly cap: string;
-                        readonly check: string;
+                        /** @description the other cap of an angular distortion */
+                        readonly neighbour?: string;
+                        /** @enum {string} */
+                        readonly check: "pile-compression" | "pile-uplift" | "group-compression" | "block-compression" | "group-uplift" | "block-uplift" | "pile-section" | "settlement" | "tilt" | "angular-distortion";
                         readonly combination: string;
                         /** @description largest */
                         readonly utilisation: number;
                     };
+                    /** @description the worst of each kind of check, how many were made and how many exceed */
+                    readonly checks: readonly {
+                        readonly cap: string;
+                        /** @description the other cap of an angular distortion */
+                        readonly neighbour?: string;
+                        /** @enum {string} */
+                        readonly check: "pile-compression" | "pile-uplift" | "group-compression" | "block-compression" | "group-uplift" | "block-uplift" | "pile-section" | "settlement" | "tilt" | "angular-distortion";
+                        readonly combination: string;
+                        /** @description largest */
+                        readonly utilisation: number;
+                        readonly count: number;
+                        readonly exceeded: number;
+                    }[];
                 };
                 readonly caps: readonly {
                     readonly mark: string;
@@ -1326,6 +1530,292 @@ export interface components {
             readonly rows: number;
             readonly bodyBytes: number;
         };
+        readonly Project: {
+            readonly slug: string;
+            readonly title: string;
+            /** @description ISO 8601, UTC */
+            readonly createdAt: string;
+            /** @description ISO 8601, UTC */
+            readonly updatedAt: string;
+            /** @description number of its newest assessment, 0 before the first */
+            readonly revision: number;
+        };
+        readonly ProjectList: {
+            readonly items: readonly components["schemas"]["Project"][];
+            /** @description cursor of the next page */
+            readonly next?: string;
+        };
+        readonly Assessment: {
+            readonly id: string;
+            readonly project: string;
+            readonly revision: number;
+            readonly title: string;
+            /** @enum {string} */
+            readonly state: "completed";
+            /** @description ISO 8601, UTC */
+            readonly createdAt: string;
+            /** @description the person or pipeline that the key belongs to */
+            readonly actor: string;
+            /** @description id of the key; null where the service runs without keys */
+            readonly actorKey: string | null;
+            readonly engine: string;
+            /** @description SHA-256 of the canonical request */
+            readonly requestHash: string;
+            /** @description SHA-256 of the content, as /content gives it */
+            readonly contentHash: string;
+            /** @description SHA-256 of the traces */
+            readonly traceHash: string;
+            /** @description SHA-256 of the record before it in its project; zeros for the first */
+            readonly previousHash: string;
+            /** @description SHA-256 of the canonical JSON of this object without recordHash, state and summary */
+            readonly recordHash: string;
+            readonly summary: {
+                readonly caps: number;
+                /** @description caps with every check satisfied */
+                readonly satisfied: number;
+                /** @description caps with a check exceeded; neighbours are counted in `checks` alone */
+                readonly exceeded: number;
+                /** @description of all caps and neighbours */
+                readonly worst?: {
+                    readonly cap: string;
+                    /** @description the other cap of an angular distortion */
+                    readonly neighbour?: string;
+                    /** @enum {string} */
+                    readonly check: "pile-compression" | "pile-uplift" | "group-compression" | "block-compression" | "group-uplift" | "block-uplift" | "pile-section" | "settlement" | "tilt" | "angular-distortion";
+                    readonly combination: string;
+                    /** @description largest */
+                    readonly utilisation: number;
+                };
+                /** @description the worst of each kind of check, how many were made and how many exceed */
+                readonly checks: readonly {
+                    readonly cap: string;
+                    /** @description the other cap of an angular distortion */
+                    readonly neighbour?: string;
+                    /** @enum {string} */
+                    readonly check: "pile-compression" | "pile-uplift" | "group-compression" | "block-compression" | "group-uplift" | "block-uplift" | "pile-section" | "settlement" | "tilt" | "angular-distortion";
+                    readonly combination: string;
+                    /** @description largest */
+                    readonly utilisation: number;
+                    readonly count: number;
+                    readonly exceeded: number;
+                }[];
+            };
+        };
+        readonly AssessmentList: {
+            readonly items: readonly components["schemas"]["Assessment"][];
+            /** @description cursor of the next page */
+            readonly next?: string;
+        };
+        readonly Content: {
+            readonly notices: readonly components["schemas"]["Notice"][];
+            /** @description the schedule, every quantity in its unit */
+            readonly request: {
+                readonly [key: string]: unknown;
+            };
+            readonly result: {
+                readonly summary: {
+                    readonly caps: number;
+                    /** @description caps with every check satisfied */
+                    readonly satisfied: number;
+                    /** @description caps with a check exceeded; neighbours are counted in `checks` alone */
+                    readonly exceeded: number;
+                    /** @description of all caps and neighbours */
+                    readonly worst?: {
+                        readonly cap: string;
+                        /** @description the other cap of an angular distortion */
+                        readonly neighbour?: string;
+                        /** @enum {string} */
+                        readonly check: "pile-compression" | "pile-uplift" | "group-compression" | "block-compression" | "group-uplift" | "block-uplift" | "pile-section" | "settlement" | "tilt" | "angular-distortion";
+                        readonly combination: string;
+                        /** @description largest */
+                        readonly utilisation: number;
+                    };
+                    /** @description the worst of each kind of check, how many were made and how many exceed */
+                    readonly checks: readonly {
+                        readonly cap: string;
+                        /** @description the other cap of an angular distortion */
+                        readonly neighbour?: string;
+                        /** @enum {string} */
+                        readonly check: "pile-compression" | "pile-uplift" | "group-compression" | "block-compression" | "group-uplift" | "block-uplift" | "pile-section" | "settlement" | "tilt" | "angular-distortion";
+                        readonly combination: string;
+                        /** @description largest */
+                        readonly utilisation: number;
+                        readonly count: number;
+                        readonly exceeded: number;
+                    }[];
+                };
+                readonly caps: readonly {
+                    readonly mark: string;
+                    readonly pileCount: number;
+                    readonly single: components["schemas"]["SinglePileResult"];
+                    readonly block: components["schemas"]["BlockResult"];
+                    readonly checks: readonly components["schemas"]["Check"][];
+                    readonly settlement: readonly {
+                        readonly combination: string;
+                        /** @description at the centroid of the piles */
+                        readonly settlement: number;
+                        /** @description slope of the cap */
+                        readonly tilt: number;
+                    }[];
+                    readonly stiffness: {
+                        /** @description vertical */
+                        readonly vertical: number;
+                        /** @description rocking along x; 0 where the piles cannot take it */
+                        readonly rockingAlongX: number;
+                        /** @description rocking along y; 0 where the piles cannot take it */
+                        readonly rockingAlongY: number;
+                        /** @description rigid cap at the cap's origin, pressing signs: ready for a structural model */
+                        readonly atOrigin: {
+                            /** @description rows: settlement (m), slope along x, slope along y (rad); columns: V (kN), My, Mx (kN.m). Units m/kN, 1/kN, rad/(kN.m). Symmetric */
+                            readonly flexibility: readonly (readonly number[])[];
+                            /** @description its inverse: rows V, My, Mx; columns settlement, slope along x, slope along y. Units kN/m, kN/rad, kN.m/rad. Symmetric; 0 where the piles cannot take it */
+                            readonly stiffness: readonly (readonly number[])[];
+                        };
+                    };
+                    readonly notices: readonly components["schemas"]["Notice"][];
+                }[];
+                readonly neighbours: readonly {
+                    readonly a: string;
+                    readonly b: string;
+                    /** @description in plan */
+                    readonly distance: number;
+                    readonly combination: string;
+                    /** @description between the two */
+                    readonly differentialSettlement: number;
+                    /** @description differential settlement over distance */
+                    readonly angularDistortion: number;
+                    /** @description of the limit */
+                    readonly utilisation?: number;
+                    readonly satisfied?: boolean;
+                }[];
+            };
+        };
+        readonly CapRow: {
+            readonly mark: string;
+            readonly ground: string;
+            readonly pileType: string;
+            readonly pileCount: number;
+            /** @description position in plan */
+            readonly x: number;
+            /** @description position in plan */
+            readonly y: number;
+            readonly governingCheck: ("pile-compression" | "pile-uplift" | "group-compression" | "block-compression" | "group-uplift" | "block-uplift" | "pile-section" | "settlement" | "tilt") | null;
+            readonly governingCombination: string | null;
+            /** @description largest of its checks */
+            readonly utilisation: number | null;
+            readonly exceeded: boolean;
+            /** @description largest over the combinations */
+            readonly settlement: number | null;
+            /** @description largest over the combinations */
+            readonly tilt: number | null;
+            /** @description of the cap */
+            readonly verticalStiffness: number;
+            /** @description of the cap */
+            readonly rockingStiffnessAlongX: number;
+            /** @description of the cap */
+            readonly rockingStiffnessAlongY: number;
+        };
+        readonly CapList: {
+            readonly items: readonly components["schemas"]["CapRow"][];
+            /** @description cursor of the next page */
+            readonly next?: string;
+        };
+        readonly CapReply: {
+            readonly result: {
+                readonly mark: string;
+                readonly pileCount: number;
+                readonly single: components["schemas"]["SinglePileResult"];
+                readonly block: components["schemas"]["BlockResult"];
+                readonly checks: readonly components["schemas"]["Check"][];
+                readonly settlement: readonly {
+                    readonly combination: string;
+                    /** @description at the centroid of the piles */
+                    readonly settlement: number;
+                    /** @description slope of the cap */
+                    readonly tilt: number;
+                }[];
+                readonly stiffness: {
+                    /** @description vertical */
+                    readonly vertical: number;
+                    /** @description rocking along x; 0 where the piles cannot take it */
+                    readonly rockingAlongX: number;
+                    /** @description rocking along y; 0 where the piles cannot take it */
+                    readonly rockingAlongY: number;
+                    /** @description rigid cap at the cap's origin, pressing signs: ready for a structural model */
+                    readonly atOrigin: {
+                        /** @description rows: settlement (m), slope along x, slope along y (rad); columns: V (kN), My, Mx (kN.m). Units m/kN, 1/kN, rad/(kN.m). Symmetric */
+                        readonly flexibility: readonly (readonly number[])[];
+                        /** @description its inverse: rows V, My, Mx; columns settlement, slope along x, slope along y. Units kN/m, kN/rad, kN.m/rad. Symmetric; 0 where the piles cannot take it */
+                        readonly stiffness: readonly (readonly number[])[];
+                    };
+                };
+                readonly notices: readonly components["schemas"]["Notice"][];
+            };
+            /** @description pointers lead into `result` of the content */
+            readonly trace?: components["schemas"]["Trace"];
+        };
+        readonly Signature: {
+            readonly id: string;
+            readonly assessment: string;
+            readonly ordinal: number;
+            /** @enum {string} */
+            readonly role: "originator" | "checker" | "approver";
+            readonly meaning: string;
+            readonly actor: string;
+            readonly actorKey: string | null;
+            /** @description ISO 8601, UTC */
+            readonly signedAt: string;
+            /** @description SHA-256 of the record that is signed */
+            readonly signedHash: string;
+            /** @description SHA-256 of the signature before it; zeros for the first */
+            readonly previousHash: string;
+            /** @description SHA-256 of the canonical JSON of this signature, `assessment` named `record`, without signatureHash */
+            readonly signatureHash: string;
+        };
+        readonly SignatureList: {
+            readonly items: readonly components["schemas"]["Signature"][];
+        };
+        readonly IntegrityReply: {
+            readonly project: string;
+            readonly holds: boolean;
+            readonly records: number;
+            /** @description to be kept elsewhere: given back later, it shows rows that were cut off */
+            readonly checkpoint: {
+                readonly revision: number;
+                /** @description SHA-256 of the newest record */
+                readonly hash: string;
+            };
+            readonly flaws: readonly {
+                readonly revision: number;
+                readonly id?: string;
+                /** @enum {string} */
+                readonly table: "records" | "caps" | "checks" | "neighbours" | "traces" | "signatures" | "projects";
+                readonly at?: string;
+                readonly what: string;
+            }[];
+        };
+        readonly ReverifyReply: {
+            readonly id: string;
+            readonly identical: boolean;
+            readonly stored: {
+                readonly engine: string;
+                /** @description SHA-256 of the content */
+                readonly contentHash: string;
+            };
+            readonly computed: {
+                readonly engine: string;
+                /** @description SHA-256 of the content */
+                readonly contentHash: string;
+            };
+            /** @description of all changes */
+            readonly count: number;
+            /** @description at most 1000; pointers lead into the content */
+            readonly changes: readonly {
+                readonly pointer: string;
+                readonly before?: unknown;
+                readonly after?: unknown;
+            }[];
+        };
     };
     responses: never;
     parameters: never;
@@ -1444,7 +1934,25 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Neither JSON nor HTML is accepted */
+            /** @description No valid key, where the service asks for one */
+            readonly 401: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The key lacks a scope */
+            readonly 403: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The route answers in no accepted type */
             readonly 406: {
                 headers: {
                     readonly [name: string]: unknown;
@@ -1599,7 +2107,25 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Neither JSON nor HTML is accepted */
+            /** @description No valid key, where the service asks for one */
+            readonly 401: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The key lacks a scope */
+            readonly 403: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The route answers in no accepted type */
             readonly 406: {
                 headers: {
                     readonly [name: string]: unknown;
@@ -1757,7 +2283,25 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Neither JSON nor HTML is accepted */
+            /** @description No valid key, where the service asks for one */
+            readonly 401: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The key lacks a scope */
+            readonly 403: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The route answers in no accepted type */
             readonly 406: {
                 headers: {
                     readonly [name: string]: unknown;
@@ -1907,7 +2451,25 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Neither JSON nor HTML is accepted */
+            /** @description No valid key, where the service asks for one */
+            readonly 401: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The key lacks a scope */
+            readonly 403: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The route answers in no accepted type */
             readonly 406: {
                 headers: {
                     readonly [name: string]: unknown;
@@ -2406,7 +2968,25 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Neither JSON nor HTML is accepted */
+            /** @description No valid key, where the service asks for one */
+            readonly 401: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The key lacks a scope */
+            readonly 403: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The route answers in no accepted type */
             readonly 406: {
                 headers: {
                     readonly [name: string]: unknown;
@@ -2486,6 +3066,33 @@ export interface operations {
             };
             /** @description The body or URL cannot be read */
             readonly 400: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description No valid key, where the service asks for one */
+            readonly 401: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The key lacks a scope */
+            readonly 403: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The route answers in no accepted type */
+            readonly 406: {
                 headers: {
                     readonly [name: string]: unknown;
                 };
@@ -2596,6 +3203,7 @@ export interface operations {
             readonly query?: never;
             readonly header?: never;
             readonly path: {
+                /** @description Id of a method */
                 readonly id: string;
             };
             readonly cookie?: never;
@@ -2613,6 +3221,1691 @@ export interface operations {
             };
             /** @description No method has this id */
             readonly 404: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly listProjects: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description Rows of a page, 1 to 1000; 100 without */
+                readonly limit?: string;
+                /** @description `next` of the page before */
+                readonly cursor?: string;
+            };
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description A page */
+            readonly 200: {
+                headers: {
+                    /** @description rel="next" where there are more rows */
+                    readonly Link?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["ProjectList"];
+                };
+            };
+            /** @description No valid key */
+            readonly 401: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The key lacks a scope */
+            readonly 403: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The route answers in no accepted type */
+            readonly 406: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description A parameter or the request is invalid */
+            readonly 422: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The service or its store is busy or stopping; try again */
+            readonly 503: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly getProject: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description ETag of what the client holds: 304 where nothing changed */
+                readonly "If-None-Match"?: string;
+            };
+            readonly path: {
+                /** @description The project */
+                readonly slug: string;
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description The project */
+            readonly 200: {
+                headers: {
+                    /** @description Strong: the same bytes have the same tag */
+                    readonly ETag?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Project"];
+                };
+            };
+            /** @description The client holds it already */
+            readonly 304: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description No valid key */
+            readonly 401: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The key lacks a scope */
+            readonly 403: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description No such project, or none that the key has a right to */
+            readonly 404: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The route answers in no accepted type */
+            readonly 406: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description A parameter or the request is invalid */
+            readonly 422: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The service or its store is busy or stopping; try again */
+            readonly 503: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly putProject: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description ETag that was read: needed to change a title */
+                readonly "If-Match"?: string;
+                /** @description `*`: make it, change nothing */
+                readonly "If-None-Match"?: string;
+            };
+            readonly path: {
+                /** @description The project */
+                readonly slug: string;
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "title": "Quay warehouse"
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["ProjectRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The project, changed or as it was */
+            readonly 200: {
+                headers: {
+                    /** @description Strong: the same bytes have the same tag */
+                    readonly ETag?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Project"];
+                };
+            };
+            /** @description The project, made */
+            readonly 201: {
+                headers: {
+                    /** @description Strong: the same bytes have the same tag */
+                    readonly ETag?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Project"];
+                };
+            };
+            /** @description The body cannot be read */
+            readonly 400: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description No valid key */
+            readonly 401: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The key lacks a scope */
+            readonly 403: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description No such project, or none that the key has a right to */
+            readonly 404: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The route answers in no accepted type */
+            readonly 406: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The project is not as the request expects */
+            readonly 412: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The content type is not accepted */
+            readonly 415: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description A parameter or the request is invalid */
+            readonly 422: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description A change needs If-Match */
+            readonly 428: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The service or its store is busy or stopping; try again */
+            readonly 503: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly listAssessments: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description Rows of a page, 1 to 1000; 100 without */
+                readonly limit?: string;
+                /** @description `next` of the page before */
+                readonly cursor?: string;
+            };
+            readonly header?: never;
+            readonly path: {
+                /** @description The project */
+                readonly slug: string;
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description A page */
+            readonly 200: {
+                headers: {
+                    /** @description rel="next" where there are more rows */
+                    readonly Link?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["AssessmentList"];
+                };
+            };
+            /** @description No valid key */
+            readonly 401: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The key lacks a scope */
+            readonly 403: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description No such project, or none that the key has a right to */
+            readonly 404: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The route answers in no accepted type */
+            readonly 406: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description A parameter or the request is invalid */
+            readonly 422: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The service or its store is busy or stopping; try again */
+            readonly 503: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly recordAssessment: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description 1 to 255 printable characters: a retry within 24 hours gets the same answer */
+                readonly "Idempotency-Key"?: string;
+            };
+            readonly path: {
+                /** @description The project */
+                readonly slug: string;
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "title": "River quay warehouse, lines A to C (invented)",
+                 *       "designBasis": {
+                 *         "format": "overall-factor",
+                 *         "factor": 2.5,
+                 *         "blockFactor": 3,
+                 *         "upliftFactor": 3
+                 *       },
+                 *       "ground": {
+                 *         "BH1": {
+                 *           "name": "BH1",
+                 *           "waterTableDepth": 1.5,
+                 *           "layers": [
+                 *             {
+                 *               "name": "soft clay",
+                 *               "thickness": 4,
+                 *               "unitWeight": 16.5,
+                 *               "soil": "cohesive",
+                 *               "undrainedShearStrength": {
+                 *                 "top": 18,
+                 *                 "bottom": 30
+                 *               },
+                 *               "youngsModulus": 6000,
+                 *               "poissonsRatio": 0.5
+                 *             },
+                 *             {
+                 *               "name": "medium dense sand",
+                 *               "thickness": 5,
+                 *               "unitWeight": 19,
+                 *               "soil": "granular",
+                 *               "frictionAngle": 33,
+                 *               "youngsModulus": 35000
+                 *             },
+                 *             {
+                 *               "name": "stiff clay",
+                 *               "unitWeight": 20,
+                 *               "soil": "cohesive",
+                 *               "undrainedShearStrength": 130,
+                 *               "youngsModulus": 55000
+                 *             }
+                 *           ]
+                 *         },
+                 *         "BH2": {
+                 *           "name": "BH2",
+                 *           "waterTableDepth": 1.8,
+                 *           "layers": [
+                 *             {
+                 *               "name": "soft clay",
+                 *               "thickness": 4,
+                 *               "unitWeight": 16.5,
+                 *               "soil": "cohesive",
+                 *               "undrainedShearStrength": {
+                 *                 "top": 18,
+                 *                 "bottom": 30
+                 *               },
+                 *               "youngsModulus": 6000,
+                 *               "poissonsRatio": 0.5
+                 *             },
+                 *             {
+                 *               "name": "firm clay",
+                 *               "thickness": 10,
+                 *               "unitWeight": 18,
+                 *               "soil": "cohesive",
+                 *               "undrainedShearStrength": {
+                 *                 "top": 35,
+                 *                 "bottom": 60
+                 *               },
+                 *               "youngsModulus": 15000
+                 *             },
+                 *             {
+                 *               "name": "stiff clay",
+                 *               "unitWeight": 20,
+                 *               "soil": "cohesive",
+                 *               "undrainedShearStrength": 110,
+                 *               "youngsModulus": 45000
+                 *             }
+                 *           ]
+                 *         }
+                 *       },
+                 *       "pileTypes": {
+                 *         "B600": {
+                 *           "section": {
+                 *             "shape": "circular",
+                 *             "diameter": 0.6
+                 *           },
+                 *           "length": 16,
+                 *           "headDepth": 1,
+                 *           "installation": "bored",
+                 *           "youngsModulus": "30 GPa",
+                 *           "sectionResistance": {
+                 *             "compression": 3200,
+                 *             "tension": 400
+                 *           }
+                 *         },
+                 *         "P350": {
+                 *           "section": {
+                 *             "shape": "square",
+                 *             "width": "350 mm"
+                 *           },
+                 *           "length": 11,
+                 *           "headDepth": 1,
+                 *           "installation": "driven"
+                 *         }
+                 *       },
+                 *       "caps": [
+                 *         {
+                 *           "mark": "A1",
+                 *           "x": 0,
+                 *           "y": 0,
+                 *           "ground": "BH1",
+                 *           "pileType": "B600",
+                 *           "layout": {
+                 *             "kind": "grid",
+                 *             "columns": 2,
+                 *             "rows": 2,
+                 *             "spacing": 1.8
+                 *           },
+                 *           "capWeight": 60
+                 *         },
+                 *         {
+                 *           "mark": "A2",
+                 *           "x": 8,
+                 *           "y": 0,
+                 *           "ground": "BH1",
+                 *           "pileType": "B600",
+                 *           "layout": {
+                 *             "kind": "grid",
+                 *             "columns": 3,
+                 *             "rows": 2,
+                 *             "spacing": 1.8
+                 *           },
+                 *           "capWeight": 60
+                 *         },
+                 *         {
+                 *           "mark": "B1",
+                 *           "x": 0,
+                 *           "y": 9,
+                 *           "ground": "BH2",
+                 *           "pileType": "P350",
+                 *           "layout": {
+                 *             "kind": "grid",
+                 *             "columns": 6,
+                 *             "rows": 6,
+                 *             "spacing": 0.8
+                 *           },
+                 *           "capWeight": 60
+                 *         },
+                 *         {
+                 *           "mark": "B2",
+                 *           "x": 8,
+                 *           "y": 9,
+                 *           "ground": "BH2",
+                 *           "pileType": "B600",
+                 *           "layout": {
+                 *             "kind": "ring",
+                 *             "count": 5,
+                 *             "radius": 2
+                 *           },
+                 *           "capWeight": 60
+                 *         },
+                 *         {
+                 *           "mark": "C1",
+                 *           "x": 0,
+                 *           "y": 18,
+                 *           "ground": "BH2",
+                 *           "pileType": "B600",
+                 *           "layout": {
+                 *             "kind": "grid",
+                 *             "columns": 2,
+                 *             "rows": 1,
+                 *             "spacing": 2
+                 *           },
+                 *           "capWeight": 20
+                 *         },
+                 *         {
+                 *           "mark": "C2",
+                 *           "x": 8,
+                 *           "y": 18,
+                 *           "ground": "BH1",
+                 *           "pileType": "B600",
+                 *           "layout": {
+                 *             "kind": "points",
+                 *             "points": [
+                 *               {
+                 *                 "x": 0,
+                 *                 "y": 0
+                 *               },
+                 *               {
+                 *                 "x": 2,
+                 *                 "y": 0
+                 *               },
+                 *               {
+                 *                 "x": 0.6,
+                 *                 "y": 1.9
+                 *               }
+                 *             ]
+                 *           },
+                 *           "capWeight": 60
+                 *         }
+                 *       ],
+                 *       "loads": {
+                 *         "signs": "right-handed-z-up",
+                 *         "loadsAre": "reactions",
+                 *         "combinations": {
+                 *           "W1": {
+                 *             "limitState": "working"
+                 *           },
+                 *           "W2": {
+                 *             "limitState": "working"
+                 *           },
+                 *           "S1": {
+                 *             "limitState": "serviceability"
+                 *           }
+                 *         },
+                 *         "rows": [
+                 *           {
+                 *             "cap": "A1",
+                 *             "combination": "W1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 2100,
+                 *             "Mx": 25,
+                 *             "My": 40,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "A1",
+                 *             "combination": "W2",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 1680,
+                 *             "Mx": 25,
+                 *             "My": -160,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "A1",
+                 *             "combination": "S1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 1785,
+                 *             "Mx": 25,
+                 *             "My": 30,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "A2",
+                 *             "combination": "W1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 2900,
+                 *             "Mx": 25,
+                 *             "My": 40,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "A2",
+                 *             "combination": "W2",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 2320,
+                 *             "Mx": 25,
+                 *             "My": -160,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "A2",
+                 *             "combination": "S1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 2465,
+                 *             "Mx": 25,
+                 *             "My": 30,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "B1",
+                 *             "combination": "W1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 4200,
+                 *             "Mx": 25,
+                 *             "My": 40,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "B1",
+                 *             "combination": "W2",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 3360,
+                 *             "Mx": 25,
+                 *             "My": -160,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "B1",
+                 *             "combination": "S1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 3570,
+                 *             "Mx": 25,
+                 *             "My": 30,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "B2",
+                 *             "combination": "W1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 2600,
+                 *             "Mx": 25,
+                 *             "My": 40,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "B2",
+                 *             "combination": "W2",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 2080,
+                 *             "Mx": 25,
+                 *             "My": -160,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "B2",
+                 *             "combination": "S1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 2210,
+                 *             "Mx": 25,
+                 *             "My": 30,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "C1",
+                 *             "combination": "W1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 300,
+                 *             "Mx": 0,
+                 *             "My": 40,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "C1",
+                 *             "combination": "W2",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": -210,
+                 *             "Mx": 0,
+                 *             "My": -160,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "C1",
+                 *             "combination": "S1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 255,
+                 *             "Mx": 0,
+                 *             "My": 30,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "C2",
+                 *             "combination": "W1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 2200,
+                 *             "Mx": 25,
+                 *             "My": 40,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "C2",
+                 *             "combination": "W2",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 1760,
+                 *             "Mx": 25,
+                 *             "My": -160,
+                 *             "Mz": 0
+                 *           },
+                 *           {
+                 *             "cap": "C2",
+                 *             "combination": "S1",
+                 *             "Fx": 0,
+                 *             "Fy": 0,
+                 *             "Fz": 1870,
+                 *             "Mx": 25,
+                 *             "My": 30,
+                 *             "Mz": 0
+                 *           }
+                 *         ]
+                 *       },
+                 *       "limits": {
+                 *         "settlement": 25,
+                 *         "tilt": 0.002,
+                 *         "angularDistortion": 0.002
+                 *       }
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["Schedule"];
+                readonly "multipart/form-data": {
+                    /** @description JSON without `loads.rows` */
+                    readonly schedule: string;
+                    /** @description CSV with a header */
+                    readonly loads: string;
+                };
+            };
+        };
+        readonly responses: {
+            /** @description The record; it is on the disk */
+            readonly 201: {
+                headers: {
+                    /** @description Strong: the same bytes have the same tag */
+                    readonly ETag?: string;
+                    /** @description The record */
+                    readonly Location?: string;
+                    /** @description true where this is the answer of an earlier request */
+                    readonly "Idempotency-Replayed"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Assessment"];
+                };
+            };
+            /** @description The body cannot be read */
+            readonly 400: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description No valid key */
+            readonly 401: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The key lacks a scope */
+            readonly 403: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description No such project, or none that the key has a right to */
+            readonly 404: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The route answers in no accepted type */
+            readonly 406: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The first request with this Idempotency-Key is still running */
+            readonly 409: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The body is larger than the limit */
+            readonly 413: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The content type is not accepted */
+            readonly 415: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description A parameter or the request is invalid */
+            readonly 422: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The service or its store is busy or stopping; try again */
+            readonly 503: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The work took longer than the service allows */
+            readonly 504: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly verifyProject: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description With `hash`: a checkpoint that an earlier answer gave */
+                readonly revision?: string;
+                /** @description Record hash of that revision */
+                readonly hash?: string;
+            };
+            readonly header?: never;
+            readonly path: {
+                /** @description The project */
+                readonly slug: string;
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description What was found */
+            readonly 200: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["IntegrityReply"];
+                };
+            };
+            /** @description No valid key */
+            readonly 401: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The key lacks a scope */
+            readonly 403: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description No such project, or none that the key has a right to */
+            readonly 404: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The route answers in no accepted type */
+            readonly 406: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description A parameter or the request is invalid */
+            readonly 422: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The service or its store is busy or stopping; try again */
+            readonly 503: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The work took longer than the service allows */
+            readonly 504: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly getAssessment: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description ETag of what the client holds: 304 where nothing changed */
+                readonly "If-None-Match"?: string;
+            };
+            readonly path: {
+                /** @description The assessment */
+                readonly id: string;
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description The record */
+            readonly 200: {
+                headers: {
+                    /** @description Strong: the same bytes have the same tag */
+                    readonly ETag?: string;
+                    /** @description rel="predecessor-version" and rel="successor-version" (RFC 5829), rel="collection" */
+                    readonly Link?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Assessment"];
+                };
+            };
+            /** @description The client holds it already */
+            readonly 304: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description No valid key */
+            readonly 401: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The key lacks a scope */
+            readonly 403: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description No such assessment, or none that the key has a right to */
+            readonly 404: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The route answers in no accepted type */
+            readonly 406: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description A parameter or the request is invalid */
+            readonly 422: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The service or its store is busy or stopping; try again */
+            readonly 503: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly getContent: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description ETag of what the client holds: 304 where nothing changed */
+                readonly "If-None-Match"?: string;
+            };
+            readonly path: {
+                /** @description The assessment */
+                readonly id: string;
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description The content */
+            readonly 200: {
+                headers: {
+                    /** @description Strong: the same bytes have the same tag */
+                    readonly ETag?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Content"];
+                };
+            };
+            /** @description The client holds it already */
+            readonly 304: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description No valid key */
+            readonly 401: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The key lacks a scope */
+            readonly 403: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description No such assessment, or none that the key has a right to */
+            readonly 404: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The route answers in no accepted type */
+            readonly 406: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description A parameter or the request is invalid */
+            readonly 422: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The service or its store is busy or stopping; try again */
+            readonly 503: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly listCaps: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description Rows of a page, 1 to 1000; 100 without */
+                readonly limit?: string;
+                /** @description `next` of the page before */
+                readonly cursor?: string;
+                /** @description Only caps with this kind of check, to which the other filters then refer */
+                readonly check?: string;
+                /** @description Only caps whose utilisation is at least this */
+                readonly utilisationAtLeast?: string;
+                /** @description `true` or `false` */
+                readonly exceeded?: string;
+            };
+            readonly header?: {
+                /** @description ETag of what the client holds: 304 where nothing changed */
+                readonly "If-None-Match"?: string;
+            };
+            readonly path: {
+                /** @description The assessment */
+                readonly id: string;
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description A page of rows; as CSV all of them, unless a limit is given */
+            readonly 200: {
+                headers: {
+                    /** @description Strong: the same bytes have the same tag */
+                    readonly ETag?: string;
+                    /** @description rel="next" where there are more rows */
+                    readonly Link?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["CapList"];
+                    readonly "text/csv": string;
+                };
+            };
+            /** @description The client holds it already */
+            readonly 304: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description No valid key */
+            readonly 401: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The key lacks a scope */
+            readonly 403: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description No such assessment, or none that the key has a right to */
+            readonly 404: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The route answers in no accepted type */
+            readonly 406: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description A parameter or the request is invalid */
+            readonly 422: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The service or its store is busy or stopping; try again */
+            readonly 503: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly getCap: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description `none` leaves the trace out */
+                readonly trace?: string;
+            };
+            readonly header?: {
+                /** @description ETag of what the client holds: 304 where nothing changed */
+                readonly "If-None-Match"?: string;
+            };
+            readonly path: {
+                /** @description The assessment */
+                readonly id: string;
+                /** @description Mark of the cap */
+                readonly mark: string;
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description The cap */
+            readonly 200: {
+                headers: {
+                    /** @description Strong: the same bytes have the same tag */
+                    readonly ETag?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["CapReply"];
+                };
+            };
+            /** @description The client holds it already */
+            readonly 304: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description No valid key */
+            readonly 401: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The key lacks a scope */
+            readonly 403: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description No such assessment, or none that the key has a right to */
+            readonly 404: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The route answers in no accepted type */
+            readonly 406: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description A parameter or the request is invalid */
+            readonly 422: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The service or its store is busy or stopping; try again */
+            readonly 503: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly listSignatures: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /** @description The assessment */
+                readonly id: string;
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description The signatures */
+            readonly 200: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["SignatureList"];
+                };
+            };
+            /** @description No valid key */
+            readonly 401: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The key lacks a scope */
+            readonly 403: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description No such assessment, or none that the key has a right to */
+            readonly 404: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The route answers in no accepted type */
+            readonly 406: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description A parameter or the request is invalid */
+            readonly 422: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The service or its store is busy or stopping; try again */
+            readonly 503: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly signAssessment: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /** @description The assessment */
+                readonly id: string;
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "role": "originator",
+                 *       "meaning": "Prepared by me from the model of 4 May"
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["SignatureRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The signature */
+            readonly 201: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Signature"];
+                };
+            };
+            /** @description The body cannot be read */
+            readonly 400: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description No valid key */
+            readonly 401: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The key lacks a scope */
+            readonly 403: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description No such assessment, or none that the key has a right to */
+            readonly 404: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The route answers in no accepted type */
+            readonly 406: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Another role is next, or this person signed before */
+            readonly 409: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The content type is not accepted */
+            readonly 415: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description A parameter or the request is invalid */
+            readonly 422: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The service or its store is busy or stopping; try again */
+            readonly 503: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly reverifyAssessment: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /** @description The assessment */
+                readonly id: string;
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Identical, or what changed */
+            readonly 200: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["ReverifyReply"];
+                };
+            };
+            /** @description No valid key */
+            readonly 401: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The key lacks a scope */
+            readonly 403: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description No such assessment, or none that the key has a right to */
+            readonly 404: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The route answers in no accepted type */
+            readonly 406: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The running engine refuses the stored request */
+            readonly 409: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description A parameter or the request is invalid */
+            readonly 422: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The service or its store is busy or stopping; try again */
+            readonly 503: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The work took longer than the service allows */
+            readonly 504: {
                 headers: {
                     readonly [name: string]: unknown;
                 };

@@ -3,28 +3,38 @@ import type { Config } from './config.ts'
 import { readExamples } from './contract/examples.ts'
 import { limits } from './contract/limits.ts'
 import { openapi } from './contract/openapi.ts'
+import { readJson } from './contract/read-json.ts'
 import { engineVersion } from './engine/index.ts'
 import { Problem } from './errors.ts'
 import { graphqlPlugin } from './graphql/plugin.ts'
 import { accessLog, traceIdOf } from './http/access-log.ts'
 import { answerClientError } from './http/client-errors.ts'
 import { type Drain, drain } from './http/drain.ts'
+import { guard } from './http/guard.ts'
+import { pageScripts } from './http/html.ts'
 import { metrics } from './http/metrics.ts'
-import { pageScripts } from './http/pages.ts'
+import { negotiate } from './http/negotiate.ts'
 import { probes } from './http/probes.ts'
 import { problems, sendProblem } from './http/problems.ts'
 import { reference } from './http/reference.ts'
 import { assessments } from './http/v1/assessments.ts'
 import { calculators } from './http/v1/calculators.ts'
+import { caps } from './http/v1/caps.ts'
+import { projects } from './http/v1/projects.ts'
+import { storedAssessments } from './http/v1/stored-assessments.ts'
 import { WorkerPool } from './jobs/pool.ts'
-import type { AssessTask } from './operations/assess-in-thread.ts'
+import { assessing } from './operations/assess-in-thread.ts'
+import { authenticate } from './operations/authenticate.ts'
 import { getMethod, listMethods, listSources } from './operations/list-methods.ts'
 import { replayTrace } from './operations/replay-trace.ts'
+import { releaseAll } from './store/idempotency.ts'
+import { openStore, type Store } from './store/open-store.ts'
+import { probe } from './store/probe.ts'
 
 export type Service = { readonly app: FastifyInstance; readonly stop: Drain }
 
 /** Composes the service, in reading order. */
-export async function buildService(config: Config): Promise<Service> {
+export async function buildService(config: Config, store: Store): Promise<Service> {
   const app = fastify({
     logger: { level: config.LOG_LEVEL },
     bodyLimit: config.BODY_LIMIT,
@@ -35,30 +45,40 @@ export async function buildService(config: Config): Promise<Service> {
     genReqId: (request) => traceIdOf(request.headers.traceparent),
     logController: new LogController({ requestIdLogLabel: 'traceId', disableRequestLogging: true }),
     return503OnClosing: false,
-    // The strict schemas name these fields like any other unknown one.
-    onProtoPoisoning: 'ignore',
-    onConstructorPoisoning: 'ignore',
+    // A mark of 200 letters, each of up to twelve signs once it is percent-encoded.
+    routerOptions: { maxParamLength: 2400 },
     // An unreadable URL never reaches the error handler.
     frameworkErrors: (error, _request, reply) =>
       sendProblem(reply, new Problem('malformed-url', { reason: error.message })),
   })
-  app.removeContentTypeParser('text/plain')
-  const entry = new URL('./operations/assess-in-thread.ts', import.meta.url)
-  const pool = new WorkerPool<AssessTask>({
-    entry,
-    name: 'assessInThread',
+  app.removeContentTypeParser(['text/plain', 'application/json'])
+  app.addContentTypeParser('application/json', { parseAs: 'string' }, async (_request: unknown, body: string) =>
+    readJson(body),
+  )
+  const pool = new WorkerPool({
     workers: config.WORKERS,
     queue: config.WORK_QUEUE,
     seconds: config.WORK_TIMEOUT,
   })
-  app.addHook('onClose', () => pool.close())
-  problems(app, config.BODY_LIMIT)
+  const office = { store, pool }
+  if (store.capabilities.alone) await releaseAll(store)
+  app.addHook('onClose', async () => {
+    await pool.close()
+    await store.close()
+  })
   const stop = drain(app)
   accessLog(app)
-  metrics(app, engineVersion, pool)
-  probes(app)
+  guard(app, authenticate(office, config.AUTH))
+  negotiate(app)
+  problems(app, config.BODY_LIMIT)
+  metrics(app, engineVersion, pool, () => store.capabilities.size(store.reader))
+  probes(app, () => probe(store))
   calculators(app)
-  await app.register(assessments, { assess: (task, gone) => pool.run(task, gone), bodyLimit: config.BODY_LIMIT })
+  const bodyLimit = config.BODY_LIMIT
+  await app.register(assessments, { assess: (task, gone) => pool.run(assessing, task, gone), bodyLimit, office })
+  projects(app, office)
+  storedAssessments(app, office)
+  caps(app, office)
   await pageScripts(app)
   await app.register(reference, { document: openapi(readExamples()) })
   app.post('/v1/replay', async (request) => replayTrace(request.body))
@@ -66,9 +86,10 @@ export async function buildService(config: Config): Promise<Service> {
   app.get<{ Params: { id: string } }>('/v1/methods/:id', async (request) => getMethod(request.params.id))
   app.get('/v1/sources', async () => listSources())
   app.get('/v1/limits', async () => ({ ...limits, bodyBytes: config.BODY_LIMIT }))
-  await graphqlPlugin(app, { production: config.NODE_ENV === 'production' })
+  await graphqlPlugin(app, { production: config.NODE_ENV === 'production', actorOf: (request) => request.actor! })
   return { app, stop }
 }
 
-/** The service as one Fastify instance, for those who do not stop it by signal. */
-export const buildApp = async (config: Config): Promise<FastifyInstance> => (await buildService(config)).app
+/** The service as one Fastify instance, for those who do not stop it by signal. Without a store of theirs it keeps its records in memory. */
+export const buildApp = async (config: Config, store?: Store): Promise<FastifyInstance> =>
+  (await buildService(config, store ?? (await openStore()))).app

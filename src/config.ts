@@ -7,6 +7,12 @@ const whole = (fallback: number, min: number, max: number) =>
 const schema = z.object({
   HOST: z.string().min(1).default('127.0.0.1'),
   PORT: whole(8080, 0, 65535),
+  DATA_DIR: z.string().min(1).default('./data'),
+  DATABASE_URL: z
+    .string()
+    .regex(/^postgres(ql)?:\/\//, 'must begin with postgres://')
+    .optional(),
+  AUTH: z.enum(['keys', 'off']).default('keys'),
   LOG_LEVEL: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent']).default('info'),
   BODY_LIMIT: whole(64 * 1024 * 1024, 1024, 2 ** 31),
   REQUEST_TIMEOUT: whole(60, 1, 3600),
@@ -16,6 +22,10 @@ const schema = z.object({
   NODE_ENV: z.string().default('development'),
   SHUTDOWN_TIMEOUT: whole(10, 1, 3600),
 })
+
+/** What was read, but for addresses: they hold a password. */
+const shown = (given: Readonly<Record<string, string>>, name: string) =>
+  name === 'DATABASE_URL' ? 'another address' : `"${given[name]}"`
 
 export type Config = Readonly<z.infer<typeof schema>>
 
@@ -36,7 +46,9 @@ export function readConfig(env: Readonly<Record<string, string | undefined>>): C
   }
   const read = schema.safeParse(given)
   if (!read.success)
-    faults.push(...read.error.issues.map((i) => `${i.path.join('.')}: ${i.message}; got "${given[String(i.path[0])]}"`))
+    faults.push(
+      ...read.error.issues.map((i) => `${i.path.join('.')}: ${i.message}; got ${shown(given, String(i.path[0]))}`),
+    )
   if (faults.length > 0)
     throw new Error(`The environment has ${faults.length} fault(s):\n${faults.map((f) => `  ${f}`).join('\n')}`)
   return Object.freeze(read.data!)

@@ -20,6 +20,7 @@ type Contract =
   | 'invalid-request'
   | 'unknown-field'
   | 'missing-field'
+  | 'duplicate-field'
   | 'wrong-type'
   | 'out-of-range'
   | 'unknown-choice'
@@ -37,6 +38,22 @@ type Contract =
   | 'not-unicode'
   | 'too-deep'
   | 'bad-query'
+  | 'store-unavailable'
+  | 'unauthenticated'
+  | 'missing-scope'
+  | 'no-such-project'
+  | 'no-such-assessment'
+  | 'no-such-cap'
+  | 'bad-cursor'
+  | 'bad-project-slug'
+  | 'precondition-failed'
+  | 'precondition-required'
+  | 'idempotency-mismatch'
+  | 'idempotency-running'
+  | 'bad-idempotency-key'
+  | 'signature-step'
+  | 'signature-same-person'
+  | 'engine-refuses-record'
 export type ErrorCode = FaultCode | Contract
 
 const entry = (status: number, title: string, template: string, cause: string, cure: string): ErrorEntry => ({
@@ -96,7 +113,7 @@ export const catalogue: Readonly<Record<ErrorCode, ErrorEntry>> = {
     'Not acceptable',
     'No answer of this path is of the accepted types.',
     'The Accept header names types that this path does not answer in.',
-    'Accept application/json.',
+    'Accept application/json; for pages and lists as files see the types of the path in /openapi.json.',
   ),
   'malformed-url': entry(
     400,
@@ -118,6 +135,13 @@ export const catalogue: Readonly<Record<ErrorCode, ErrorEntry>> = {
     'Unknown field "{field}".',
     'A field is misspelt or does not belong here.',
     'Remove or rename the field.',
+  ),
+  'duplicate-field': entry(
+    422,
+    'Field given twice',
+    'The field "{field}" stands twice.',
+    'One object holds the same name twice; which of the two holds would be a guess.',
+    'Leave one of them out.',
   ),
   'missing-field': entry(
     422,
@@ -245,6 +269,118 @@ export const catalogue: Readonly<Record<ErrorCode, ErrorEntry>> = {
     'A query parameter has a value that is not known.',
     'Use a listed value.',
   ),
+  'store-unavailable': entry(
+    503,
+    'The store cannot be used',
+    'The store did not take the request; nothing was acknowledged.',
+    'The disk is full or cannot be written, or the database server is not there.',
+    'Try again; the operator finds the reason in the log.',
+  ),
+  unauthenticated: entry(
+    401,
+    'No valid key',
+    'This service asks for a key: {reason}.',
+    'The Authorization header is missing, or its key is unknown, expired or revoked.',
+    'Send Authorization: Bearer with a key that the operator made.',
+  ),
+  'missing-scope': entry(
+    403,
+    'The key does not allow this',
+    'The key lacks the scope {scope}.',
+    'Each route needs scopes; the key was made without this one.',
+    'Ask the operator for a key with this scope.',
+  ),
+  'no-such-project': entry(
+    404,
+    'No such project',
+    'There is no project "{slug}", or the key has no right to it.',
+    'The slug is misspelt, the project was not made yet, or it belongs to others.',
+    'See GET /v1/projects.',
+  ),
+  'no-such-assessment': entry(
+    404,
+    'No such assessment',
+    'There is no assessment {id}, or the key has no right to its project.',
+    'The id is misspelt, or the record belongs to another project.',
+    'See GET /v1/projects/{slug}/assessments.',
+  ),
+  'no-such-cap': entry(
+    404,
+    'No such cap',
+    'The assessment has no cap "{mark}".',
+    'The mark is misspelt or not percent-encoded.',
+    'See the caps of the assessment.',
+  ),
+  'bad-cursor': entry(
+    422,
+    'Bad cursor',
+    'The cursor does not belong to this list.',
+    'A cursor was changed, or comes from a list with other filters.',
+    'Start again without a cursor.',
+  ),
+  'bad-project-slug': entry(
+    422,
+    'Bad project slug',
+    '"{got}" is no slug: 1 to 64 of a-z, 0-9 and -, with a letter or digit at both ends.',
+    'The slug is part of addresses and stays for ever.',
+    'Choose a slug of the allowed letters.',
+  ),
+  'precondition-failed': entry(
+    412,
+    'Precondition failed',
+    'The resource is not in the state that the request expects; its ETag is now {etag}.',
+    'It was changed since it was read, or it exists already.',
+    'Read it again and decide anew.',
+  ),
+  'precondition-required': entry(
+    428,
+    'Precondition required',
+    'A change needs If-Match with the ETag that was read.',
+    'Without it a change by somebody else would be lost.',
+    'Read the resource and send its ETag as If-Match.',
+  ),
+  'idempotency-mismatch': entry(
+    422,
+    'The key stands for another request',
+    'This Idempotency-Key was used with another request.',
+    'One key was used for two different requests.',
+    'Use a new key for a new request.',
+  ),
+  'idempotency-running': entry(
+    409,
+    'The first request is still running',
+    'A request with this Idempotency-Key is still running.',
+    'A retry came before the first request was answered.',
+    'Wait as Retry-After says and try again.',
+  ),
+  'bad-idempotency-key': entry(
+    422,
+    'Bad Idempotency-Key',
+    'An Idempotency-Key has 1 to 255 printable ASCII characters.',
+    'The header is empty, too long, or holds other characters.',
+    'Send a UUID.',
+  ),
+  'signature-step': entry(
+    409,
+    'Not the next signature',
+    'The next signature is that of the {next}; got {role}.',
+    'Originator, checker and approver sign in this order, each once.',
+    'Let the missing role sign first.',
+  ),
+  'signature-same-person': entry(
+    409,
+    'The same person signed before',
+    '{actor} signed as {role} already.',
+    'Originator, checker and approver are three different people.',
+    'Let somebody else sign.',
+  ),
+  'engine-refuses-record': entry(
+    409,
+    'The engine refuses the stored request',
+    'The running engine refuses the request of this record: {reason}.',
+    'The rules of requests have changed since the record was made.',
+    'Recompute it with the engine that the record names.',
+  ),
   'wrong-dimension': entry(
     422,
     'Wrong dimension',
@@ -363,6 +499,13 @@ export const catalogue: Readonly<Record<ErrorCode, ErrorEntry>> = {
     'The mark "{mark}" stands twice.',
     'Two caps share one mark.',
     'Give each cap its own mark.',
+  ),
+  'duplicate-row': entry(
+    422,
+    'Duplicate row',
+    'Cap "{cap}" has a second row for combination "{combination}"; the first is row {first}.',
+    'Two rows name the same cap and combination; which of them holds would be a guess, and so would their sum.',
+    'Leave one row for each cap and combination.',
   ),
   'missing-combination': entry(
     422,

@@ -30,15 +30,18 @@ const rooms: Readonly<Record<string, Room>> = {
   'engine/index.ts': { floor: 8 },
   'errors.ts': { floor: 9, only: ['engine/faults.ts'] },
   'config.ts': { floor: 9, only: ['engine/faults.ts', 'engine/index.ts'] },
-  contract: { floor: 10, only: ['engine', 'errors.ts'] },
-  print: { floor: 10, only: ['engine', 'errors.ts'] },
-  store: { floor: 10, only: ['engine', 'errors.ts'] },
-  jobs: { floor: 10, only: ['engine', 'errors.ts'] },
-  operations: { floor: 11 },
-  http: { floor: 12, only: ['operations', 'contract', 'print', 'errors.ts', 'engine'] },
-  graphql: { floor: 12, only: ['operations', 'contract', 'errors.ts', 'engine'] },
-  'app.ts': { floor: 13 },
-  'main.ts': { floor: 14 },
+  'canonical.ts': { floor: 10, only: ['errors.ts'] },
+  contract: { floor: 11, only: ['engine', 'errors.ts', 'canonical.ts'] },
+  print: { floor: 11, only: ['engine', 'errors.ts'] },
+  store: { floor: 11, only: ['engine', 'errors.ts', 'canonical.ts'] },
+  jobs: { floor: 11, only: ['engine', 'errors.ts'] },
+  operations: { floor: 12 },
+  http: { floor: 13, only: ['operations', 'contract', 'print', 'errors.ts', 'engine'] },
+  graphql: { floor: 13, only: ['operations', 'contract', 'errors.ts', 'engine'] },
+  'app.ts': { floor: 14 },
+  'main.ts': { floor: 15 },
+  'keys.ts': { floor: 15, only: ['config.ts', 'store'] },
+  'backup.ts': { floor: 15, only: ['config.ts', 'store'] },
 }
 
 /** Type imports that the table lets through: plain declarations of what a request or notice is, beside or above their reader. */
@@ -261,8 +264,12 @@ test('export by name, and the engine has the only index file', () => {
   expect(defaults.map((s) => s.path)).toEqual([])
 })
 
-test('only main.ts reads the environment', () => {
-  expect(sources.filter((s) => /\bprocess\.env\b/.test(s.text)).map((s) => s.path)).toEqual(['main.ts'])
+test('only the programs read the environment', () => {
+  expect(sources.filter((s) => /\bprocess\.env\b/.test(s.text)).map((s) => s.path)).toEqual([
+    'backup.ts',
+    'keys.ts',
+    'main.ts',
+  ])
 })
 
 test('what src/ imports is a runtime dependency: the container installs nothing else', () => {

@@ -80,11 +80,13 @@ async function isThere(program: string): Promise<boolean> {
 const [curl, python] = await Promise.all([isThere('curl'), isThere('python3')])
 
 test('every block is of a language that is run here, and names the address that is replaced', () => {
-  expect(blocks.map((block) => block.language)).toEqual(['sh', 'sh', 'ts', 'python'])
+  expect(blocks.map((block) => block.language)).toEqual(['sh', 'sh', 'ts', 'python', 'sh', 'sh', 'python'])
   for (const block of blocks) expect(block.text, block.title).toContain(inReadme)
 })
 
-test.runIf(curl).for(of('sh').map((block) => [block.title, block] as const))('sh, %s', async ([, block]) => {
+const stored = (block: { text: string }) => block.text.includes('/projects/')
+const calculating = of('sh').filter((block) => !stored(block))
+test.runIf(curl).for(calculating.map((block) => [block.title, block] as const))('sh, %s', async ([, block]) => {
   const { result, trace } = json(await output('sh', ['-euc', here(block.text)]))
   expect(trace).toBeUndefined()
   if (schedules(block)) expect(result).toEqual(schedule)
@@ -111,7 +113,40 @@ test.for(of('ts').map((block) => [block.title, block] as const))('ts, %s: its ty
   await expect(check()).rejects.toThrow('satisfactory')
 })
 
-test.runIf(python).for(of('python').map((block) => [block.title, block] as const))('python, %s', async ([, block]) => {
+test.runIf(curl)('sh: a project is made, and a schedule kept in it once, however often it is sent', async () => {
+  const [make, post] = of('sh')
+    .filter(stored)
+    .map((block) => here(block.text))
+  expect(json(await output('sh', ['-euc', make!]))).toMatchObject({ slug: 'quay', revision: 0 })
+  const record = json(await output('sh', ['-euc', post!]))
+  expect(record).toMatchObject({ project: 'quay', revision: 1, summary: schedule.summary })
+  expect(json(await output('sh', ['-euc', post!]))).toEqual(record)
+})
+
+test.runIf(python)('python: the hashes of a project are recomputed, and a changed one is seen', async () => {
+  const headers = { 'content-type': 'application/json' }
+  const put = { method: 'PUT', headers, body: '{ "title": "Quay warehouse" }' }
+  expect((await fetch(`${service.address}/v1/projects/quay`, put)).ok).toBe(true)
+  const example = await file('assessment.json')
+  for (const title of ['Ärmelkanal, “Nord”', 'second']) {
+    const body = JSON.stringify({ ...json(example), title })
+    const reply = await fetch(`${service.address}/v1/projects/quay/assessments`, { method: 'POST', headers, body })
+    expect(reply.status).toBe(201)
+  }
+  const block = of('python').find(stored)!
+  const run = async (text: string) => {
+    await writeFile(join(folder, 'hashes.py'), text)
+    return (await output('python3', ['hashes.py'])).trim().split('\n')
+  }
+  const lines = await run(here(block.text))
+  expect(lines.length).toBeGreaterThanOrEqual(2)
+  expect(lines).toEqual(lines.map((_, i) => `revision ${i + 1} holds`))
+  const bent = here(block.text).replace('/content")', '/content").replace(b"0.", b"1.", 1)')
+  expect(await run(bent)).toEqual(lines.map((_, i) => `revision ${i + 1} does not hold`))
+})
+
+const reckoning = of('python').filter((block) => !stored(block))
+test.runIf(python).for(reckoning.map((block) => [block.title, block] as const))('python, %s', async ([, block]) => {
   await writeFile(join(folder, 'example.py'), here(block.text))
   const printed = (await output('python3', ['example.py'])).trim().split('\n')
   expect(printed.shift()).toBe(`allowable load ${pile.allowableLoad!.toFixed(0)} kN`)

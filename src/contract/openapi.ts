@@ -1,10 +1,14 @@
 import { z } from 'zod'
 import { engineVersion } from '../engine/index.ts'
+import { header, inPath, json, problem, query, scheduleForm, schemaRef } from './openapi-parts.ts'
 import { designBasis, groundProfile, layout, pileType } from './parts.ts'
 import { replayRequest, step } from './replay.ts'
 import * as replies from './replies.ts'
 import { groupRequest, methodChoices, settlementRequest, singlePileRequest } from './requests.ts'
 import { scheduleRequest } from './schedule.ts'
+import { storedPaths } from './stored-paths.ts'
+import * as stored from './stored-replies.ts'
+import { projectRequest, signatureRequest } from './stored-requests.ts'
 
 const requests = {
   GroundProfile: groundProfile,
@@ -17,6 +21,8 @@ const requests = {
   SettlementRequest: settlementRequest,
   Schedule: scheduleRequest,
   ReplayRequest: replayRequest,
+  ProjectRequest: projectRequest,
+  SignatureRequest: signatureRequest,
 }
 const answers = {
   Step: step,
@@ -36,6 +42,18 @@ const answers = {
   MethodReply: replies.methodReply,
   SourceList: replies.sourceList,
   LimitList: replies.limitList,
+  Project: stored.project,
+  ProjectList: stored.projectList,
+  Assessment: stored.assessment,
+  AssessmentList: stored.assessmentList,
+  Content: stored.content,
+  CapRow: stored.capRow,
+  CapList: stored.capList,
+  CapReply: stored.capReply,
+  Signature: stored.signature,
+  SignatureList: stored.signatureList,
+  IntegrityReply: stored.integrityReply,
+  ReverifyReply: stored.reverifyReply,
 }
 
 /** A route of version 1, its example named after the file of `schema/examples/` that is sent in the tests. */
@@ -109,29 +127,22 @@ function components(): Record<string, unknown> {
   return Object.fromEntries([...named(requests, 'input'), ...named(answers, 'output')])
 }
 
-const schemaRef = (id: string) => ({ $ref: `#/components/schemas/${id}` })
-const json = (id: string, description: string) => ({
-  description,
-  content: { 'application/json': { schema: schemaRef(id) } },
-})
 /** A calculator's answer, or the sheet of it to look at and to sign. */
 const answerOrPage = (id: string) => ({
   description: 'The answer; with `Accept: text/html` as a page',
-  headers: { Vary: { description: 'Accept', schema: { type: 'string' } } },
+  headers: { Vary: header('Accept') },
   content: { 'application/json': { schema: schemaRef(id) }, 'text/html': { schema: { type: 'string' } } },
-})
-const problem = (description: string) => ({
-  description,
-  content: { 'application/problem+json': { schema: schemaRef('Problem') } },
 })
 const failures = {
   '400': problem('The body or URL cannot be read'),
+  '401': problem('No valid key, where the service asks for one'),
+  '403': problem('The key lacks a scope'),
+  '406': problem('The route answers in no accepted type'),
   '413': problem('The body is larger than the limit'),
   '415': problem('The content type is not accepted'),
   '422': problem('The request is invalid or physically impossible; `errors` lists every fault'),
   '503': problem('The service is busy or stopping'),
 }
-const query = (name: string, description: string) => ({ name, in: 'query', description, schema: { type: 'string' } })
 const options = [
   query('trace', '`none` leaves the trace out'),
   query('of', 'JSON Pointer into the result: only the steps behind it'),
@@ -144,19 +155,7 @@ export function openapi(examples: Readonly<Record<string, unknown>>) {
   for (const [path, { operationId, summary, request, answer, example }] of Object.entries(calculators)) {
     const body = { schema: schemaRef(request), ...(example && { example: examples[example] }) }
     const content: Record<string, unknown> = { 'application/json': body }
-    if (path === '/v1/assessments') {
-      content['multipart/form-data'] = {
-        schema: {
-          type: 'object',
-          required: ['schedule', 'loads'],
-          properties: {
-            schedule: { description: 'JSON without `loads.rows`', type: 'string' },
-            loads: { description: 'CSV with a header', type: 'string' },
-          },
-        },
-      }
-    }
-    const acceptable = example ? { '406': problem('Neither JSON nor HTML is accepted') } : {}
+    if (path === '/v1/assessments') content['multipart/form-data'] = scheduleForm
     const slow = path === '/v1/assessments' ? { '504': problem('The work took longer than the service allows') } : {}
     paths[path] = {
       post: {
@@ -168,7 +167,6 @@ export function openapi(examples: Readonly<Record<string, unknown>>) {
         responses: {
           '200': example ? answerOrPage(answer) : json(answer, 'The answer'),
           ...failures,
-          ...acceptable,
           ...slow,
         },
       },
@@ -176,16 +174,16 @@ export function openapi(examples: Readonly<Record<string, unknown>>) {
   }
   for (const [path, [operationId, summary, reply]] of Object.entries(lists))
     paths[path] = { get: { operationId, summary, tags: ['catalogue'], responses: { '200': json(reply, 'The list') } } }
-  const id = { name: 'id', in: 'path', required: true, schema: { type: 'string' } }
   paths['/v1/methods/{id}'] = {
     get: {
       operationId: 'getMethod',
       tags: ['catalogue'],
       summary: 'The methods of one id',
-      parameters: [id],
+      parameters: [inPath('id', 'Id of a method')],
       responses: { '200': json('MethodReply', 'The methods'), '404': problem('No method has this id') },
     },
   }
+  Object.assign(paths, storedPaths(examples))
   const description =
     'Axial design of pile foundations. Units: m, kN, kPa, kN/m3, degrees; settlement in mm. Every quantity also takes a string with a unit.'
   return {
@@ -197,7 +195,8 @@ export function openapi(examples: Readonly<Record<string, unknown>>) {
       license: { name: 'MIT', identifier: 'MIT' },
     },
     servers: [{ url: '/' }],
+    security: [{ key: [] }, {}],
     paths,
-    components: { schemas: components() },
+    components: { schemas: components(), securitySchemes: { key: { type: 'http', scheme: 'bearer' } } },
   }
 }

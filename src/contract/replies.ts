@@ -132,18 +132,19 @@ export const settlementResult = z.strictObject({
     })
     .optional(),
 })
+export const checkKinds = [
+  'pile-compression',
+  'pile-uplift',
+  'group-compression',
+  'block-compression',
+  'group-uplift',
+  'block-uplift',
+  'pile-section',
+  'settlement',
+  'tilt',
+] as const
 export const checkResult = z.strictObject({
-  check: z.enum([
-    'pile-compression',
-    'pile-uplift',
-    'group-compression',
-    'block-compression',
-    'group-uplift',
-    'block-uplift',
-    'pile-section',
-    'settlement',
-    'tilt',
-  ]),
+  check: z.enum(checkKinds),
   combination: text,
   demand: z.number().meta({ description: 'kN, mm or ratio, by check' }),
   resistance: z.number().meta({ description: 'in the unit of the demand' }),
@@ -151,12 +152,22 @@ export const checkResult = z.strictObject({
   satisfied: z.boolean(),
   pile: z.int().optional(),
 })
+const worstCheck = z.strictObject({
+  cap: text,
+  neighbour: text.meta({ description: 'the other cap of an angular distortion' }).optional(),
+  check: z.enum([...checkKinds, 'angular-distortion']),
+  combination: text,
+  utilisation: out('1', 'largest'),
+})
 export const assessmentResult = z.strictObject({
   summary: z.strictObject({
     caps: z.int(),
-    satisfied: z.int(),
-    exceeded: z.int(),
-    worst: z.strictObject({ cap: text, check: text, combination: text, utilisation: out('1', 'largest') }).optional(),
+    satisfied: z.int().meta({ description: 'caps with every check satisfied' }),
+    exceeded: z.int().meta({ description: 'caps with a check exceeded; neighbours are counted in `checks` alone' }),
+    worst: worstCheck.optional().meta({ description: 'of all caps and neighbours' }),
+    checks: z
+      .array(z.strictObject({ ...worstCheck.shape, count: z.int(), exceeded: z.int() }))
+      .meta({ description: 'the worst of each kind of check, how many were made and how many exceed' }),
   }),
   caps: z.array(
     z.strictObject({

@@ -18,6 +18,7 @@ export type FaultCode =
   | 'too-many-piles'
   | 'unknown-reference'
   | 'duplicate-mark'
+  | 'duplicate-row'
   | 'missing-combination'
   | 'missing-load'
   | 'limit-state-mismatch'

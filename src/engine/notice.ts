@@ -16,6 +16,8 @@ export type NoticeCode =
   | 'ground-carried-on'
   | 'base-movement-governs'
   | 'approximation'
+  | 'missing-combinations'
+  | 'loads-not-used'
 
 /** The one notice that every answer carries. */
 export const usualCautions: Notice = {

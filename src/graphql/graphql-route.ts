@@ -1,5 +1,6 @@
 import type { FastifyInstance, FastifyReply, FastifyRequest } from 'fastify'
 import type { GraphQLFormattedError } from 'graphql'
+import type { Actor } from '../operations/rights.ts'
 import { type FormatOptions, formatError } from './error-format.ts'
 import { judgeVariables } from './judge-variables.ts'
 import { type GraphqlMediaType, legacy, modern, negotiate } from './media-type.ts'
@@ -29,11 +30,21 @@ function statusUnder(type: GraphqlMediaType, { data, errors }: Answer): number {
 const textOf = ({ query, operationName }: GraphqlRequest) =>
   operationName === undefined ? query : `${query}\n#${JSON.stringify(operationName)}`
 
-async function run(app: FastifyInstance, request: GraphqlRequest, options: FormatOptions): Promise<Answer> {
+async function run(
+  app: FastifyInstance,
+  request: GraphqlRequest,
+  options: FormatOptions,
+  actor: Actor,
+): Promise<Answer> {
   const refused = refuseJson(request.query)
   if (refused) return { errors: [formatError(refused, options)] }
   try {
-    const { data, errors } = await app.graphql(textOf(request), {}, { ...request.variables }, request.operationName)
+    const { data, errors } = await app.graphql(
+      textOf(request),
+      { actor },
+      { ...request.variables },
+      request.operationName,
+    )
     // Errors first, as clients read them.
     return {
       ...(errors && { errors: errors as readonly GraphQLFormattedError[] }),
@@ -48,7 +59,12 @@ async function run(app: FastifyInstance, request: GraphqlRequest, options: Forma
   }
 }
 
-export function graphqlRoute(app: FastifyInstance, options: FormatOptions): void {
+export type RouteOptions = FormatOptions & {
+  /** Who asks. */
+  readonly actorOf: (request: FastifyRequest) => Actor
+}
+
+export function graphqlRoute(app: FastifyInstance, options: RouteOptions): void {
   app.removeContentTypeParser('text/plain')
   const handler = async (request: FastifyRequest, reply: FastifyReply) => {
     reply.header('vary', 'Accept')
@@ -59,7 +75,7 @@ export function graphqlRoute(app: FastifyInstance, options: FormatOptions): void
       reply.code(status).header('content-type', `${type}; charset=utf-8`).send(JSON.stringify(body))
     const read = readRequest(request)
     if ('error' in read) return send(read.status, { errors: [read.error] })
-    const answer = await run(app, read, options)
+    const answer = await run(app, read, options, options.actorOf(request))
     return send(statusUnder(type, answer), answer)
   }
   app.get('/graphql', handler)

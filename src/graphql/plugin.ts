@@ -3,7 +3,7 @@ import type { FastifyInstance } from 'fastify'
 import mercurius from 'mercurius'
 import { type FormatOptions, formatError } from './error-format.ts'
 import { explorerRoute } from './explorer/explorer-route.ts'
-import { graphqlRoute } from './graphql-route.ts'
+import { graphqlRoute, type RouteOptions } from './graphql-route.ts'
 import { cachedDocuments, limits } from './limits.ts'
 import { resolvers } from './resolvers.ts'
 import { documentLimits, noIntrospection } from './validation-rules.ts'
@@ -11,11 +11,12 @@ import { documentLimits, noIntrospection } from './validation-rules.ts'
 export type GraphqlOptions = {
   /** True: no introspection, no suggestions, no explorer. */
   readonly production: boolean
+  readonly actorOf: RouteOptions['actorOf']
 }
 
 /** GraphQL at /graphql. The route is our own, because that of mercurius coerces, batches and negotiates otherwise. */
 export async function graphqlPlugin(app: FastifyInstance, options: GraphqlOptions): Promise<void> {
-  const { production } = options
+  const { production, actorOf } = options
   const format: FormatOptions = { production, report: (err) => app.log.error({ err }, 'GraphQL failed') }
   const bodyBytes = app.initialConfig.bodyLimit ?? 1_048_576
   // The declared type of mercurius knows fewer options than the validator of graphql, which gets them all.
@@ -38,6 +39,6 @@ export async function graphqlPlugin(app: FastifyInstance, options: GraphqlOption
       } as never,
     }),
   })
-  await app.register(async (scope) => graphqlRoute(scope, format))
+  await app.register(async (scope) => graphqlRoute(scope, { ...format, actorOf }))
   if (!production) await app.register(explorerRoute)
 }

@@ -3,7 +3,7 @@
 // biome-ignore-all format: generated
 // biome-ignore-all assist: generated
 import type { GraphQLResolveInfo, GraphQLScalarType, GraphQLScalarTypeConfig } from 'graphql';
-import type { MercuriusContext } from 'mercurius';
+import type { Context } from './context.ts';
 export type Maybe<T> = T | null;
 export type InputMaybe<T> = Maybe<T>;
 export type RequireFields<T, K extends keyof T> = Omit<T, K> & { [P in K]-?: NonNullable<T[P]> };
@@ -916,7 +916,7 @@ export interface JsonScalarConfig extends GraphQLScalarTypeConfig<ResolversTypes
   name: 'JSON';
 }
 
-export type QueryResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['Query'] = ResolversParentTypes['Query']> = {
+export type QueryResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Query'] = ResolversParentTypes['Query']> = {
   singlePile?: Resolver<ResolversTypes['SinglePileAnswer'], ParentType, ContextType, RequireFields<QuerySinglePileArgs, 'request'>>;
   block?: Resolver<ResolversTypes['BlockAnswer'], ParentType, ContextType, RequireFields<QueryBlockArgs, 'request'>>;
   group?: Resolver<ResolversTypes['GroupAnswer'], ParentType, ContextType, RequireFields<QueryGroupArgs, 'request'>>;
@@ -927,23 +927,23 @@ export type QueryResolvers<ContextType = MercuriusContext, ParentType extends Re
   limits?: Resolver<ResolversTypes['Limits'], ParentType, ContextType>;
 };
 
-export type AnswerResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['Answer'] = ResolversParentTypes['Answer']> = {
+export type AnswerResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Answer'] = ResolversParentTypes['Answer']> = {
   __resolveType: TypeResolveFn<'SinglePileAnswer' | 'BlockAnswer' | 'GroupAnswer' | 'SettlementAnswer', ParentType, ContextType>;
 };
 
-export type MetaResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['Meta'] = ResolversParentTypes['Meta']> = {
+export type MetaResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Meta'] = ResolversParentTypes['Meta']> = {
   engine?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   requestHash?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
 };
 
-export type NoticeResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['Notice'] = ResolversParentTypes['Notice']> = {
+export type NoticeResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Notice'] = ResolversParentTypes['Notice']> = {
   code?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   level?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   text?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   pointer?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
 };
 
-export type SinglePileAnswerResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['SinglePileAnswer'] = ResolversParentTypes['SinglePileAnswer']> = {
+export type SinglePileAnswerResolvers<ContextType = Context, ParentType extends ResolversParentTypes['SinglePileAnswer'] = ResolversParentTypes['SinglePileAnswer']> = {
   result?: Resolver<ResolversTypes['SinglePileResult'], ParentType, ContextType>;
   notices?: Resolver<ReadonlyArray<ResolversTypes['Notice']>, ParentType, ContextType>;
   trace?: Resolver<Maybe<ResolversTypes['Trace']>, ParentType, ContextType>;
@@ -951,7 +951,7 @@ export type SinglePileAnswerResolvers<ContextType = MercuriusContext, ParentType
   __isTypeOf?: IsTypeOfResolverFn<ParentType, ContextType>;
 };
 
-export type BlockAnswerResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['BlockAnswer'] = ResolversParentTypes['BlockAnswer']> = {
+export type BlockAnswerResolvers<ContextType = Context, ParentType extends ResolversParentTypes['BlockAnswer'] = ResolversParentTypes['BlockAnswer']> = {
   result?: Resolver<ResolversTypes['BlockResult'], ParentType, ContextType>;
   notices?: Resolver<ReadonlyArray<ResolversTypes['Notice']>, ParentType, ContextType>;
   trace?: Resolver<Maybe<ResolversTypes['Trace']>, ParentType, ContextType>;
@@ -959,7 +959,7 @@ export type BlockAnswerResolvers<ContextType = MercuriusContext, ParentType exte
   __isTypeOf?: IsTypeOfResolverFn<ParentType, ContextType>;
 };
 
-export type GroupAnswerResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['GroupAnswer'] = ResolversParentTypes['GroupAnswer']> = {
+export type GroupAnswerResolvers<ContextType = Context, ParentType extends ResolversParentTypes['GroupAnswer'] = ResolversParentTypes['GroupAnswer']> = {
   result?: Resolver<ResolversTypes['GroupResult'], ParentType, ContextType>;
   notices?: Resolver<ReadonlyArray<ResolversTypes['Notice']>, ParentType, ContextType>;
   trace?: Resolver<Maybe<ResolversTypes['Trace']>, ParentType, ContextType>;
@@ -967,7 +967,7 @@ export type GroupAnswerResolvers<ContextType = MercuriusContext, ParentType exte
   __isTypeOf?: IsTypeOfResolverFn<ParentType, ContextType>;
 };
 
-export type SettlementAnswerResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['SettlementAnswer'] = ResolversParentTypes['SettlementAnswer']> = {
+export type SettlementAnswerResolvers<ContextType = Context, ParentType extends ResolversParentTypes['SettlementAnswer'] = ResolversParentTypes['SettlementAnswer']> = {
   result?: Resolver<ResolversTypes['SettlementResult'], ParentType, ContextType>;
   notices?: Resolver<ReadonlyArray<ResolversTypes['Notice']>, ParentType, ContextType>;
   trace?: Resolver<Maybe<ResolversTypes['Trace']>, ParentType, ContextType>;
@@ -975,7 +975,7 @@ export type SettlementAnswerResolvers<ContextType = MercuriusContext, ParentType
   __isTypeOf?: IsTypeOfResolverFn<ParentType, ContextType>;
 };
 
-export type SinglePileResultResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['SinglePileResult'] = ResolversParentTypes['SinglePileResult']> = {
+export type SinglePileResultResolvers<ContextType = Context, ParentType extends ResolversParentTypes['SinglePileResult'] = ResolversParentTypes['SinglePileResult']> = {
   shaftResistance?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   baseResistance?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   ultimateResistance?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
@@ -987,7 +987,7 @@ export type SinglePileResultResolvers<ContextType = MercuriusContext, ParentType
   toeDepth?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
 };
 
-export type LayerResistanceResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['LayerResistance'] = ResolversParentTypes['LayerResistance']> = {
+export type LayerResistanceResolvers<ContextType = Context, ParentType extends ResolversParentTypes['LayerResistance'] = ResolversParentTypes['LayerResistance']> = {
   name?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   top?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   bottom?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
@@ -995,7 +995,7 @@ export type LayerResistanceResolvers<ContextType = MercuriusContext, ParentType 
   shaftResistance?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
 };
 
-export type BlockResultResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['BlockResult'] = ResolversParentTypes['BlockResult']> = {
+export type BlockResultResolvers<ContextType = Context, ParentType extends ResolversParentTypes['BlockResult'] = ResolversParentTypes['BlockResult']> = {
   breadth?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   length?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   depth?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
@@ -1009,7 +1009,7 @@ export type BlockResultResolvers<ContextType = MercuriusContext, ParentType exte
   allowableLoad?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
 };
 
-export type GroupResultResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['GroupResult'] = ResolversParentTypes['GroupResult']> = {
+export type GroupResultResolvers<ContextType = Context, ParentType extends ResolversParentTypes['GroupResult'] = ResolversParentTypes['GroupResult']> = {
   pileCount?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
   single?: Resolver<ResolversTypes['SinglePileResult'], ParentType, ContextType>;
   sumOfPiles?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
@@ -1021,12 +1021,12 @@ export type GroupResultResolvers<ContextType = MercuriusContext, ParentType exte
   allowableLoad?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
 };
 
-export type SettlementResultResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['SettlementResult'] = ResolversParentTypes['SettlementResult']> = {
+export type SettlementResultResolvers<ContextType = Context, ParentType extends ResolversParentTypes['SettlementResult'] = ResolversParentTypes['SettlementResult']> = {
   single?: Resolver<ResolversTypes['SinglePileSettlement'], ParentType, ContextType>;
   group?: Resolver<Maybe<ResolversTypes['GroupSettlement']>, ParentType, ContextType>;
 };
 
-export type SinglePileSettlementResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['SinglePileSettlement'] = ResolversParentTypes['SinglePileSettlement']> = {
+export type SinglePileSettlementResolvers<ContextType = Context, ParentType extends ResolversParentTypes['SinglePileSettlement'] = ResolversParentTypes['SinglePileSettlement']> = {
   load?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   settlement?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   stiffness?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
@@ -1036,18 +1036,18 @@ export type SinglePileSettlementResolvers<ContextType = MercuriusContext, Parent
   curve?: Resolver<Maybe<ReadonlyArray<ResolversTypes['CurvePoint']>>, ParentType, ContextType>;
 };
 
-export type CurvePointResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['CurvePoint'] = ResolversParentTypes['CurvePoint']> = {
+export type CurvePointResolvers<ContextType = Context, ParentType extends ResolversParentTypes['CurvePoint'] = ResolversParentTypes['CurvePoint']> = {
   load?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   settlement?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
 };
 
-export type AxialLoadResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['AxialLoad'] = ResolversParentTypes['AxialLoad']> = {
+export type AxialLoadResolvers<ContextType = Context, ParentType extends ResolversParentTypes['AxialLoad'] = ResolversParentTypes['AxialLoad']> = {
   depth?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   axialLoad?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   shaftStress?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
 };
 
-export type GroupSettlementResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['GroupSettlement'] = ResolversParentTypes['GroupSettlement']> = {
+export type GroupSettlementResolvers<ContextType = Context, ParentType extends ResolversParentTypes['GroupSettlement'] = ResolversParentTypes['GroupSettlement']> = {
   settlement?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   settlementRatio?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
   tilt?: Resolver<ResolversTypes['Tilt'], ParentType, ContextType>;
@@ -1058,37 +1058,37 @@ export type GroupSettlementResolvers<ContextType = MercuriusContext, ParentType 
   curve?: Resolver<Maybe<ReadonlyArray<ResolversTypes['CurvePoint']>>, ParentType, ContextType>;
 };
 
-export type TiltResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['Tilt'] = ResolversParentTypes['Tilt']> = {
+export type TiltResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Tilt'] = ResolversParentTypes['Tilt']> = {
   alongX?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   alongY?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
 };
 
-export type PileSettlementResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['PileSettlement'] = ResolversParentTypes['PileSettlement']> = {
+export type PileSettlementResolvers<ContextType = Context, ParentType extends ResolversParentTypes['PileSettlement'] = ResolversParentTypes['PileSettlement']> = {
   x?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   y?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   load?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   settlement?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
 };
 
-export type GroupStiffnessResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['GroupStiffness'] = ResolversParentTypes['GroupStiffness']> = {
+export type GroupStiffnessResolvers<ContextType = Context, ParentType extends ResolversParentTypes['GroupStiffness'] = ResolversParentTypes['GroupStiffness']> = {
   vertical?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   rockingAlongX?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
   rockingAlongY?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
   atOrigin?: Resolver<ResolversTypes['CapMatrices'], ParentType, ContextType>;
 };
 
-export type CapMatricesResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['CapMatrices'] = ResolversParentTypes['CapMatrices']> = {
+export type CapMatricesResolvers<ContextType = Context, ParentType extends ResolversParentTypes['CapMatrices'] = ResolversParentTypes['CapMatrices']> = {
   flexibility?: Resolver<ReadonlyArray<ReadonlyArray<ResolversTypes['Float']>>, ParentType, ContextType>;
   stiffness?: Resolver<ReadonlyArray<ReadonlyArray<ResolversTypes['Float']>>, ParentType, ContextType>;
 };
 
-export type TraceResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['Trace'] = ResolversParentTypes['Trace']> = {
+export type TraceResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Trace'] = ResolversParentTypes['Trace']> = {
   steps?: Resolver<ReadonlyArray<ResolversTypes['Step']>, ParentType, ContextType>;
   results?: Resolver<ResolversTypes['JSON'], ParentType, ContextType>;
   sources?: Resolver<ReadonlyArray<ResolversTypes['Source']>, ParentType, ContextType>;
 };
 
-export type StepResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['Step'] = ResolversParentTypes['Step']> = {
+export type StepResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Step'] = ResolversParentTypes['Step']> = {
   id?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   kind?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   symbol?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
@@ -1114,47 +1114,47 @@ export type StepResolvers<ContextType = MercuriusContext, ParentType extends Res
   table?: Resolver<Maybe<ResolversTypes['SolutionTable']>, ParentType, ContextType>;
 };
 
-export type SolutionTableResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['SolutionTable'] = ResolversParentTypes['SolutionTable']> = {
+export type SolutionTableResolvers<ContextType = Context, ParentType extends ResolversParentTypes['SolutionTable'] = ResolversParentTypes['SolutionTable']> = {
   columns?: Resolver<ReadonlyArray<ResolversTypes['TableColumn']>, ParentType, ContextType>;
   rows?: Resolver<ReadonlyArray<ReadonlyArray<ResolversTypes['Float']>>, ParentType, ContextType>;
 };
 
-export type TableColumnResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['TableColumn'] = ResolversParentTypes['TableColumn']> = {
+export type TableColumnResolvers<ContextType = Context, ParentType extends ResolversParentTypes['TableColumn'] = ResolversParentTypes['TableColumn']> = {
   symbol?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   unit?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
 };
 
-export type OperandResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['Operand'] = ResolversParentTypes['Operand']> = {
+export type OperandResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Operand'] = ResolversParentTypes['Operand']> = {
   symbol?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   value?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   unit?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   from?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
 };
 
-export type StepRangeResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['StepRange'] = ResolversParentTypes['StepRange']> = {
+export type StepRangeResolvers<ContextType = Context, ParentType extends ResolversParentTypes['StepRange'] = ResolversParentTypes['StepRange']> = {
   symbol?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   min?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
   max?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
   inside?: Resolver<ResolversTypes['Boolean'], ParentType, ContextType>;
 };
 
-export type UnknownResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['Unknown'] = ResolversParentTypes['Unknown']> = {
+export type UnknownResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Unknown'] = ResolversParentTypes['Unknown']> = {
   symbol?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   value?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
   unit?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
 };
 
-export type ResidualResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['Residual'] = ResolversParentTypes['Residual']> = {
+export type ResidualResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Residual'] = ResolversParentTypes['Residual']> = {
   name?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   value?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
 };
 
-export type CitationResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['Citation'] = ResolversParentTypes['Citation']> = {
+export type CitationResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Citation'] = ResolversParentTypes['Citation']> = {
   key?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   locator?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
 };
 
-export type SourceResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['Source'] = ResolversParentTypes['Source']> = {
+export type SourceResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Source'] = ResolversParentTypes['Source']> = {
   key?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   title?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   author?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
@@ -1162,7 +1162,7 @@ export type SourceResolvers<ContextType = MercuriusContext, ParentType extends R
   basis?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
 };
 
-export type MethodResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['Method'] = ResolversParentTypes['Method']> = {
+export type MethodResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Method'] = ResolversParentTypes['Method']> = {
   id?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   kind?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   title?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
@@ -1176,7 +1176,7 @@ export type MethodResolvers<ContextType = MercuriusContext, ParentType extends R
   source?: Resolver<ResolversTypes['Source'], ParentType, ContextType>;
 };
 
-export type MethodParameterResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['MethodParameter'] = ResolversParentTypes['MethodParameter']> = {
+export type MethodParameterResolvers<ContextType = Context, ParentType extends ResolversParentTypes['MethodParameter'] = ResolversParentTypes['MethodParameter']> = {
   key?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   symbol?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   name?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
@@ -1186,7 +1186,7 @@ export type MethodParameterResolvers<ContextType = MercuriusContext, ParentType 
   required?: Resolver<ResolversTypes['Boolean'], ParentType, ContextType>;
 };
 
-export type MethodFormulaResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['MethodFormula'] = ResolversParentTypes['MethodFormula']> = {
+export type MethodFormulaResolvers<ContextType = Context, ParentType extends ResolversParentTypes['MethodFormula'] = ResolversParentTypes['MethodFormula']> = {
   symbol?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   name?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   unit?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
@@ -1196,7 +1196,7 @@ export type MethodFormulaResolvers<ContextType = MercuriusContext, ParentType ex
   range?: Resolver<Maybe<ResolversTypes['JSON']>, ParentType, ContextType>;
 };
 
-export type LimitsResolvers<ContextType = MercuriusContext, ParentType extends ResolversParentTypes['Limits'] = ResolversParentTypes['Limits']> = {
+export type LimitsResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Limits'] = ResolversParentTypes['Limits']> = {
   depth?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
   aliases?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
   tokens?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
@@ -1206,7 +1206,7 @@ export type LimitsResolvers<ContextType = MercuriusContext, ParentType extends R
   pilesPerCap?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
 };
 
-export type Resolvers<ContextType = MercuriusContext> = {
+export type Resolvers<ContextType = Context> = {
   Quantity?: GraphQLScalarType;
   Varying?: GraphQLScalarType;
   Count?: GraphQLScalarType;

@@ -1,6 +1,8 @@
 import type { GraphQLResolveInfo } from 'graphql'
 import { limits as requestLimits } from '../contract/limits.ts'
+import { needScope } from '../operations/rights.ts'
 import { calculators } from './calculators.ts'
+import type { Context } from './context.ts'
 import { limits } from './limits.ts'
 import { methods, sources } from './lists.ts'
 import { plainInput } from './plain-input.ts'
@@ -11,8 +13,10 @@ import { traceWanted } from './trace-wanted.ts'
 /** The operations answer in the contract's own shapes, held to the schema by the compiler: no field needs a resolver. */
 const calculator =
   <Answer>(calculate: (request: unknown, options: { readonly trace: boolean }) => Answer) =>
-  async (_parent: unknown, { request }: { request: unknown }, _context: unknown, info: GraphQLResolveInfo) =>
-    calculate(plainInput(request), { trace: traceWanted(info) })
+  async (_parent: unknown, { request }: { request: unknown }, { actor }: Context, info: GraphQLResolveInfo) => {
+    needScope(actor, 'calculate')
+    return calculate(plainInput(request), { trace: traceWanted(info) })
+  }
 
 export function resolvers(bodyBytes: number): Resolvers {
   const { layers, pilesPerCap } = requestLimits

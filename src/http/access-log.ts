@@ -9,7 +9,7 @@ export function traceIdOf(header: string | string[] | undefined): string {
   return found && !/^0+$/.test(found) ? found : randomBytes(16).toString('hex')
 }
 
-/** One line for each request: id, trace id, route template, status, duration. The request id is the trace id of the caller. */
+/** One line for each request: trace id, route template, status, duration, id of the key, project. The request id is the trace id of the caller. */
 export function accessLog(app: FastifyInstance): void {
   app.addHook('onResponse', async (request, reply) => {
     const route = request.routeOptions.url ?? 'unknown'
@@ -18,6 +18,8 @@ export function accessLog(app: FastifyInstance): void {
         method: request.method,
         route,
         status: reply.statusCode,
+        actor: request.actor?.key ?? undefined,
+        project: request.project ?? (request.params as { slug?: string }).slug,
         durationMs: Math.round(reply.elapsedTime * 1000) / 1000,
       },
       'request',

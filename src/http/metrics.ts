@@ -2,9 +2,11 @@ import type { FastifyInstance } from 'fastify'
 import { collectDefaultMetrics, Gauge, Histogram, Registry } from 'prom-client'
 
 export type Load = { readonly busy: number; readonly queued: number }
+/** Bytes that the store takes; throws where it cannot be asked. */
+export type StoreSize = () => Promise<number>
 
 /** `/metrics` for Prometheus. Series go by route template, so that ids and typing errors add none. */
-export function metrics(app: FastifyInstance, engine: string, load: Load): void {
+export function metrics(app: FastifyInstance, engine: string, load: Load, storeSize: StoreSize): void {
   const register = new Registry()
   collectDefaultMetrics({ register })
   const duration = new Histogram({
@@ -25,6 +27,7 @@ export function metrics(app: FastifyInstance, engine: string, load: Load): void 
     })
   gauge('kentledge_workers_busy', 'Worker threads at work', () => load.busy)
   gauge('kentledge_queue_depth', 'Assessments that wait for a worker thread', () => load.queued)
+  const size = new Gauge({ name: 'kentledge_store_bytes', help: 'Size of the store', registers: [register] })
   new Gauge({
     name: 'kentledge_build_info',
     help: 'Version of the engine',
@@ -35,5 +38,9 @@ export function metrics(app: FastifyInstance, engine: string, load: Load): void 
     const route = request.routeOptions.url ?? 'unknown'
     duration.observe({ method: request.method, route, status: reply.statusCode }, reply.elapsedTime / 1000)
   })
-  app.get('/metrics', async (_, reply) => reply.type(register.contentType).send(await register.metrics()))
+  app.get('/metrics', async (_, reply) => {
+    // The other figures matter most while the store is away.
+    size.set(await storeSize().catch(() => Number.NaN))
+    return reply.type(register.contentType).send(await register.metrics())
+  })
 }

@@ -1,32 +1,61 @@
-import { readFile } from 'node:fs/promises'
-import type { FastifyInstance, FastifyReply, FastifyRequest } from 'fastify'
-import { preferred } from '../contract/accepted.ts'
+import { createHash } from 'node:crypto'
+import type { FastifyReply, FastifyRequest } from 'fastify'
 import { Problem } from '../errors.ts'
-import { pagePolicy } from '../print/page.ts'
+import { anyText, whole } from './query.ts'
 
-const offered = ['application/json', 'text/html'] as const
+/** Query parameters of every list. */
+export const paging = { limit: whole(1, 1000), cursor: anyText('a cursor of this list') }
 
-/** Whether the answer is to be a page; JSON where nothing is said. Throws a problem where neither is acceptable. */
-export function pageWanted(request: FastifyRequest, reply: FastifyReply): boolean {
-  reply.header('vary', 'Accept')
-  const type = preferred(request.headers.accept, offered)
-  if (!type) throw new Problem('not-acceptable')
-  return type === 'text/html'
+/** Ties a position to its list and filters, so that a changed cursor is told instead of followed. No secret: a position is none. */
+const seal = (list: string, position: unknown) =>
+  createHash('sha256')
+    .update(JSON.stringify([list, position]))
+    .digest('base64url')
+    .slice(0, 16)
+
+export const cursorOf = (list: string, position: string | number): string =>
+  Buffer.from(JSON.stringify([position, seal(list, position)])).toString('base64url')
+
+/** The position that a cursor of this list holds. Throws `bad-cursor`. */
+export function positionOf(list: string, cursor: string): unknown {
+  try {
+    const [position, sealed] = JSON.parse(Buffer.from(cursor, 'base64url').toString('utf8')) as unknown[]
+    // Base64 lets trailing bits through: the text must be the one that was given out.
+    if (sealed === seal(list, position) && cursorOf(list, position as string) === cursor) return position
+  } catch {}
+  throw new Problem('bad-cursor')
 }
 
-/** What goes with every page: its policy, and that it is of no use to others. */
-export const pageHeaders = (reply: FastifyReply): FastifyReply =>
-  reply
-    .header('content-security-policy', pagePolicy)
-    .header('x-content-type-options', 'nosniff')
-    .header('referrer-policy', 'no-referrer')
-    .header('cache-control', 'no-store')
-    .type('text/html; charset=utf-8')
+/** The filters of a request as the name of a list: its path and all parameters but those of paging. */
+export function listOf(request: FastifyRequest): string {
+  const url = new URL(request.url, 'http://here')
+  for (const name of Object.keys(paging)) url.searchParams.delete(name)
+  url.searchParams.sort()
+  return url.pathname + url.search
+}
 
-/** The scripts that pages load: additions to what is readable without. */
-export async function pageScripts(app: FastifyInstance): Promise<void> {
-  const plan = await readFile(new URL('../print/plan.js', import.meta.url))
-  app.get('/print/plan.js', async (_request, reply) =>
-    reply.header('x-content-type-options', 'nosniff').type('text/javascript; charset=utf-8').send(plan),
-  )
+/** Cuts rows, asked for with one more than the limit, to a page; the way to the next one stands in the answer and in Link (RFC 8288). */
+export function pageOf<Row>(
+  request: FastifyRequest,
+  reply: FastifyReply,
+  rows: readonly Row[],
+  limit: number,
+  position: (row: Row) => string | number,
+): { readonly items: readonly Row[]; readonly next?: string } {
+  if (rows.length <= limit) return { items: rows }
+  const items = rows.slice(0, limit)
+  const next = cursorOf(listOf(request), position(items.at(-1)!))
+  const url = new URL(request.url, 'http://here')
+  url.searchParams.set('cursor', next)
+  reply.header('link', `<${url.pathname}${url.search}>; rel="next"`)
+  return { items, next }
+}
+
+/** Limit and position of a list request, one row more than its page holds. */
+export function askedPage<Position extends string | number>(
+  request: FastifyRequest,
+  { limit = 100, cursor }: { readonly limit?: number; readonly cursor?: string },
+) {
+  const after = cursor === undefined ? undefined : (positionOf(listOf(request), cursor) as Position)
+  return { limit, page: { limit: limit + 1, ...(after !== undefined && { after }) } }
 }

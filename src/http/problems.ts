@@ -4,7 +4,8 @@ import { catalogue, type ErrorCode, Problem } from '../errors.ts'
 const TYPE = 'application/problem+json; charset=utf-8'
 
 export function sendProblem(reply: FastifyReply, problem: Problem): FastifyReply {
-  if (problem.status === 503) reply.header('retry-after', '1')
+  if (problem.status === 503 || problem.code === 'idempotency-running') reply.header('retry-after', '1')
+  if (problem.status === 401) reply.header('www-authenticate', 'Bearer')
   // The trace id lets an operator find the line of the log that belongs to an answer.
   return reply
     .code(problem.status)

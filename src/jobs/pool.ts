@@ -1,30 +1,46 @@
 import { Piscina } from 'piscina'
 import { Problem } from '../errors.ts'
 
-/** What a thread sends back: the bytes of an answer, or the problem that it met (an Error would lose its fields on the way). */
-export type Outcome = Uint8Array | Pick<Problem, 'code' | 'facts' | 'errors'>
+/** A problem that a thread met, as plain data: an Error would lose its fields on the way. */
+export type Refusal = { readonly refused: Pick<Problem, 'code' | 'facts' | 'errors'> }
+
+/** What a thread runs: an export of a module. Its answer is the outcome of a task, or a refusal. */
+export type Work<Task, Answer> = {
+  readonly entry: URL
+  readonly name: string
+  /** Holds the types together; never set. */
+  readonly types?: (task: Task) => Answer
+}
 
 export type PoolOptions = {
-  readonly entry: URL
-  /** Name of the entry's export. */
-  readonly name: string
   readonly workers: number
   readonly queue: number
   readonly seconds: number
 }
 
+/** In a thread: what `compute` gives, or the problem that it throws, told so that it survives the way. */
+export function outcomeOf<Answer>(compute: () => Answer): Answer | Refusal {
+  try {
+    return compute()
+  } catch (problem) {
+    if (!(problem instanceof Problem)) throw problem
+    return { refused: { code: problem.code, facts: problem.facts, errors: problem.errors } }
+  }
+}
+
+const isRefusal = <Answer>(outcome: Answer | Refusal): outcome is Refusal =>
+  typeof outcome === 'object' && outcome !== null && 'refused' in outcome
 const isOutOfMemory = (fault: unknown) => (fault as { code?: unknown }).code === 'ERR_WORKER_OUT_OF_MEMORY'
 
 /** Threads for work that must not hold up the event loop. The queue is bounded: more work is refused at once. */
-export class WorkerPool<Task> {
-  readonly #pool: Piscina<Task, Outcome>
+export class WorkerPool {
+  readonly #pool: Piscina
   readonly #options: PoolOptions
   #underWay = 0
 
   constructor(options: PoolOptions) {
     this.#options = options
     this.#pool = new Piscina({
-      filename: options.entry.href,
       minThreads: 0,
       maxThreads: options.workers,
       idleTimeout: 600_000,
@@ -47,13 +63,17 @@ export class WorkerPool<Task> {
    * Throws the thread's own problem; `overloaded` when the queue is full; `timed-out` past the deadline; `worker-died` when
    * the thread is lost; `internal-error` when the entry fails.
    */
-  async run(task: Task, signal: AbortSignal): Promise<Uint8Array> {
+  async run<Task, Answer>(work: Work<Task, Answer>, task: Task, signal: AbortSignal): Promise<Answer> {
     if (this.#underWay >= this.#options.workers + this.#options.queue) throw new Problem('overloaded', { seconds: 1 })
     this.#underWay++
     const deadline = AbortSignal.timeout(this.#options.seconds * 1000)
-    let outcome: Outcome
+    let outcome: Answer | Refusal
     try {
-      outcome = await this.#pool.run(task, { name: this.#options.name, signal: AbortSignal.any([signal, deadline]) })
+      outcome = await this.#pool.run(task, {
+        filename: work.entry.href,
+        name: work.name,
+        signal: AbortSignal.any([signal, deadline]),
+      })
     } catch (cause) {
       if (deadline.aborted) throw new Problem('timed-out', { seconds: this.#options.seconds })
       // What the entry itself throws is a defect: to try again would meet it again.
@@ -63,8 +83,9 @@ export class WorkerPool<Task> {
     } finally {
       this.#underWay--
     }
-    if (outcome instanceof Uint8Array) return outcome
-    throw new Problem(outcome.code, outcome.facts, outcome.errors)
+    if (!isRefusal(outcome)) return outcome
+    const { code, facts, errors } = outcome.refused
+    throw new Problem(code, facts, errors)
   }
 
   async close(): Promise<void> {

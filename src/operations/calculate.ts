@@ -1,5 +1,5 @@
 import type { z } from 'zod'
-import { hashOf } from '../contract/canonical.ts'
+import { hashOf } from '../canonical.ts'
 import { parse } from '../contract/parse.ts'
 import { type Answer, EngineFault, engineVersion, sliceTrace } from '../engine/index.ts'
 import { type ErrorCode, problemError, problemOf } from '../errors.ts'
@@ -21,7 +21,7 @@ export function calculate<T, R>(
 }
 
 /** Turns a refusal of the engine into the problem that is told. */
-function told<R>(compute: () => R): R {
+export function told<R>(compute: () => R): R {
   try {
     return compute()
   } catch (fault) {

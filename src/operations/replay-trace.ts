@@ -1,4 +1,4 @@
-import { hashOf } from '../contract/canonical.ts'
+import { hashOf } from '../canonical.ts'
 import { parse } from '../contract/parse.ts'
 import { replayRequest } from '../contract/replay.ts'
 import { engineVersion, replay, usualCautions } from '../engine/index.ts'

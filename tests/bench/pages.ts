@@ -21,7 +21,7 @@ function recordOf(caps: number, combinations: number, mark?: string): Assessment
   }
 }
 
-/** (f) CPU and size of pages from records that lie ready: one pile, one cap, the plan of many. */
+/** (g) CPU and size of pages from records that lie ready: one pile, one cap, the plan of many. */
 export function pages(): Finding[] {
   const request = parse(singlePileRequest, singlePileBody)
   const answer = calculateSinglePile(request, { trace: true })
@@ -49,7 +49,7 @@ export function pages(): Finding[] {
   const finding = (what: string, name: keyof typeof bytes, most?: { ms: number; bytes: number }): Finding => {
     const ms = median(us[name]) / 1e3
     return {
-      part: 'f',
+      part: 'g',
       what,
       value: `${time(median(us[name]))}, ${Math.round(bytes[name] / 1e3)} kB`,
       ...(most && {

@@ -12,7 +12,8 @@ const parts: Readonly<Record<string, () => Promise<readonly Finding[]>>> = {
     ...(await (await import('./probe-under-load.ts')).probeUnderLoad()),
     ...(await (await import('./overload.ts')).overload()),
   ],
-  f: async () => (await import('./pages.ts')).pages(),
+  f: async () => (await import('./records.ts')).records(),
+  g: async () => (await import('./pages.ts')).pages(),
 }
 
 const print = (line: string) => process.stdout.write(`${line}\n`)

@@ -2,11 +2,12 @@ import Fastify from 'fastify'
 import { serverAudits } from 'graphql-http'
 import { afterAll, beforeAll, expect, test } from 'vitest'
 import { graphqlPlugin } from '../../src/graphql/plugin.ts'
+import { anonymous } from '../../src/store/actor.ts'
 
 const app = Fastify()
 let url = ''
 beforeAll(async () => {
-  await graphqlPlugin(app, { production: false })
+  await graphqlPlugin(app, { production: false, actorOf: () => anonymous })
   url = `${await app.listen({ port: 0, host: '127.0.0.1' })}/graphql`
 })
 afterAll(() => app.close())

@@ -2,11 +2,12 @@ import Fastify, { type FastifyInstance } from 'fastify'
 import { afterAll, beforeAll, describe, expect, test } from 'vitest'
 import { limits } from '../../src/graphql/limits.ts'
 import { graphqlPlugin } from '../../src/graphql/plugin.ts'
+import { anonymous } from '../../src/store/actor.ts'
 
 const apps: Record<'development' | 'production', FastifyInstance> = { development: Fastify(), production: Fastify() }
 beforeAll(async () => {
-  await graphqlPlugin(apps.development, { production: false })
-  await graphqlPlugin(apps.production, { production: true })
+  await graphqlPlugin(apps.development, { production: false, actorOf: () => anonymous })
+  await graphqlPlugin(apps.production, { production: true, actorOf: () => anonymous })
 })
 afterAll(() => Promise.all(Object.values(apps).map((app) => app.close())))
 

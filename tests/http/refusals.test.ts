@@ -132,6 +132,23 @@ describe('text and depth', () => {
   })
 })
 
+test('a name that stands twice in one object is refused, on every route; in two objects it may', async () => {
+  const bent = JSON.stringify(single)
+    .replace('"length":', '"length":1,"len\\u0067th":')
+    .replace('"layers":[{', '"layers":[{"a/b~":{"x":1},"a/b~":[{"x":1},{"x":2,"x":3}],')
+  const faults = [
+    ['/pile/length', 'duplicate-field'],
+    ['/ground/layers/0/a~1b~0', 'duplicate-field'],
+    ['/ground/layers/0/a~1b~0/1/x', 'duplicate-field'],
+  ]
+  const reply = await post('/v1/single-pile', bent)
+  expect(reply.statusCode).toBe(422)
+  expect(new Set(brief(reply.json().errors).map(String))).toEqual(new Set(faults.map(String)))
+  const title = JSON.stringify(schedule).replace('"title":', '"title":"one, {: \\"two\\"","title":')
+  expect(brief((await post('/v1/assessments', title)).json().errors)).toEqual([['/title', 'duplicate-field']])
+  expect((await post('/v1/single-pile', single)).statusCode).toBe(200)
+})
+
 describe('the query', () => {
   test.each([
     ['trase=none', 'trase'],

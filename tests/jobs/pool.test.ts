@@ -1,15 +1,15 @@
 import { afterEach, expect, test } from 'vitest'
 import { Problem } from '../../src/errors.ts'
-import { WorkerPool } from '../../src/jobs/pool.ts'
+import { type Work, WorkerPool } from '../../src/jobs/pool.ts'
 import type { obey } from './thread-entry.ts'
 
 type Task = Parameters<typeof obey>[0]
-const entry = new URL('./thread-entry.ts', import.meta.url)
-const open: WorkerPool<Task>[] = []
-function pool(queue: number, seconds = 30): WorkerPool<Task> {
-  const made = new WorkerPool<Task>({ entry, name: 'obey', workers: 1, queue, seconds })
+const work: Work<Task, Uint8Array> = { entry: new URL('./thread-entry.ts', import.meta.url), name: 'obey' }
+const open: WorkerPool[] = []
+function pool(queue: number, seconds = 30) {
+  const made = new WorkerPool({ workers: 1, queue, seconds })
   open.push(made)
-  return made
+  return { run: (task: Task, signal: AbortSignal) => made.run(work, task, signal) }
 }
 afterEach(async () => {
   for (const p of open.splice(0)) await p.close()

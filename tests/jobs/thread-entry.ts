@@ -8,7 +8,7 @@ export async function obey(task: {
 }): Promise<unknown> {
   if (task.die) process.exit(3)
   if (task.fail) throw new TypeError('a defect')
-  if (task.refuse) return { code: 'malformed-json', facts: { reason: 'told to' }, errors: [] }
+  if (task.refuse) return { refused: { code: 'malformed-json', facts: { reason: 'told to' }, errors: [] } }
   if (task.sleep) await new Promise((resolve) => setTimeout(resolve, task.sleep))
   return new TextEncoder().encode(task.answer ?? '')
 }

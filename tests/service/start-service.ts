@@ -1,6 +1,9 @@
 import { type ChildProcess, spawn } from 'node:child_process'
 import { once } from 'node:events'
+import { mkdtempSync, rmSync } from 'node:fs'
 import { createServer } from 'node:net'
+import { tmpdir } from 'node:os'
+import { join } from 'node:path'
 import { setTimeout as wait } from 'node:timers/promises'
 import { fileURLToPath } from 'node:url'
 
@@ -29,12 +32,14 @@ const root = fileURLToPath(new URL('../../', import.meta.url))
 export async function startService(start: Start = {}): Promise<Started> {
   const [program, ...args] = start.command ?? [process.execPath, 'src/main.ts']
   const port = await freePort()
+  const data = mkdtempSync(join(tmpdir(), 'kentledge-data-'))
   const child = spawn(program!, args, {
     cwd: start.cwd ?? root,
-    env: { LOG_LEVEL: 'warn', ...start.env, PORT: String(port) },
+    env: { LOG_LEVEL: 'warn', DATA_DIR: data, ...start.env, PORT: String(port) },
     stdio: ['ignore', 'pipe', 'pipe'],
     ...start.user,
   })
+  child.once('exit', () => rmSync(data, { recursive: true, force: true }))
   let log = ''
   for (const stream of [child.stdout!, child.stderr!])
     stream.on('data', (chunk) => {

@@ -1,7 +1,9 @@
 import { type ChildProcess, spawn } from 'node:child_process'
 import { once } from 'node:events'
-import { readFileSync } from 'node:fs'
+import { mkdtempSync, readFileSync, rmSync } from 'node:fs'
 import { createServer } from 'node:net'
+import { tmpdir } from 'node:os'
+import { join } from 'node:path'
 import { afterEach, expect, test } from 'vitest'
 
 const main = new URL('../../src/main.ts', import.meta.url).pathname
@@ -23,11 +25,13 @@ async function start(
   env: Record<string, string> = {},
 ): Promise<{ child: ChildProcess; url: string; log: () => string }> {
   const port = await freePort()
+  const data = mkdtempSync(join(tmpdir(), 'kentledge-data-'))
   const child = spawn(process.execPath, [main], {
-    env: { ...process.env, PORT: String(port), ...env },
+    env: { ...process.env, PORT: String(port), DATA_DIR: data, ...env },
     stdio: ['ignore', 'pipe', 'pipe'],
   })
   started.push(child)
+  child.once('exit', () => rmSync(data, { recursive: true, force: true }))
   let log = ''
   child.stdout!.on('data', (chunk) => {
     log += chunk

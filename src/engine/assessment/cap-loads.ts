@@ -1,3 +1,4 @@
+import type { CapTerms } from '../piles/pile-plan.ts'
 import { statics } from '../sources/bibliography.ts'
 import { formula } from '../trace/formula.ts'
 import type { Sheet } from '../trace/sheet.ts'
@@ -5,7 +6,6 @@ import type { Term } from '../trace/term.ts'
 import type { Loads, ModelRow, PressingRow } from './schedule.ts'
 
 export type CapActions = { readonly V: number; readonly Mx: number; readonly My: number }
-export type CapTerms = { readonly V: Term<'kN'>; readonly Mx: Term<'kN.m'>; readonly My: Term<'kN.m'> }
 
 export const signedForce = formula({
   symbol: 'F',

@@ -1,17 +1,18 @@
 import { applyBasis } from '../design-basis/design-resistance.ts'
 import type { Notice } from '../notice.ts'
 import { type Point, positions } from '../piles/layout.ts'
+import { type PilePlan, pilePlan } from '../piles/pile-plan.ts'
 import { type RigidCap, rigidCap } from '../piles/rigid-cap.ts'
 import type { BlockTerms } from '../resistance/block.ts'
 import { group, sumOfPilesFormula } from '../resistance/group.ts'
 import type { GroupJob } from '../resistance/job.ts'
 import type { PileTerms } from '../resistance/single-pile.ts'
 import { capStiffness } from '../settlement/cap-stiffness.ts'
+import { pilePlaces } from '../settlement/pile-places.ts'
 import { type PreparedGroup, prepareGroup } from '../settlement/prepared-group.ts'
 import { plainTexts } from '../trace/plain-string.ts'
 import type { Sheet } from '../trace/sheet.ts'
 import type { Term } from '../trace/term.ts'
-import { type PilePlan, pilePlan } from './pile-plan.ts'
 import { escapePointer } from './places.ts'
 import type { Cap, Schedule } from './schedule.ts'
 
@@ -84,6 +85,7 @@ export function resistanceSet(root: Sheet, schedule: Schedule, cap: Cap, index: 
   const compression = safe(sheet, 'compression')
   let uplift: Safe | undefined
   const points = positions(cap.layout)
+  const inPlan = sheet.within('plan')
   const prepared = prepareGroup(
     sheet.within('settlement'),
     pile,
@@ -104,7 +106,7 @@ export function resistanceSet(root: Sheet, schedule: Schedule, cap: Cap, index: 
       return uplift
     },
     statics: rigidCap(points),
-    plan: pilePlan(sheet.within('plan'), cap.layout, at.layout, compression.terms.pileCount),
+    plan: pilePlan(inPlan, pilePlaces(inPlan, cap.layout, at.layout), compression.terms.pileCount),
     prepared,
     stiffness: capStiffness(sheet.within('settlement'), prepared),
     get notices() {

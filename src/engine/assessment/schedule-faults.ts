@@ -21,12 +21,13 @@ export function refuseFaults(schedule: Schedule): void {
     }
   }
   const { combinations, rows, signs } = schedule.loads
-  const present = new Set<string>()
+  const present = new Map<string, number>()
   for (const [i, row] of rows.entries()) {
     const place = placeOf(row.cap, row.combination)
-    // Which of the two holds is a guess; the sum of both is another.
-    if (present.has(place)) fault('duplicate-mark', `/loads/rows/${i}`, { mark: `${row.cap}, ${row.combination}` })
-    present.add(place)
+    const first = present.get(place)
+    if (first !== undefined)
+      fault('duplicate-row', `/loads/rows/${i}`, { cap: row.cap, combination: row.combination, first: first + 1 })
+    else present.set(place, i)
     if (!marks.has(row.cap))
       fault('unknown-reference', `/loads/rows/${i}/cap`, { kind: 'cap', name: row.cap, known: [...marks].slice(0, 20) })
     if (!Object.hasOwn(combinations, row.combination))
@@ -63,7 +64,7 @@ export function refuseFaults(schedule: Schedule): void {
 const placeOf = (cap: string, combination: string) => `${cap.length} ${cap}${combination}`
 
 /** Caps without a row in any combination of these limit states; none where the schedule has no such combination. */
-function capsWithout({ caps, loads }: Schedule, present: ReadonlySet<string>, states: readonly LimitState[]) {
+function capsWithout({ caps, loads }: Schedule, present: ReadonlyMap<string, number>, states: readonly LimitState[]) {
   const wanted = Object.entries(loads.combinations)
     .filter(([, c]) => states.includes(c.limitState))
     .map(([name]) => name)
@@ -74,7 +75,12 @@ function capsWithout({ caps, loads }: Schedule, present: ReadonlySet<string>, st
 }
 
 /** A limit that nothing is checked against would read as satisfied. */
-function serviceFaults(schedule: Schedule, present: ReadonlySet<string>, found: readonly LimitState[], fault: Tell) {
+function serviceFaults(
+  schedule: Schedule,
+  present: ReadonlyMap<string, number>,
+  found: readonly LimitState[],
+  fault: Tell,
+) {
   const limits = Object.values(schedule.limits ?? {}).filter((limit) => limit !== undefined)
   // Working combinations serve here too: where the design basis demands them, their absence is told once, there.
   if (limits.length === 0 || limitStateFor(schedule.designBasis) === 'working') return

@@ -1,5 +1,5 @@
 import type { Layout } from '../piles/layout.ts'
-import { pileLoads } from '../piles/rigid-cap.ts'
+import { type CapTerms, pileLoads } from '../piles/pile-plan.ts'
 import { practice, statics } from '../sources/bibliography.ts'
 import { formula } from '../trace/formula.ts'
 import type { Sheet } from '../trace/sheet.ts'
@@ -9,7 +9,7 @@ import type { CoupledPiles } from './continuum/coupled-piles.ts'
 import { type ElasticGroup, elasticGroup, type Plane, superposed } from './group.ts'
 import type { PilePlace } from './pile-places.ts'
 import type { PileResponse } from './pile-response.ts'
-import { type CapLoadTerms, groupResponse, type PreparedGroup, prepareFrom } from './prepared-group.ts'
+import { groupResponse, type PreparedGroup, prepareFrom } from './prepared-group.ts'
 import { groupCurve, softPlane, softSettlements } from './soft-group.ts'
 import { curveTerms, type Softening } from './softening.ts'
 
@@ -62,7 +62,7 @@ export type GroupJob = {
   readonly cap: 'rigid' | 'flexible'
   readonly places: readonly PilePlace[]
   readonly n: Term<'1'>
-  readonly load: CapLoadTerms
+  readonly load: CapTerms
   readonly coupled: CoupledPiles | undefined
   readonly soft: Softening | undefined
   /** Place of the load in the request. */

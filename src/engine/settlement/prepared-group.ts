@@ -2,6 +2,7 @@ import type { GroundProfile } from '../ground/profile-types.ts'
 import type { Notice } from '../notice.ts'
 import { smallestSpacing } from '../piles/enclosing-prism.ts'
 import { type Layout, positions } from '../piles/layout.ts'
+import type { CapTerms } from '../piles/pile-plan.ts'
 import type { PileType } from '../piles/pile-type.ts'
 import type { SettlementMethod } from '../requests.ts'
 import { statics } from '../sources/bibliography.ts'
@@ -76,7 +77,6 @@ export type PreparedGroup = {
   readonly flexibility: CapFlexibility
   readonly load: string
 }
-export type CapLoadTerms = { readonly V: Term<'kN'>; readonly Mx: Term<'kN.m'>; readonly My: Term<'kN.m'> }
 export type GroupResponse = {
   /** At the cap's origin. */
   readonly settlement: Term<'mm'>
@@ -135,7 +135,7 @@ const coupledAnswers = (piles: CoupledPiles): PileAnswers => ({
 export function groupResponse(
   sheet: Sheet,
   prepared: PreparedGroup,
-  load: CapLoadTerms,
+  load: CapTerms,
   pointer: string = prepared.load,
 ): GroupResponse {
   const { V, Mx, My } = load

@@ -2,6 +2,7 @@ import { refuse } from '../faults.ts'
 import type { Notice } from '../notice.ts'
 import { smallestSpacing } from '../piles/enclosing-prism.ts'
 import type { Point } from '../piles/layout.ts'
+import type { CapTerms } from '../piles/pile-plan.ts'
 import type { SettlementRequest } from '../requests.ts'
 import { practice, statics } from '../sources/bibliography.ts'
 import { formula } from '../trace/formula.ts'
@@ -12,7 +13,6 @@ import { assertSpacing } from './assert-spacing.ts'
 import { groupSettlement } from './group-settlement.ts'
 import { pilePlaces } from './pile-places.ts'
 import type { PileResponse, SettlementPlaces } from './pile-response.ts'
-import type { CapLoadTerms } from './prepared-group.ts'
 import { pileResponse } from './settlement-method.ts'
 import { curveTerms, softening, type UltimateTerms } from './softening.ts'
 
@@ -119,7 +119,7 @@ function coupledPiles(
   return elements.coupled(points)
 }
 
-function loadTerms(sheet: Sheet, { load }: SettlementRequest, pointer: string): CapLoadTerms {
+function loadTerms(sheet: Sheet, { load }: SettlementRequest, pointer: string): CapTerms {
   const moment = (symbol: 'Mx' | 'My', presses: string): Term<'kN.m'> => {
     const label = { symbol, name: `moment that presses piles at ${presses}`, unit: 'kN.m' } as const
     const value = load[symbol]

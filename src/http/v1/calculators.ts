@@ -6,7 +6,7 @@ import { calculateGroup } from '../../operations/calculate-group.ts'
 import { calculateSettlement } from '../../operations/calculate-settlement.ts'
 import { calculateSinglePile } from '../../operations/calculate-single-pile.ts'
 import { printCalculation } from '../../operations/print-calculation.ts'
-import { pageHeaders, pageWanted } from '../pages.ts'
+import { JSON_OR_PAGE, pageHeaders } from '../html.ts'
 
 /** `?trace=none` leaves the trace out; `?of=<pointer>` gives only the steps behind one part of the result. */
 export function optionsOf(request: FastifyRequest): Options {
@@ -30,10 +30,10 @@ const operations = {
 /** The calculators: pure, nothing is stored. Plain JSON.stringify is the fastest serializer for replies of this size. */
 export function calculators(app: FastifyInstance): void {
   for (const kind of Object.keys(operations) as (keyof typeof operations)[]) {
-    app.post(`/v1/${kind}`, async (request, reply) => {
-      const page = pageWanted(request, reply)
+    app.post(`/v1/${kind}`, { config: { produces: JSON_OR_PAGE } }, async (request, reply) => {
       const options = optionsOf(request)
-      if (page) return pageHeaders(reply).send(printCalculation(kind, request.body, options))
+      if (request.accepted === 'text/html')
+        return pageHeaders(reply).send(printCalculation(kind, request.body, options))
       const answer = JSON.stringify(operations[kind](request.body, options))
       return reply.type('application/json; charset=utf-8').send(answer)
     })

@@ -2,11 +2,12 @@ import { readFileSync } from 'node:fs'
 import { expect, test } from 'vitest'
 import { parse } from '../../../src/contract/parse.ts'
 import { scheduleRequest } from '../../../src/contract/schedule.ts'
-import { type PilePlan, pileLoad, pilePlan } from '../../../src/engine/assessment/pile-plan.ts'
 import type { Schedule } from '../../../src/engine/assessment/schedule.ts'
 import { assess } from '../../../src/engine/index.ts'
 import { type Layout, positions } from '../../../src/engine/piles/layout.ts'
+import { type PilePlan, pileLoad, pilePlan } from '../../../src/engine/piles/pile-plan.ts'
 import { rigidCap } from '../../../src/engine/piles/rigid-cap.ts'
+import { pilePlaces } from '../../../src/engine/settlement/pile-places.ts'
 import { Sheet } from '../../../src/engine/trace/sheet.ts'
 
 const example = readFileSync(new URL('../../../schema/examples/assessment.json', import.meta.url), 'utf8')
@@ -77,7 +78,7 @@ test.each(Object.entries(layouts))('traced pile loads: %s', (_, { layout, Mx, My
   const given = <const U extends 'kN' | 'kN.m' | '1'>(symbol: string, unit: U, value: number) =>
     sheet.input({ symbol, name: symbol, unit }, value, `/${symbol}`)
   const n = positions(layout).length
-  const plan: PilePlan = pilePlan(sheet, layout, '/layout', given('n', '1', n))
+  const plan: PilePlan = pilePlan(sheet, pilePlaces(sheet, layout, '/layout'), given('n', '1', n))
   const load = { V: given('V', 'kN', 1800), Mx: given('Mx', 'kN.m', Mx), My: given('My', 'kN.m', My) }
   const loads = Array.from({ length: n }, (_, i) => pileLoad(sheet.within(`pile/${i}`), plan, load, i).value)
   for (const [i, P] of loads.entries()) expect(P).toBeCloseTo(bare.load(plane, i), 8)

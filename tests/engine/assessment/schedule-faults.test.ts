@@ -96,8 +96,8 @@ test('a cap that no combination of a limit state loads is named with the combina
 test('two rows for one cap and combination: the second is refused, also where the names run together', () => {
   const full = schedule(overall, 'working')
   const rows = [...(full.loads.rows as PressingRow[]), row('C2', 'K1')]
-  expect(told({ ...full, loads: { ...full.loads, rows } as Schedule['loads'] })).toEqual([
-    'duplicate-mark /loads/rows/2',
+  expect(faults({ ...full, loads: { ...full.loads, rows } as Schedule['loads'] })).toEqual([
+    { code: 'duplicate-row', pointer: '/loads/rows/2', facts: { cap: 'C2', combination: 'K1', first: 2 } },
   ])
   const combinations = { '1K': { limitState: 'working' }, K: { limitState: 'working' } } as const
   const close = {

@@ -1,21 +1,26 @@
 import { createHash } from 'node:crypto'
 import canonicalize from 'canonicalize'
-import { Problem, type ProblemError, problemError, problemOf } from '../errors.ts'
+import { Problem, type ProblemError, problemError, problemOf } from './errors.ts'
 
-/** `sha256:…` over the canonical JSON (RFC 8785) of a value. Throws a problem for what canonical JSON does not hold. */
-export function hashOf(value: unknown): string {
-  let text: string | undefined
+/** Canonical JSON (RFC 8785) of a value. Throws a problem for what canonical JSON does not hold. */
+export function canonicalText(value: unknown): string {
   try {
-    text = canonicalize(value)
+    return canonicalize(value) ?? ''
   } catch (fault) {
     throw refusalOf(value, fault)
   }
-  const hex = createHash('sha256')
-    .update(text ?? '')
-    .digest('hex')
-  // Joined, not a template: see engine/trace/plain-string.ts.
-  return ['sha256:', hex].join('')
 }
+
+/** `sha256:…` over parts of a text or over bytes, one after the other. */
+export function sha256(parts: Iterable<string | Uint8Array>): string {
+  const hash = createHash('sha256')
+  for (const part of parts) hash.update(part)
+  // Joined, not a template: see engine/trace/plain-string.ts.
+  return ['sha256:', hash.digest('hex')].join('')
+}
+
+/** `sha256:…` over the canonical JSON of a value. */
+export const hashOf = (value: unknown): string => sha256([canonicalText(value)])
 
 /** Only a value that could not be printed is walked, without recursion: it may be nested a million deep. */
 function refusalOf(value: unknown, fault: unknown): unknown {

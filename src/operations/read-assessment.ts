@@ -1,0 +1,40 @@
+import type { Actor } from '../store/actor.ts'
+import { unpack } from '../store/blobs.ts'
+import { contentPieces } from '../store/chain.ts'
+import type { Page } from '../store/page.ts'
+import { adjacentRecords, findWholeRecord, listRecords } from '../store/read-records.ts'
+import type { Office } from './office.ts'
+import { ownProject, ownRecord } from './rights.ts'
+import { showRecord } from './show-record.ts'
+
+/** A record, with the ids of the revisions before and after it. */
+export async function getAssessment(office: Office, actor: Actor, id: string) {
+  const record = await ownRecord(office, actor, id)
+  const { before, after } = await adjacentRecords(office.store, record.project, record.revision)
+  return { record: showRecord(record), before, after }
+}
+
+/** Records of a project, oldest first. */
+export async function listAssessments(office: Office, actor: Actor, slug: string, page: Page<number>) {
+  await ownProject(office, actor, slug)
+  return (await listRecords(office.store, slug, page)).map(showRecord)
+}
+
+/** The content of a record, `{ notices, request, result }`, as the canonical JSON whose SHA-256 is the content hash. */
+export async function getContent(office: Office, actor: Actor, id: string) {
+  await ownRecord(office, actor, id)
+  const record = (await findWholeRecord(office.store, id))!
+  const caps = await office.store.reader
+    .selectFrom('caps')
+    .select('body')
+    .where('record', '=', id)
+    .orderBy('ordinal')
+    .execute()
+  const pieces = contentPieces({
+    notices: record.notices,
+    outcome: unpack(record.outcome),
+    request: unpack(record.request),
+    caps: caps.map((cap) => unpack(cap.body)),
+  })
+  return { hash: record.content_hash, project: record.project, text: [...pieces].join('') }
+}

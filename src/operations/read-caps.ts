@@ -1,0 +1,42 @@
+import { Problem } from '../errors.ts'
+import type { Actor } from '../store/actor.ts'
+import type { Page } from '../store/page.ts'
+import { type CapFilter, type CapLine, findCap, findTrace, listCaps as list } from '../store/read-caps.ts'
+import type { Office } from './office.ts'
+import { ownRecord } from './rights.ts'
+
+/** A cap as one row: what dashboards and spreadsheets read. */
+export const showCap = (c: CapLine) => ({
+  mark: c.mark,
+  ground: c.ground,
+  pileType: c.pile_type,
+  pileCount: c.pile_count,
+  x: c.x,
+  y: c.y,
+  governingCheck: c.governing_check,
+  governingCombination: c.governing_combination,
+  utilisation: c.utilisation,
+  exceeded: c.exceeded === 1,
+  settlement: c.settlement,
+  tilt: c.tilt,
+  verticalStiffness: c.stiffness_vertical,
+  rockingStiffnessAlongX: c.stiffness_rocking_x,
+  rockingStiffnessAlongY: c.stiffness_rocking_y,
+})
+export type ShownCap = ReturnType<typeof showCap>
+
+/** Caps of a record in the order of its schedule, each with its place in it. */
+export async function listCaps(office: Office, actor: Actor, id: string, filter: CapFilter, page: Page<number>) {
+  const record = await ownRecord(office, actor, id)
+  const rows = await list(office.store, id, filter, page)
+  return { record, rows: rows.map((row) => ({ ordinal: row.ordinal, cap: showCap(row) })) }
+}
+
+/** One cap: its part of the result as JSON, and its trace. Throws `no-such-cap`. */
+export async function getCap(office: Office, actor: Actor, id: string, mark: string, trace: boolean) {
+  const record = await ownRecord(office, actor, id)
+  const cap = await findCap(office.store, id, mark)
+  if (!cap) throw new Problem('no-such-cap', { mark })
+  const steps = trace ? await findTrace(office.store, id, cap.ordinal) : undefined
+  return { record, result: cap.body, trace: steps }
+}

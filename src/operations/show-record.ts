@@ -1,0 +1,35 @@
+import type { RecordHead } from '../store/read-records.ts'
+
+/** A record as the contract shows it. Nothing of it ever changes, so its bytes stay the same. */
+export function showRecord(r: RecordHead) {
+  return {
+    id: r.id,
+    project: r.project,
+    revision: r.revision,
+    title: r.title,
+    state: 'completed' as const,
+    createdAt: r.created_at,
+    actor: r.actor,
+    actorKey: r.actor_key,
+    engine: r.engine,
+    requestHash: r.request_hash,
+    contentHash: r.content_hash,
+    traceHash: r.trace_hash,
+    previousHash: r.previous_hash,
+    recordHash: r.record_hash,
+    summary: {
+      caps: r.caps,
+      satisfied: r.satisfied,
+      exceeded: r.exceeded,
+      ...(r.worst_cap !== null && {
+        worst: {
+          cap: r.worst_cap,
+          check: r.worst_check!,
+          combination: r.worst_combination!,
+          utilisation: r.worst_utilisation!,
+        },
+      }),
+    },
+  }
+}
+export type ShownRecord = ReturnType<typeof showRecord>

@@ -1,0 +1,5 @@
+import { records } from './0001-records.ts'
+import type { Migration } from './migration.ts'
+
+/** In order: the first brings the database to version 1. */
+export const migrations: readonly Migration[] = [records]
