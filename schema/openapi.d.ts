@@ -1524,11 +1524,36 @@ export interface components {
             }[];
         };
         readonly LimitList: {
+            /** @description layers of a ground profile */
             readonly layers: number;
+            /** @description piles under one cap */
             readonly pilesPerCap: number;
+            /** @description caps of a schedule */
             readonly caps: number;
+            /** @description rows of loads in a schedule */
             readonly rows: number;
+            /** @description bytes of a request; a larger one is a 413 */
             readonly bodyBytes: number;
+            /** @description bytes of all header fields; more are a 431 */
+            readonly headerBytes: number;
+            /** @description seconds until a request must have arrived whole; then 408 */
+            readonly requestSeconds: number;
+            /** @description seconds of an assessment, waiting included; then 504 */
+            readonly assessmentSeconds: number;
+            /** @description assessments that wait for a thread; beyond that 503 with Retry-After */
+            readonly assessmentsWaiting: number;
+            readonly graphql: {
+                /** @description fields above one another in a document */
+                readonly depth: number;
+                /** @description aliases in a document */
+                readonly aliases: number;
+                /** @description tokens of a document */
+                readonly tokens: number;
+                /** @description cost of a document: 10 for group and settlement, 5 for singlePile and block, 1 for other fields */
+                readonly cost: number;
+                /** @description characters of a document */
+                readonly characters: number;
+            };
         };
         readonly Project: {
             readonly slug: string;
@@ -1961,7 +1986,7 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description The body is larger than the limit */
+            /** @description The body is larger than the limit (`bodyBytes` of GET /v1/limits) */
             readonly 413: {
                 headers: {
                     readonly [name: string]: unknown;
@@ -2134,7 +2159,7 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description The body is larger than the limit */
+            /** @description The body is larger than the limit (`bodyBytes` of GET /v1/limits) */
             readonly 413: {
                 headers: {
                     readonly [name: string]: unknown;
@@ -2310,7 +2335,7 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description The body is larger than the limit */
+            /** @description The body is larger than the limit (`bodyBytes` of GET /v1/limits) */
             readonly 413: {
                 headers: {
                     readonly [name: string]: unknown;
@@ -2478,7 +2503,7 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description The body is larger than the limit */
+            /** @description The body is larger than the limit (`bodyBytes` of GET /v1/limits) */
             readonly 413: {
                 headers: {
                     readonly [name: string]: unknown;
@@ -2995,7 +3020,7 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description The body is larger than the limit */
+            /** @description The body is larger than the limit (`bodyBytes` of GET /v1/limits) */
             readonly 413: {
                 headers: {
                     readonly [name: string]: unknown;
@@ -3100,7 +3125,7 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description The body is larger than the limit */
+            /** @description The body is larger than the limit (`bodyBytes` of GET /v1/limits) */
             readonly 413: {
                 headers: {
                     readonly [name: string]: unknown;

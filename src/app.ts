@@ -1,3 +1,4 @@
+import { maxHeaderSize } from 'node:http'
 import fastify, { type FastifyInstance, LogController } from 'fastify'
 import type { Config } from './config.ts'
 import { readExamples } from './contract/examples.ts'
@@ -6,6 +7,7 @@ import { openapi } from './contract/openapi.ts'
 import { readJson } from './contract/read-json.ts'
 import { engineVersion } from './engine/index.ts'
 import { Problem } from './errors.ts'
+import { limits as documentLimits } from './graphql/limits.ts'
 import { graphqlPlugin } from './graphql/plugin.ts'
 import { accessLog, traceIdOf } from './http/access-log.ts'
 import { answerClientError } from './http/client-errors.ts'
@@ -85,7 +87,15 @@ export async function buildService(config: Config, store: Store): Promise<Servic
   app.get('/v1/methods', async () => listMethods())
   app.get<{ Params: { id: string } }>('/v1/methods/:id', async (request) => getMethod(request.params.id))
   app.get('/v1/sources', async () => listSources())
-  app.get('/v1/limits', async () => ({ ...limits, bodyBytes: config.BODY_LIMIT }))
+  app.get('/v1/limits', async () => ({
+    ...limits,
+    bodyBytes: config.BODY_LIMIT,
+    headerBytes: maxHeaderSize,
+    requestSeconds: config.REQUEST_TIMEOUT,
+    assessmentSeconds: config.WORK_TIMEOUT,
+    assessmentsWaiting: config.WORK_QUEUE,
+    graphql: documentLimits,
+  }))
   await graphqlPlugin(app, { production: config.NODE_ENV === 'production', actorOf: (request) => request.actor! })
   return { app, stop }
 }

@@ -101,7 +101,8 @@ export function withLines(problem: Problem, lines: readonly number[]): Problem {
     const [, index, column] = /^\/loads\/rows\/(\d+)(?:\/(.+))?$/.exec(error.pointer) ?? []
     if (index === undefined) return error
     const line = lines[Number(index)]
-    const detail = `Line ${line}${column ? `, column ${column}` : ''}: ${error.detail}`
+    const place = `Line ${line}${column ? `, column ${column}` : ''}`
+    const detail = `${place}: ${error.detail}${error.code === 'duplicate-row' ? ` That is line ${lines[Number(error.first) - 1]}.` : ''}`
     return { ...error, line, ...(column && { column }), detail }
   })
   return new Problem(problem.code, problem.facts, errors)

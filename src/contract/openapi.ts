@@ -138,7 +138,7 @@ const failures = {
   '401': problem('No valid key, where the service asks for one'),
   '403': problem('The key lacks a scope'),
   '406': problem('The route answers in no accepted type'),
-  '413': problem('The body is larger than the limit'),
+  '413': problem('The body is larger than the limit (`bodyBytes` of GET /v1/limits)'),
   '415': problem('The content type is not accepted'),
   '422': problem('The request is invalid or physically impossible; `errors` lists every fault'),
   '503': problem('The service is busy or stopping'),
@@ -185,7 +185,7 @@ export function openapi(examples: Readonly<Record<string, unknown>>) {
   }
   Object.assign(paths, storedPaths(examples))
   const description =
-    'Axial design of pile foundations. Units: m, kN, kPa, kN/m3, degrees; settlement in mm. Every quantity also takes a string with a unit.'
+    'Axial design of pile foundations. Units: m, kN, kPa, kN/m3, degrees; settlement in mm. Every quantity also takes a string with a unit. What one request may hold: GET /v1/limits.'
   return {
     openapi: '3.1.0',
     info: {

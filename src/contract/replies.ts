@@ -241,10 +241,22 @@ const card = z.looseObject({
 export const methodList = z.strictObject({ methods: z.array(card) })
 export const methodReply = z.strictObject({ id: text, methods: z.array(card) })
 export const sourceList = z.strictObject({ sources: z.array(source) })
+const most = (description: string) => z.int().meta({ description })
 export const limitList = z.strictObject({
-  layers: z.int(),
-  pilesPerCap: z.int(),
-  caps: z.int(),
-  rows: z.int(),
-  bodyBytes: z.int(),
+  layers: most('layers of a ground profile'),
+  pilesPerCap: most('piles under one cap'),
+  caps: most('caps of a schedule'),
+  rows: most('rows of loads in a schedule'),
+  bodyBytes: most('bytes of a request; a larger one is a 413'),
+  headerBytes: most('bytes of all header fields; more are a 431'),
+  requestSeconds: most('seconds until a request must have arrived whole; then 408'),
+  assessmentSeconds: most('seconds of an assessment, waiting included; then 504'),
+  assessmentsWaiting: most('assessments that wait for a thread; beyond that 503 with Retry-After'),
+  graphql: z.strictObject({
+    depth: most('fields above one another in a document'),
+    aliases: most('aliases in a document'),
+    tokens: most('tokens of a document'),
+    cost: most('cost of a document: 10 for group and settlement, 5 for singlePile and block, 1 for other fields'),
+    characters: most('characters of a document'),
+  }),
 })

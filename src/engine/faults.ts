@@ -48,3 +48,19 @@ export class EngineFault extends Error {
 export function refuse(code: FaultCode, pointer: string, facts: Fault['facts'] = {}): never {
   throw new EngineFault([{ code, pointer, facts }])
 }
+
+/** Works on each item. Where some refuse, all the others are still tried, and one refusal carries the faults of all. */
+export function eachOf<T, R>(items: readonly T[], work: (item: T, index: number) => R): R[] {
+  const done: R[] = []
+  const faults = new Map<string, Fault>()
+  for (const [index, item] of items.entries()) {
+    try {
+      done.push(work(item, index))
+    } catch (refusal) {
+      if (!(refusal instanceof EngineFault)) throw refusal
+      for (const fault of refusal.faults) faults.set(JSON.stringify(fault), fault)
+    }
+  }
+  if (faults.size > 0) throw new EngineFault([...faults.values()])
+  return done
+}

@@ -1,4 +1,5 @@
 import { move } from 'piscina'
+import { answerText } from '../contract/answer-text.ts'
 import { outcomeOf, type Work } from '../jobs/pool.ts'
 import { assessSchedule } from './assess-schedule.ts'
 import type { Options } from './calculate.ts'
@@ -15,7 +16,7 @@ export type AssessTask = ScheduleText & {
 export const assessInThread = (task: AssessTask) =>
   outcomeOf(() => {
     const answer = withSchedule(task, (input) =>
-      task.page ? printSchedule(input, task.options) : JSON.stringify(assessSchedule(input, task.options)),
+      task.page ? printSchedule(input, task.options) : answerText(assessSchedule(input, task.options)),
     )
     return move(new TextEncoder().encode(answer)) as Uint8Array
   })

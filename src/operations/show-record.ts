@@ -1,4 +1,7 @@
+import type { assess } from '../engine/index.ts'
 import type { RecordHead } from '../store/read-records.ts'
+
+type Summary = ReturnType<typeof assess>['result']['summary']
 
 /** A record as the contract shows it. Nothing of it ever changes, so its bytes stay the same. */
 export function showRecord(r: RecordHead) {
@@ -17,19 +20,7 @@ export function showRecord(r: RecordHead) {
     traceHash: r.trace_hash,
     previousHash: r.previous_hash,
     recordHash: r.record_hash,
-    summary: {
-      caps: r.caps,
-      satisfied: r.satisfied,
-      exceeded: r.exceeded,
-      ...(r.worst_cap !== null && {
-        worst: {
-          cap: r.worst_cap,
-          check: r.worst_check!,
-          combination: r.worst_combination!,
-          utilisation: r.worst_utilisation!,
-        },
-      }),
-    },
+    summary: JSON.parse(r.summary) as Summary,
   }
 }
 export type ShownRecord = ReturnType<typeof showRecord>

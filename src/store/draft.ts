@@ -18,6 +18,7 @@ export type Draft = {
     | 'worst_check'
     | 'worst_combination'
     | 'worst_utilisation'
+    | 'summary'
     | 'notices'
     | 'outcome'
     | 'request'

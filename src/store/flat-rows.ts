@@ -1,3 +1,4 @@
+import { canonicalText } from '../canonical.ts'
 import type { Schedule } from '../engine/assessment/schedule.ts'
 import type { assess } from '../engine/index.ts'
 import type { Draft } from './draft.ts'
@@ -47,6 +48,7 @@ export function flatRows(schedule: Schedule, result: Pick<Result, 'caps' | 'neig
       worst_check: worst?.check ?? null,
       worst_combination: worst?.combination ?? null,
       worst_utilisation: worst?.utilisation ?? null,
+      summary: canonicalText(result.summary),
     },
     caps: result.caps.map((cap, ordinal) => capRow(schedule, ordinal, cap)),
     checks: result.caps.flatMap((cap, ordinal) =>

@@ -24,6 +24,7 @@ export const headColumns = [
   'worst_check',
   'worst_combination',
   'worst_utilisation',
+  'summary',
 ] as const
 export type RecordHead = Pick<RecordRow, (typeof headColumns)[number]>
 

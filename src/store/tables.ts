@@ -43,7 +43,8 @@ export type RecordTable = {
   worst_check: string | null
   worst_combination: string | null
   worst_utilisation: number | null
-  /** Canonical JSON: the notices of the answer, as text. */
+  /** Canonical JSON as text: the summary of the result, of which the columns above are a part; the notices of the answer. */
+  summary: string
   notices: string
   /** Canonical JSON, compressed: `{ neighbours, summary }` of the result; the request. */
   outcome: Uint8Array

@@ -1,3 +1,4 @@
+import { answerText } from '../../src/contract/answer-text.ts'
 import { parse } from '../../src/contract/parse.ts'
 import { scheduleRequest } from '../../src/contract/schedule.ts'
 import { assess } from '../../src/engine/index.ts'
@@ -21,8 +22,8 @@ export function assessmentCost(): Finding[] {
       read: once(() => parse(scheduleRequest, JSON.parse(text)).caps.length),
       assess: once(() => assess(schedule, { trace: false }).result.summary.exceeded),
       trace: once(() => assess(schedule, { trace: true }).result.summary.exceeded),
-      serialise: once(() => JSON.stringify(silent).length),
-      serialiseTrace: once(() => JSON.stringify(traced).length),
+      serialise: once(() => answerText(silent).length),
+      serialiseTrace: once(() => answerText(traced).length),
       many: once(() => assess(many, { trace: false }).result.summary.exceeded),
     },
     9,

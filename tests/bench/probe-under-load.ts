@@ -1,7 +1,7 @@
 import { get } from 'node:http'
 import { scheduleBody } from './bodies.ts'
 import { type Finding, quantile, time } from './measure.ts'
-import { serve } from './service-process.ts'
+import { assess, serve } from './service-process.ts'
 
 const WORKERS = 2
 /** The largest schedule that the limits of the service admit and that runs for some seconds in one thread. */
@@ -29,13 +29,8 @@ export async function probeUnderLoad(): Promise<Finding[]> {
   const keepBusy = async () => {
     while (open) {
       const start = performance.now()
-      const answer = await fetch(`${url}/v1/assessments?trace=none`, {
-        method: 'POST',
-        headers: { 'content-type': 'application/json' },
-        body,
-      })
-      await answer.arrayBuffer()
-      if (!answer.ok) throw new Error(`assessment: ${answer.status}`)
+      const status = await assess(url, body)
+      if (status !== 200) throw new Error(`assessment: ${status}`)
       seconds.push((performance.now() - start) / 1e3)
     }
   }

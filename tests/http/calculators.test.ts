@@ -128,7 +128,7 @@ test.each(bad)('%s is told as it is', async (_, body, faults) => {
   expect(found.sort()).toEqual([...faults].sort())
 })
 
-test('overlapping piles are named', async () => {
+test('overlapping piles are named, each pair by the numbers of the piles', async () => {
   const reply = await post('/v1/block', {
     ...request,
     layout: {
@@ -137,10 +137,22 @@ test('overlapping piles are named', async () => {
         { x: 0, y: 0 },
         { x: 3, y: 0 },
         { x: 3.1, y: 0 },
+        { x: 0.2, y: 0 },
       ],
     },
   })
-  expect(reply.json().errors[0]).toMatchObject({ pointer: '/layout', code: 'piles-overlap', first: 1, second: 2 })
+  expect(reply.json().errors).toMatchObject([
+    { pointer: '/layout', code: 'piles-overlap', first: 1, second: 4 },
+    { pointer: '/layout', code: 'piles-overlap', first: 2, second: 3 },
+  ])
+})
+
+test('every layer without strength is named in one answer', async () => {
+  const bare = { ...clay, undrainedShearStrength: undefined }
+  const layers = [{ ...bare, thickness: 3 }, { ...bare, soil: 'granular', thickness: 3 }, bare]
+  const reply = await post('/v1/single-pile', { ...request, ground: { layers } })
+  const told = reply.json().errors.map((e: { code: string; pointer: string }) => `${e.code} ${e.pointer}`)
+  expect(told).toEqual(layers.map((_, i) => `missing-parameter /ground/layers/${i}`))
 })
 
 test.each<[string, string, string, string | undefined, number]>([

@@ -12,8 +12,8 @@ import { oneillReeseBeta } from '../../src/engine/methods/granular-shaft/oneill-
 import { rp2geoClasses } from '../../src/engine/methods/rp2geo-classes.ts'
 import { Sheet } from '../../src/engine/trace/sheet.ts'
 import type { Term } from '../../src/engine/trace/term.ts'
+import { evaluated } from '../engine/trace/evaluated.ts'
 
-const v = (value: number) => ({ value })
 const kN = (value: number): Term<'kN'> => ({ value, unit: 'kN', symbol: 'R', from: '' })
 
 /** Skempton (1951), rectangle rule [memory]. */
@@ -28,12 +28,12 @@ test.each([
   [1, 0.5, 6.6],
   [2, 0.75, 8.05],
 ])('Skempton: D/B = %f, B/L = %f gives N_c = %f', (D, shape, expected) =>
-  expect(skemptonNc.evaluate({ D: v(D), B: v(1), L_g: v(shape === 0 ? 1e12 : 1 / shape) })).toBeCloseTo(expected, 8),
+  expect(evaluated(skemptonNc, { D: D, B: 1, L_g: shape === 0 ? 1e12 : 1 / shape })).toBeCloseTo(expected, 8),
 )
 
 test('9 from D/B = 4, 5.6 + 0.85 D/B above [common practice]; NHI 2006 capped at 9', () => {
-  expect([0, 2, 4, 10].map((D) => linearNc.evaluate({ D: v(D), B: v(1) }))).toEqual([5.6, 7.3, 9, 9])
-  expect(nhiNc.evaluate({ D: v(15), B: v(3), L_g: v(4) })).toBe(9)
+  expect([0, 2, 4, 10].map((D) => evaluated(linearNc, { D: D, B: 1 }))).toEqual([5.6, 7.3, 9, 9])
+  expect(evaluated(nhiNc, { D: 15, B: 3, L_g: 4 })).toBe(9)
 })
 
 /** AASHTO LRFD 10.7.3.9 [memory]: Q = (2X + 2Y) Z s_u + X Y N_c s_u. */
@@ -41,19 +41,19 @@ test.each([
   [3, 4, 15, 60, 80, 8.625, 20880],
   [6, 6, 9, 40, 70, 7.8, 28296],
 ])('block %f x %f x %f', (X, Y, Z, side, base, Nc, Q) => {
-  const factor = skemptonNc.evaluate({ D: v(Z), B: v(X), L_g: v(Y) })
+  const factor = evaluated(skemptonNc, { D: Z, B: X, L_g: Y })
   expect(factor).toBeCloseTo(Nc, 8)
   expect((2 * X + 2 * Y) * Z * side + X * Y * factor * base).toBeCloseTo(Q, 6)
 })
 
 test("adhesion factors: RP 2GEO (2011), RP 2A (1980s), O'Neill & Reese (1999), Kolk & van der Velde (1996)", () => {
-  expect([0.25, 1, 4].map((psi) => rp2geoAlpha.evaluate({ psi: v(psi) }))).toEqual([1, 0.5, 0.5 * 4 ** -0.25])
-  expect([10, 24, 48, 72, 100].map((c_u) => rp2aAlpha.evaluate({ c_u: v(c_u) }))).toEqual([1, 1, 0.75, 0.5, 0.5])
-  expect([100, 150, 250].map((c_u) => Number(oneillReeseAlpha.evaluate({ c_u: v(c_u) }).toFixed(9)))).toEqual([
+  expect([0.25, 1, 4].map((psi) => evaluated(rp2geoAlpha, { psi: psi }))).toEqual([1, 0.5, 0.5 * 4 ** -0.25])
+  expect([10, 24, 48, 72, 100].map((c_u) => evaluated(rp2aAlpha, { c_u: c_u }))).toEqual([1, 1, 0.75, 0.5, 0.5])
+  expect([100, 150, 250].map((c_u) => Number(evaluated(oneillReeseAlpha, { c_u: c_u }).toFixed(9)))).toEqual([
     0.55, 0.55, 0.45,
   ])
   // The local form, one diameter above the toe: 0.9 psi^-0.3.
-  expect(kolkAlpha.evaluate({ D: v(10), z: v(9), d: v(1), psi: v(1) })).toBeCloseTo(0.9, 12)
+  expect(evaluated(kolkAlpha, { D: 10, z: 9, d: 1, psi: 1 })).toBeCloseTo(0.9, 12)
 })
 
 /** RP 2GEO table 1 [memory]. */
@@ -79,10 +79,10 @@ test('NAVFAC bearing factors', () => {
 
 /** O'Neill & Reese (1999) [memory]. */
 test('drilled shafts in sand', () => {
-  expect([0.5, 1.5, 4, 16, 40].map((z) => Number(oneillReeseBeta.evaluate({ z: v(z) }).toFixed(4)))).toEqual([
+  expect([0.5, 1.5, 4, 16, 40].map((z) => Number(evaluated(oneillReeseBeta, { z: z }).toFixed(4)))).toEqual([
     1.2, 1.1999, 1.01, 0.52, 0.25,
   ])
-  expect([10, 30, 50, 60].map((N_60) => blowCountBase.evaluate({ N_60: v(N_60) }))).toEqual([575, 1725, 2875, 2900])
+  expect([10, 30, 50, 60].map((N_60) => evaluated(blowCountBase, { N_60: N_60 }))).toEqual([575, 1725, 2875, 2900])
 })
 
 /** EN 1997-1:2004 Annex A, tables A.4, A.6 to A.8, A.10 [read in print]. */

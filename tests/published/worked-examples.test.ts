@@ -5,6 +5,7 @@ import { readConfig } from '../../src/config.ts'
 import type { blockResult, settlementResult, singlePileResult } from '../../src/contract/replies.ts'
 import { actionFactors, resistanceFactors } from '../../src/engine/design-basis/en-1997-1-2004.ts'
 import { skemptonNc } from '../../src/engine/methods/cohesive-base/bearing.ts'
+import { evaluated } from '../engine/trace/evaluated.ts'
 import { compareFigures, type Figures, idleRemarks, readExamples } from './worked-example.ts'
 
 let app: Awaited<ReturnType<typeof buildApp>>
@@ -110,9 +111,8 @@ const checks: Readonly<Record<string, Check>> = {
   'SKEMPTON-NC': check(async (i: { D_over_B: number[]; B_over_L: number[] }) => ({
     Nc: await each(i.D_over_B, async (ratio, n) => {
       const shape = i.B_over_L[n]!
-      const of = (value: number) => ({ value })
       if (ratio === 0 || shape === 0)
-        return skemptonNc.evaluate({ D: of(ratio), B: of(1), L_g: of(shape === 0 ? 1e12 : 1 / shape) })
+        return evaluated(skemptonNc, { D: ratio, B: 1, L_g: shape === 0 ? 1e12 : 1 / shape })
       const block = await askBlock({ B: 4, L: 4 / shape, D: 4 * ratio }, 50, 80)
       return block.baseResistance / block.baseArea / 80
     }),

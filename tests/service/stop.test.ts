@@ -1,56 +1,20 @@
 import { type ChildProcess, spawn } from 'node:child_process'
 import { once } from 'node:events'
-import { mkdtempSync, readFileSync, rmSync } from 'node:fs'
-import { createServer } from 'node:net'
-import { tmpdir } from 'node:os'
-import { join } from 'node:path'
+import { readFileSync } from 'node:fs'
+import { fileURLToPath } from 'node:url'
 import { afterEach, expect, test } from 'vitest'
+import { startService } from './start-service.ts'
 
-const main = new URL('../../src/main.ts', import.meta.url).pathname
 const schedule = readFileSync(new URL('../../schema/examples/assessment.json', import.meta.url), 'utf8')
 const started: ChildProcess[] = []
 afterEach(() => {
   for (const child of started.splice(0)) child.kill('SIGKILL')
 })
 
-async function freePort(): Promise<number> {
-  const server = createServer().listen(0, '127.0.0.1')
-  await once(server, 'listening')
-  const { port } = server.address() as { port: number }
-  server.close()
-  return port
-}
-
-async function start(
-  env: Record<string, string> = {},
-): Promise<{ child: ChildProcess; url: string; log: () => string }> {
-  const port = await freePort()
-  const data = mkdtempSync(join(tmpdir(), 'kentledge-data-'))
-  const child = spawn(process.execPath, [main], {
-    env: { ...process.env, PORT: String(port), DATA_DIR: data, ...env },
-    stdio: ['ignore', 'pipe', 'pipe'],
-  })
+async function start(LOG_LEVEL: string) {
+  const { child, address, log } = await startService({ env: { LOG_LEVEL } })
   started.push(child)
-  child.once('exit', () => rmSync(data, { recursive: true, force: true }))
-  let log = ''
-  child.stdout!.on('data', (chunk) => {
-    log += chunk
-  })
-  child.stderr!.on('data', (chunk) => {
-    log += chunk
-  })
-  const url = `http://127.0.0.1:${port}`
-  for (let i = 0; i < 200; i++) {
-    if (
-      await fetch(`${url}/readyz`).then(
-        (r) => r.ok,
-        () => false,
-      )
-    )
-      return { child, url, log: () => log }
-    await new Promise((resolve) => setTimeout(resolve, 50))
-  }
-  throw new Error(`the service did not start: ${log}`)
+  return { child, url: address, log }
 }
 
 /** A schedule that keeps a worker busy for a while: the example's caps many times over. */
@@ -70,17 +34,19 @@ const assess = (url: string, body: string) =>
   fetch(`${url}/v1/assessments?trace=none`, { method: 'POST', headers: { 'content-type': 'application/json' }, body })
 
 test('SIGTERM: what is under way is answered, then the process ends with 0', async () => {
-  const { child, url } = await start({ LOG_LEVEL: 'warn' })
+  const { child, url } = await start('warn')
   const answer = assess(url, longSchedule(300))
-  await new Promise((resolve) => setTimeout(resolve, 150))
+  const metrics = async () => (await fetch(`${url}/metrics`)).text()
+  await expect.poll(metrics, { timeout: 10_000 }).toContain('kentledge_workers_busy 1')
   const exit = once(child, 'exit')
   child.kill('SIGTERM')
-  await new Promise((resolve) => setTimeout(resolve, 30))
-  const ready = await fetch(`${url}/readyz`).then(
-    (r) => r.status,
-    () => 0,
-  )
-  expect([503, 0]).toContain(ready)
+  // The signal is handled as soon as the process has a turn; from then on it takes no work.
+  const takesWork = () =>
+    fetch(`${url}/readyz`).then(
+      (reply) => reply.ok,
+      () => false,
+    )
+  await expect.poll(takesWork, { timeout: 10_000 }).toBe(false)
   const reply = await answer
   expect(reply.status).toBe(200)
   expect(((await reply.json()) as { result: { summary: { caps: number } } }).result.summary.caps).toBe(1800)
@@ -88,7 +54,7 @@ test('SIGTERM: what is under way is answered, then the process ends with 0', asy
 })
 
 test('one log line a request, with the trace id of the caller; problems carry it too', async () => {
-  const { url, log } = await start({ LOG_LEVEL: 'info' })
+  const { url, log } = await start('info')
   const traceId = '4bf92f3577b34da6a3ce929d0e0e4736'
   const reply = await fetch(`${url}/nowhere`, { headers: { traceparent: `00-${traceId}-00f067aa0ba902b7-01` } })
   expect(((await reply.json()) as { traceId: string }).traceId).toBe(traceId)
@@ -103,7 +69,7 @@ test('one log line a request, with the trace id of the caller; problems carry it
 })
 
 test('metrics go by route template', async () => {
-  const { url } = await start({ LOG_LEVEL: 'silent' })
+  const { url } = await start('silent')
   for (let i = 0; i < 20; i++) await fetch(`${url}/v1/methods/unheard-of-${i}`)
   const text = await (await fetch(`${url}/metrics`)).text()
   expect(text).toContain('route="/v1/methods/:id",status="404"')
@@ -113,7 +79,7 @@ test('metrics go by route template', async () => {
 })
 
 test('all faults of the environment are told at once, and the process ends with 1', async () => {
-  const child = spawn(process.execPath, [main], {
+  const child = spawn(process.execPath, [fileURLToPath(new URL('../../src/main.ts', import.meta.url))], {
     env: { ...process.env, PORT: 'eighty', LOG_LEVEL: 'loud', BODY_LIMIT: '-3' },
     stdio: ['ignore', 'ignore', 'pipe'],
   })

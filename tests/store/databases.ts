@@ -61,7 +61,7 @@ export function bothDatabases(): readonly Database[] {
   afterAll(async () => {
     await (await server)?.stop()
     for (const made of folders.splice(0)) rmSync(made, { recursive: true, force: true })
-  })
+  }, 60_000)
   return databases
 }
 

@@ -1,4 +1,4 @@
-import { refuse } from '../faults.ts'
+import { eachOf, refuse } from '../faults.ts'
 import { type Notice, usualCautions } from '../notice.ts'
 import { settleTerms, traceOf } from '../trace/outcome.ts'
 import { Sheet } from '../trace/sheet.ts'
@@ -30,21 +30,28 @@ export function assess(schedule: Schedule, options: AssessOptions) {
   }
   const book = options.trace ? Sheet.recording() : Sheet.silent
   const sheetOf = (cap: Cap) => (alone === undefined || cap.mark === alone ? book : Sheet.silent)
-  const sets = new Map<string, ResistanceSet>()
+  const keyOf = (cap: Cap) => JSON.stringify([cap.pileType, cap.ground, cap.layout, cap.mark === alone])
   const rowsOf = new Map<string, Row[]>(schedule.caps.map((cap) => [cap.mark, []]))
   for (const [index, row] of schedule.loads.rows.entries()) {
     rowsOf.get(row.cap)!.push({ index, row, limitState: schedule.loads.combinations[row.combination]!.limitState })
   }
-  const setOf = schedule.caps.map((cap, index) => {
-    const key = JSON.stringify([cap.pileType, cap.ground, cap.layout, cap.mark === alone])
-    const set = sets.get(key) ?? resistanceSet(sheetOf(cap), schedule, cap, index, sets.size + 1)
-    sets.set(key, set)
-    return set
-  })
+  // Of caps that share a set the first stands for all.
+  const firsts = new Map<string, number>()
+  for (const [index, cap] of schedule.caps.entries()) {
+    const key = keyOf(cap)
+    if (!firsts.has(key)) firsts.set(key, index)
+  }
+  const sets = new Map<string, ResistanceSet>(
+    eachOf([...firsts], ([key, index], i) => {
+      const cap = schedule.caps[index]!
+      return [key, resistanceSet(sheetOf(cap), schedule, cap, index, i + 1)]
+    }),
+  )
+  const setOf = schedule.caps.map((cap) => sets.get(keyOf(cap))!)
   const field = schedule.capInteraction
     ? capField(schedule, setOf, [...rowsOf.values()].flatMap(serviceRows))
     : undefined
-  const assessed = schedule.caps.map((cap, index) => {
+  const assessed = eachOf(schedule.caps, (cap, index) => {
     const set = setOf[index]!
     const rows = rowsOf.get(cap.mark)!
     return { cap, set, ...assessCap(sheetOf(cap), schedule, cap, index, set, rows, cap.mark === alone, field) }
@@ -62,7 +69,7 @@ export function assess(schedule: Schedule, options: AssessOptions) {
       checks,
       settlement,
       stiffness: set.stiffness,
-      notices: [...missingCombinations(checked, cap.mark, index, rowsOf.get(cap.mark)!), ...set.notices],
+      notices: [...missingCombinations(checked, cap.mark, index, rowsOf.get(cap.mark)!), ...set.notices()],
     })),
     neighbours,
   }

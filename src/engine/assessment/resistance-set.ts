@@ -32,7 +32,7 @@ export type ResistanceSet = {
   readonly plan: PilePlan
   readonly prepared: PreparedGroup
   readonly stiffness: ReturnType<typeof capStiffness>
-  readonly notices: readonly Notice[]
+  readonly notices: () => readonly Notice[]
 }
 
 export function resistanceSet(root: Sheet, schedule: Schedule, cap: Cap, index: number, id: number): ResistanceSet {
@@ -109,8 +109,6 @@ export function resistanceSet(root: Sheet, schedule: Schedule, cap: Cap, index: 
     plan: pilePlan(inPlan, pilePlaces(inPlan, cap.layout, at.layout), compression.terms.pileCount),
     prepared,
     stiffness: capStiffness(sheet.within('settlement'), prepared),
-    get notices() {
-      return [...notices.values()]
-    },
+    notices: () => [...notices.values()],
   }
 }

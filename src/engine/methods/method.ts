@@ -54,7 +54,7 @@ export type MethodContext = {
 export type ShaftContext = MethodContext & {
   /** Middle of the sublayer. */
   readonly depth: Term<'m'>
-  readonly effectiveStress: Term<'kPa'>
+  readonly effectiveStress: () => Term<'kPa'>
   /** Vertical effective stress at any depth (stresses held constant below 20 d). */
   readonly effectiveStressAt: (depth: Term<'m'>, id: string) => Term<'kPa'>
   readonly diameter: Term<'m'>
@@ -62,7 +62,7 @@ export type ShaftContext = MethodContext & {
 }
 export type BaseContext = MethodContext & {
   readonly depth: Term<'m'>
-  readonly effectiveStress: Term<'kPa'>
+  readonly effectiveStress: () => Term<'kPa'>
   readonly effectiveStressAt: (depth: Term<'m'>, id: string) => Term<'kPa'>
   /** Width of the base: d_b of a pile, breadth B of a block. */
   readonly breadth: Term<'m'>

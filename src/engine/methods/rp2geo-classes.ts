@@ -38,7 +38,7 @@ export function rp2geoClass(at: MethodContext): {
       got: density,
       limit: 35,
       unit: '%',
-      reason: 'the table begins at medium dense',
+      reason: `Layer "${at.layer.name}" has a relative density of ${density} %, and the table of rp2geo-2011 begins at 35 %, medium dense`,
     })
   const silty = at.setting('silty', 's', '1')?.value === 1
   const row = rp2geoClasses[found.row - (silty ? 1 : 0)]!

@@ -1,4 +1,4 @@
-import { refuse } from '../faults.ts'
+import { EngineFault, type Fault } from '../faults.ts'
 import { statics } from '../sources/bibliography.ts'
 import { formula } from '../trace/formula.ts'
 import type { Sheet } from '../trace/sheet.ts'
@@ -16,29 +16,27 @@ export const outerSide = formula({
 
 export type Prism = { readonly breadth: Term<'m'>; readonly length: Term<'m'> }
 
-/** Refuses two piles in one place, and says which. Gives the smallest spacing (Infinity for one pile). */
+/** So many pairs are told: a spacing that is too small makes every pile overlap. */
+const MOST_PAIRS = 20
+
+/** Refuses piles that overlap, each pair by their numbers. Gives the smallest spacing (Infinity for one pile). */
 export function smallestSpacing(points: readonly Point[], width: number, pointer: string): number {
   // Sorted by x, only neighbours within the smallest distance so far are compared.
   const order = points.map((p, index) => ({ ...p, index })).sort((a, b) => a.x - b.x)
+  const limit = width - 1e-9
+  const overlaps: Fault[] = []
   let smallest = Number.POSITIVE_INFINITY
-  let pair: [number, number] = [0, 0]
   for (let i = 0; i < order.length; i++) {
-    for (let j = i + 1; j < order.length && order[j]!.x - order[i]!.x < smallest; j++) {
+    for (let j = i + 1; j < order.length && order[j]!.x - order[i]!.x < Math.max(smallest, limit); j++) {
       const distance = Math.hypot(order[j]!.x - order[i]!.x, order[j]!.y - order[i]!.y)
-      if (distance < smallest) {
-        smallest = distance
-        pair = [order[i]!.index, order[j]!.index]
+      smallest = Math.min(smallest, distance)
+      if (distance < limit && overlaps.length < MOST_PAIRS) {
+        const [first, second] = [order[i]!.index + 1, order[j]!.index + 1].sort((a, b) => a - b) as [number, number]
+        overlaps.push({ pointer, code: 'piles-overlap', facts: { first, second, spacing: distance, width, unit: 'm' } })
       }
     }
   }
-  if (smallest < width - 1e-9)
-    refuse('piles-overlap', pointer, {
-      first: Math.min(...pair),
-      second: Math.max(...pair),
-      spacing: smallest,
-      width,
-      unit: 'm',
-    })
+  if (overlaps.length > 0) throw new EngineFault(overlaps)
   return smallest
 }
 

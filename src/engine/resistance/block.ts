@@ -137,6 +137,6 @@ function sideUnit(s: Site): Unit {
     )
     if (stratum.layer.soil === 'cohesive')
       return here.step(cohesiveSide, { c_u: at.parameter('undrainedShearStrength', 'c_u', 'kPa') })
-    return here.step(granularSide, { phi: at.parameter('frictionAngle', 'phi', 'deg'), sigma_v: at.effectiveStress })
+    return here.step(granularSide, { phi: at.parameter('frictionAngle', 'phi', 'deg'), sigma_v: at.effectiveStress() })
   }
 }

@@ -23,7 +23,11 @@ function select<M extends ShaftMethod | BaseMethod>(
   tables: Readonly<Record<string, Readonly<Record<string, M>>>>,
 ): Selected<M> {
   if (soil === 'rock')
-    return refuse('method-not-applicable', layerPointer, { soil, part, reason: 'no method for rock is available yet' })
+    return refuse('method-not-applicable', layerPointer, {
+      soil,
+      part,
+      reason: 'The layer is rock, and no method for rock is available yet',
+    })
   const role = `${soil}${part}` as 'cohesiveShaft' | 'cohesiveBase' | 'granularShaft' | 'granularBase'
   const asked = job.methods[role]
   const pointer = `${job.at.methods}/${role}`

@@ -1,3 +1,4 @@
+import { eachOf } from '../faults.ts'
 import { SAME_DEPTH, type Stratum } from '../ground/depths.ts'
 import { practice, statics } from '../sources/bibliography.ts'
 import { formula } from '../trace/formula.ts'
@@ -82,11 +83,14 @@ export function sumOverLayers(
   unit: Unit,
   idleIn: (stratum: Stratum) => Idle | undefined,
 ): { layers: LayerTerms[]; total: Term<'kN'> } {
-  const layers: LayerTerms[] = []
-  for (const stratum of s.layers) {
-    const from = Math.max(stratum.top, s.headDepth.value)
-    const to = Math.min(stratum.bottom, s.toeDepth.value)
-    if (to - from <= SAME_DEPTH) continue
+  const endsOf = ({ top, bottom }: Stratum) =>
+    [Math.max(top, s.headDepth.value), Math.min(bottom, s.toeDepth.value)] as const
+  const reached = s.layers.filter((stratum) => {
+    const [from, to] = endsOf(stratum)
+    return to - from > SAME_DEPTH
+  })
+  const layers = eachOf(reached, (stratum): LayerTerms => {
+    const [from, to] = endsOf(stratum)
     const here = sheet.within(`${stratum.index}`)
     const ends = { top: boundary(s, from, stratum, 'top'), bottom: boundary(s, to, stratum, 'bottom') }
     const parts: Term<'kN'>[] = []
@@ -104,7 +108,7 @@ export function sumOverLayers(
       { symbol: 'R_s', name: `shaft resistance in ${stratum.layer.name}`, unit: 'kN' },
       parts,
     )
-    layers.push({
+    return {
       name: stratum.layer.name,
       ...ends,
       shaftResistance,
@@ -114,8 +118,8 @@ export function sumOverLayers(
         z_b: ends.bottom,
         z_t: ends.top,
       }),
-    })
-  }
+    }
+  })
   return {
     layers,
     total: sheet.sum(
@@ -184,7 +188,7 @@ function boundary(s: Site, depth: number, stratum: Stratum, side: 'top' | 'botto
 
 /** Shaft of one pile by the methods of the request. */
 export function pileShaft(s: Site, sheet: Sheet): { layers: LayerTerms[]; total: Term<'kN'> } {
-  const chosen = s.layers.map((stratum) => {
+  const chosen = eachOf(s.layers, (stratum) => {
     const reached = stratum.top < s.toeDepth.value - 1e-9 && stratum.bottom > s.headDepth.value + 1e-9
     return reached ? selectShaft(s.job, stratum.layer, `${s.job.at.ground}/layers/${stratum.index}`) : undefined
   })

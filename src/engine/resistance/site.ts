@@ -89,7 +89,8 @@ export function contextAt<E extends object>(
     direction: job.direction,
     notice: job.notice,
     depth,
-    get effectiveStress() {
+    // Not a getter: V8 would give each of these objects a hidden class of its own, which keeps the whole trace from an early collection.
+    effectiveStress: () => {
       stress ??= s.stressAt(depth, here)
       return stress
     },

@@ -124,10 +124,15 @@ function operator(node: Node, where: Where, text: string, used: Set<string>): Ch
   return fail(text, `operator ${op} is not allowed`)
 }
 
-export type Operands = Readonly<Record<string, { readonly value: number }>>
+export type Operands = Readonly<Record<string, { readonly value: number; readonly unit: UnitCode }>>
+/** Refuses an operand whose unit is not the declared one. */
+export type Misfit = (name: string, got: UnitCode) => never
 
-/** Throws when the text names an unknown symbol, leaves an operand unused, or does not have the declared dimension. */
-export function compile(text: string, where: Where, unit: UnitCode): (operands: Operands) => number {
+/**
+ * The native function of a formula: it checks the unit of each operand, then computes. Throws when the text names an unknown
+ * symbol, leaves an operand unused, or does not have the declared dimension.
+ */
+export function compile(text: string, where: Where, unit: UnitCode, misfit: Misfit): (operands: Operands) => number {
   const used = new Set<string>()
   const { code, dimension } = check(parse(text) as Node, where, text, used)
   const names = Object.keys(where)
@@ -140,17 +145,10 @@ export function compile(text: string, where: Where, unit: UnitCode): (operands: 
     const factor = units[where[name]!].factor
     return factor === 1 ? `o.${name}.value` : `o.${name}.value * ${factor}`
   }
-  const lines = names.map((name) => `const $${name} = ${scaled(name)};`)
-  const out = units[unit].factor === 1 ? code : `(${code}) / ${units[unit].factor}`
-  return new Function('o', `${lines.join(' ')} return ${out};`) as (operands: Operands) => number
-}
-
-export type Measured = Readonly<Record<string, { readonly unit: UnitCode }>>
-
-/** Emits the check that each operand has its declared unit: it gives the name of the first that has not. */
-export function unitCheck(where: Where): (operands: Measured) => string | undefined {
-  const lines = Object.entries(where).map(
-    ([name, unit]) => `if (o.${name}.unit !== ${JSON.stringify(unit)}) return '${name}'`,
+  const lines = names.map(
+    (name) =>
+      `if (o.${name}.unit !== ${JSON.stringify(where[name])}) misfit('${name}', o.${name}.unit); const $${name} = ${scaled(name)};`,
   )
-  return new Function('o', lines.join('; ')) as (operands: Measured) => string | undefined
+  const out = units[unit].factor === 1 ? code : `(${code}) / ${units[unit].factor}`
+  return new Function('misfit', `return (o) => { ${lines.join(' ')} return ${out}; }`)(misfit)
 }

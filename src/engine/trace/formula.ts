@@ -1,6 +1,7 @@
+import { refuse } from '../faults.ts'
 import type { UnitCode } from '../quantities/units.ts'
 import type { Citation } from '../sources/source.ts'
-import { compile, type Measured, type Operands, unitCheck } from './compile.ts'
+import { compile, type Operands } from './compile.ts'
 import { plain } from './plain-string.ts'
 import type { Term } from './term.ts'
 
@@ -25,9 +26,8 @@ export type Formula<
   U extends UnitCode = UnitCode,
 > = Declaration<W, U> & {
   readonly names: readonly string[]
+  /** Refuses an operand whose unit is not the declared one. */
   readonly evaluate: (operands: Operands) => number
-  /** Name of the first operand whose unit is not the declared one. */
-  readonly misfit: (operands: Measured) => string | undefined
 }
 
 const declared: Formula[] = []
@@ -42,14 +42,16 @@ export const declaredFormulas = (): readonly Formula[] => declared
 export function formula<const W extends Record<string, UnitCode>, const U extends UnitCode>(
   declaration: Declaration<W, U>,
 ): Formula<W, U> {
+  const { text, where, unit } = declaration
   const made = {
     ...declaration,
     symbol: plain(declaration.symbol),
     name: plain(declaration.name),
-    text: plain(declaration.text),
-    names: Object.keys(declaration.where),
-    evaluate: compile(declaration.text, declaration.where, declaration.unit),
-    misfit: unitCheck(declaration.where),
+    text: plain(text),
+    names: Object.keys(where),
+    evaluate: compile(text, where, unit, (odd, got) =>
+      refuse('wrong-dimension', '', { field: `${declaration.name}: ${odd}`, got, expected: where[odd]! }),
+    ),
   }
   declared.push(made as unknown as Formula)
   return made

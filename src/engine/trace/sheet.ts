@@ -106,14 +106,10 @@ export class Sheet {
     operands: TermsOf<W>,
     id: string = f.symbol,
   ): Term<U> {
-    const odd = f.misfit(operands)
-    if (odd !== undefined) {
-      const { unit: got } = operands[odd as keyof W]
-      refuse('wrong-dimension', '', { field: `${f.name}: ${odd}`, got, expected: f.where[odd] ?? '' })
-    }
     const value = f.evaluate(operands)
-    const { symbol, name, unit, source } = f
+    const { symbol, unit } = f
     if (!this.#book) return this.#term(symbol, unit, value, '')
+    const { name, source } = f
     const full = joined(this.#prefix, id)
     const term = this.#term(symbol, unit, value, full)
     const kind = 'formula'

@@ -1,4 +1,5 @@
 import type { FastifyInstance, FastifyRequest } from 'fastify'
+import { answerText } from '../../contract/answer-text.ts'
 import { Problem } from '../../errors.ts'
 import type { Options } from '../../operations/calculate.ts'
 import { calculateBlock } from '../../operations/calculate-block.ts'
@@ -27,14 +28,14 @@ const operations = {
   settlement: calculateSettlement,
 } as const
 
-/** The calculators: pure, nothing is stored. Plain JSON.stringify is the fastest serializer for replies of this size. */
+/** The calculators: pure, nothing is stored. */
 export function calculators(app: FastifyInstance): void {
   for (const kind of Object.keys(operations) as (keyof typeof operations)[]) {
     app.post(`/v1/${kind}`, { config: { produces: JSON_OR_PAGE } }, async (request, reply) => {
       const options = optionsOf(request)
       if (request.accepted === 'text/html')
         return pageHeaders(reply).send(printCalculation(kind, request.body, options))
-      const answer = JSON.stringify(operations[kind](request.body, options))
+      const answer = answerText(operations[kind](request.body, options))
       return reply.type('application/json; charset=utf-8').send(answer)
     })
   }

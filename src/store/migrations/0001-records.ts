@@ -19,7 +19,7 @@ export const records: Migration = {
         previous_hash ${text} not null, record_hash ${text} not null,
         caps integer not null, satisfied integer not null, exceeded integer not null,
         worst_cap ${text}, worst_check ${text}, worst_combination ${text}, worst_utilisation ${real},
-        notices ${text} not null, outcome ${blob} not null, request ${blob} not null,
+        summary ${text} not null, notices ${text} not null, outcome ${blob} not null, request ${blob} not null,
         unique (project, revision))`,
       sql`create table caps (
         record ${text} not null references records, mark ${text} not null, ordinal integer not null,

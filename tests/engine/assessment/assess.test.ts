@@ -102,6 +102,18 @@ test('faults of a schedule are told together, with what is known', () => {
   ).toEqual([['/loads/rows/3/Fz', 'not-a-number']])
 })
 
+test('what the engine refuses is told of every pile type, layout and cap at once', () => {
+  const faults = faultsOf((s) => {
+    s.pileTypes.B600.length = 90
+    s.ground[s.caps[0].ground].layers.at(-1).thickness = 3
+    s.caps[2].layout = { kind: 'ring', count: 2, radius: 0.05 }
+  })
+  expect(faults.map((f) => f.join(' '))).toEqual([
+    '/pileTypes/B600/length pile-below-known-ground',
+    '/caps/2/layout piles-overlap',
+  ])
+})
+
 test('factored loads against an overall factor are refused', () => {
   const faults = faultsOf((s) => {
     for (const c of Object.values<{ limitState: string }>(s.loads.combinations)) c.limitState = 'ultimate'

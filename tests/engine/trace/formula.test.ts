@@ -55,7 +55,9 @@ const values: readonly [string, UnitCode, Record<string, [number, UnitCode]>, nu
 
 test.each(values)('%s in %s', (text, unit, operands, expected) => {
   const where = Object.fromEntries(Object.entries(operands).map(([name, [, code]]) => [name, code]))
-  const terms = Object.fromEntries(Object.entries(operands).map(([name, [value]]) => [name, { value }]))
+  const terms = Object.fromEntries(
+    Object.entries(operands).map(([name, [value, code]]) => [name, { value, unit: code }]),
+  )
   expect(declare(text, unit, where).evaluate(terms)).toBeCloseTo(expected, 12)
 })
 

@@ -41,6 +41,6 @@ export const burland1973: ShaftMethod = {
           'no overconsolidationRatio was given: normally consolidated, the lower value',
           practice('normally consolidated'),
         )
-    return at.sheet.step(betaShaft, { beta: at.sheet.step(burlandBeta, { phi, OCR }), sigma_v: at.effectiveStress })
+    return at.sheet.step(betaShaft, { beta: at.sheet.step(burlandBeta, { phi, OCR }), sigma_v: at.effectiveStress() })
   },
 }

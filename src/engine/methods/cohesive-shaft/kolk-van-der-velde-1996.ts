@@ -25,7 +25,7 @@ export const kolkVanDerVelde1996: ShaftMethod = {
   source: 'kolk-van-der-velde-1996',
   unitShaftResistance: byAdhesion((at, c_u) => {
     noticeInstallation(at, kolkVanDerVelde1996)
-    const psi = at.sheet.step(strengthRatio, { c_u, sigma_v: at.effectiveStress })
+    const psi = at.sheet.step(strengthRatio, { c_u, sigma_v: at.effectiveStress() })
     return at.sheet.step(kolkAlpha, { D: at.toeDepth, z: at.depth, d: at.diameter, psi })
   }),
 }

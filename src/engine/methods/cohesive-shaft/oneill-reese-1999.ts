@@ -37,7 +37,7 @@ export const oneillReese1999: ShaftMethod = {
         got: c_u.value,
         limit: ROCK_LIKE,
         unit: 'kPa',
-        reason: 'use a rock method for stronger ground',
+        reason: `Layer "${at.layer.name}" has c_u = ${c_u.value} kPa, and oneill-reese-1999 holds up to ${ROCK_LIKE} kPa: stronger ground is designed as rock`,
       })
     return at.sheet.step(oneillReeseAlpha, { c_u })
   }),

@@ -34,7 +34,7 @@ export const randolphMurphy1985: ShaftMethod = {
   source: 'randolph-murphy-1985',
   unitShaftResistance: byAdhesion((at, c_u) => {
     noticeInstallation(at, randolphMurphy1985)
-    const psi = at.sheet.step(strengthRatio, { c_u, sigma_v: at.effectiveStress })
+    const psi = at.sheet.step(strengthRatio, { c_u, sigma_v: at.effectiveStress() })
     const n =
       at.setting('normallyConsolidatedRatio', 'n', '1') ??
       at.sheet.assumed(

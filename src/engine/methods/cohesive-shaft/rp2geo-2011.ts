@@ -26,7 +26,7 @@ export const rp2geo2011: ShaftMethod = {
   source: 'api-rp2geo-2011',
   unitShaftResistance: byAdhesion((at, c_u) => {
     noticeInstallation(at, rp2geo2011)
-    const psi = at.sheet.step(strengthRatio, { c_u, sigma_v: at.effectiveStress })
+    const psi = at.sheet.step(strengthRatio, { c_u, sigma_v: at.effectiveStress() })
     if (psi.value > 3)
       at.notice({
         code: 'outside-range',

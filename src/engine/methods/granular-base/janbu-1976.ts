@@ -51,6 +51,6 @@ export const janbu1976: BaseMethod = {
         text: `janbu-1976 was published for plastification angles from ${PUBLISHED[0]} to ${PUBLISHED[1]} degrees; ${psi_p.value} was given.`,
       })
     const N_q = at.sheet.step(janbuNq, { phi: at.parameter('frictionAngle', 'phi', 'deg'), psi_p })
-    return at.sheet.step(sandBase, { sigma_v: at.effectiveStress, N_q })
+    return at.sheet.step(sandBase, { sigma_v: at.effectiveStress(), N_q })
   },
 }

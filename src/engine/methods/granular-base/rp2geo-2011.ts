@@ -28,7 +28,7 @@ export const rp2geoBase2011: BaseMethod = {
     noticeInstallation(at, rp2geoBase2011)
     const { read } = rp2geoClass(at)
     return at.sheet.step(limitedSandBase, {
-      sigma_v: at.effectiveStress,
+      sigma_v: at.effectiveStress(),
       N_q: read('bearing', 'N_q', 'bearing factor', '1'),
       q_l: read('baseLimit', 'q_l', 'limit of the unit base resistance', 'kPa'),
     })

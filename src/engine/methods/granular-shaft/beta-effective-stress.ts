@@ -70,7 +70,7 @@ export const betaEffectiveStress: ShaftMethod = {
         `no interfaceRatio was given: ${kind}`,
         practice('interface angle by installation'),
       )
-    const terms = { K, delta: sheet.step(interfaceAngle, { r_d, phi }), sigma_v: at.effectiveStress }
+    const terms = { K, delta: sheet.step(interfaceAngle, { r_d, phi }), sigma_v: at.effectiveStress() }
     const f_l = at.setting('limit', 'f_l', 'kPa')
     if (!f_l) return sheet.step(frictionShaft, terms)
     return sheet.step(limitedShaft, { f_0: sheet.step(frictionShaft, terms, 'f_0'), f_l })

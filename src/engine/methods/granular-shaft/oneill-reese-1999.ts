@@ -44,6 +44,6 @@ export const oneillReeseShaft1999: ShaftMethod = {
     noticeInstallation(at, oneillReeseShaft1999)
     const N_60 = at.parameter('sptN60', 'N_60', '1')
     const beta = at.sheet.step(looseBeta, { beta: at.sheet.step(oneillReeseBeta, { z: at.depth }), N_60 })
-    return at.sheet.step(limitedBoredShaft, { beta, sigma_v: at.effectiveStress })
+    return at.sheet.step(limitedBoredShaft, { beta, sigma_v: at.effectiveStress() })
   },
 }

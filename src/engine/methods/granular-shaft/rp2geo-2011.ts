@@ -19,7 +19,7 @@ export const rp2geoShaft2011: ShaftMethod = {
     const { read } = rp2geoClass(at)
     return at.sheet.step(limitedBetaShaft, {
       beta: read('beta', 'beta', 'shaft factor', '1'),
-      sigma_v: at.effectiveStress,
+      sigma_v: at.effectiveStress(),
       f_l: read('shaftLimit', 'f_l', 'limit of the unit shaft resistance', 'kPa'),
     })
   },

@@ -21,6 +21,6 @@ export const specifiedBeta: ShaftMethod = {
         method: 'specified-beta',
         layer: at.layer.name,
       })
-    return at.sheet.step(betaShaft, { beta, sigma_v: at.effectiveStress })
+    return at.sheet.step(betaShaft, { beta, sigma_v: at.effectiveStress() })
   },
 }
