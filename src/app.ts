@@ -23,6 +23,7 @@ import { assessments } from './http/v1/assessments.ts'
 import { calculators } from './http/v1/calculators.ts'
 import { caps } from './http/v1/caps.ts'
 import { projects } from './http/v1/projects.ts'
+import { recordPages } from './http/v1/record-pages.ts'
 import { storedAssessments } from './http/v1/stored-assessments.ts'
 import { WorkerPool } from './jobs/pool.ts'
 import { assessing } from './operations/assess-in-thread.ts'
@@ -81,6 +82,7 @@ export async function buildService(config: Config, store: Store): Promise<Servic
   projects(app, office)
   storedAssessments(app, office)
   caps(app, office)
+  recordPages(app, office)
   await pageScripts(app)
   await app.register(reference, { document: openapi(readExamples()) })
   app.post('/v1/replay', async (request) => replayTrace(request.body))

@@ -44,6 +44,7 @@ type Contract =
   | 'no-such-project'
   | 'no-such-assessment'
   | 'no-such-cap'
+  | 'no-assessment-yet'
   | 'bad-cursor'
   | 'bad-project-slug'
   | 'precondition-failed'
@@ -303,6 +304,13 @@ export const catalogue: Readonly<Record<ErrorCode, ErrorEntry>> = {
     'There is no assessment {id}, or the key has no right to its project.',
     'The id is misspelt, or the record belongs to another project.',
     'See GET /v1/projects/{slug}/assessments.',
+  ),
+  'no-assessment-yet': entry(
+    404,
+    'No assessment yet',
+    'The project "{slug}" has no assessment yet.',
+    'No schedule was posted to the project.',
+    'Post one to /v1/projects/{slug}/assessments.',
   ),
   'no-such-cap': entry(
     404,

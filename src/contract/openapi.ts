@@ -1,6 +1,7 @@
 import { z } from 'zod'
 import { engineVersion } from '../engine/index.ts'
 import { header, inPath, json, problem, query, scheduleForm, schemaRef } from './openapi-parts.ts'
+import { pagePaths } from './page-paths.ts'
 import { designBasis, groundProfile, layout, pileType } from './parts.ts'
 import { replayRequest, step } from './replay.ts'
 import * as replies from './replies.ts'
@@ -183,7 +184,7 @@ export function openapi(examples: Readonly<Record<string, unknown>>) {
       responses: { '200': json('MethodReply', 'The methods'), '404': problem('No method has this id') },
     },
   }
-  Object.assign(paths, storedPaths(examples))
+  Object.assign(paths, storedPaths(examples), pagePaths)
   const description =
     'Axial design of pile foundations. Units: m, kN, kPa, kN/m3, degrees; settlement in mm. Every quantity also takes a string with a unit. What one request may hold: GET /v1/limits.'
   return {

@@ -1,5 +1,6 @@
 import type { Cap } from '../engine/assessment/schedule.ts'
 import { sliceTrace } from '../engine/index.ts'
+import { overviewAt, pilesAt } from './addresses.ts'
 import { blockOutcomes, pileOutcomes } from './calculation-sheet.ts'
 import { checkWords } from './check-words.ts'
 import { courses, verdictWord } from './draw/courses.ts'
@@ -17,12 +18,12 @@ import { blockAngle, pilePoints, prefixOf, shaftStretches } from './trace-views.
 
 const NO_TRACE = { steps: [], results: {}, sources: [] }
 
-/** The calculation sheet of one cap of an assessment; undefined where no cap has this mark. */
+/** The calculation sheet of one cap of an assessment, whose result need hold no other cap; undefined where no cap has this mark. */
 export function capSheet(record: AssessmentRecord, mark: string): string | undefined {
   const { schedule, reply } = record
   const index = schedule.caps.findIndex((cap) => cap.mark === mark)
   const cap = schedule.caps[index]
-  const result = reply.result.caps[index]
+  const result = reply.result.caps.find((c) => c.mark === mark)
   if (!cap || !result) return undefined
   const ground = schedule.ground[cap.ground]!
   const pile = schedule.pileTypes[cap.pileType]!
@@ -34,6 +35,13 @@ export function capSheet(record: AssessmentRecord, mark: string): string | undef
   return sheetPage({
     issue: record,
     kind: 'Calculation sheet',
+    links:
+      record.id === undefined
+        ? []
+        : [
+            [overviewAt(record.id), 'All caps'],
+            [pilesAt(record.id), 'Schedule of piles'],
+          ],
     subject: `Cap ${mark}`,
     question: html`Do the piles of cap ${mark} carry every combination with the margin that the design basis asks, and does the cap settle within its limits?`,
     verdict: (

@@ -1,3 +1,4 @@
+import { csvText } from './csv-text.ts'
 import { pileRows } from './pile-rows.ts'
 import type { AssessmentRecord } from './record.ts'
 
@@ -8,9 +9,9 @@ const header =
 export function pileScheduleCsv(record: AssessmentRecord): string {
   const lines = pileRows(record).map((r) =>
     [
-      text(r.cap),
+      csvText(r.cap),
       r.pile,
-      text(r.type),
+      csvText(r.type),
       r.x,
       r.y,
       r.cutOff,
@@ -19,17 +20,8 @@ export function pileScheduleCsv(record: AssessmentRecord): string {
       r.check?.resistance ?? '',
       r.check?.utilisation ?? '',
       r.check?.check ?? '',
-      text(r.check?.combination ?? ''),
+      csvText(r.check?.combination ?? ''),
     ].join(','),
   )
   return [header, ...lines, ''].join('\r\n')
-}
-
-/**
- * A text as a cell. One that a spreadsheet would read as a formula gets an apostrophe in front, also after leading blanks, which
- * spreadsheets skip; numbers of our own are never texts.
- */
-function text(value: string): string {
-  const safe = /^\s*[=+\-@\t\r]/.test(value) ? `'${value}` : value
-  return /[",\r\n]/.test(safe) || safe !== value ? `"${safe.replaceAll('"', '""')}"` : safe
 }

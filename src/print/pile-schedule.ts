@@ -1,3 +1,4 @@
+import { overviewAt, pilesCsvAt } from './addresses.ts'
 import { checkWords } from './check-words.ts'
 import { short } from './figure.ts'
 import { html, joined } from './markup.ts'
@@ -7,8 +8,8 @@ import { shortQuantity } from './quantity.ts'
 import type { AssessmentRecord } from './record.ts'
 import { paperStrip, titleBlock } from './title-block.ts'
 
-/** The schedule of piles as a page. `csv` is where the same is as a file. */
-export function pileSchedule(record: AssessmentRecord, csv?: string): string {
+/** The schedule of piles as a page. */
+export function pileSchedule(record: AssessmentRecord): string {
   const rows = pileRows(record).map(
     (
       r,
@@ -28,7 +29,7 @@ export function pileSchedule(record: AssessmentRecord, csv?: string): string {
     wide: true,
     body: html`${titleBlock(record, subject, 'Schedule of piles')}
 <main><section id="piles"><h2>Piles</h2>
-<p class="rule">x and y are the place of the cap plus that of the pile in its layout. Cut-off and toe are depths below the surface of the cap's ground profile. Load, resistance and utilisation are those of the most loaded pile of the cap: all piles of a cap are built alike.${csv !== undefined && html` <a href="${csv}">The same as CSV</a>`}</p>
+<p class="rule">x and y are the place of the cap plus that of the pile in its layout. Cut-off and toe are depths below the surface of the cap's ground profile. Load, resistance and utilisation are those of the most loaded pile of the cap: all piles of a cap are built alike.</p>${record.id !== undefined && html`<nav class="contents" aria-label="Other pages of this record"><a class="leaves" href="${overviewAt(record.id)}">All caps</a><a class="leaves" href="${pilesCsvAt(record.id)}">The same as CSV</a></nav>`}
 <div class="wide" tabindex="0" role="region" aria-label="Piles"><table class="checks"><thead><tr>${head('cap')}${head('pile', '', true)}${head('type')}${head('x', 'm', true)}${head('y', 'm', true)}${head('cut-off', 'm', true)}${head('toe level', 'm', true)}${head('design load', '', true)}${head('resistance', '', true)}${head('utilisation', '', true)}${head('governs')}</tr></thead><tbody>
 ${joined(rows)}</tbody></table></div>
 <p class="caution">${record.reply.notices[0]?.text}</p></section></main>`,

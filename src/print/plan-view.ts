@@ -55,8 +55,7 @@ export function inputChanges(before: AssessmentRecord, after: AssessmentRecord):
 }
 
 function questions({ schedule }: AssessmentRecord): Map<string, Record<string, string>> {
-  const rows = new Map<string, unknown[]>()
-  for (const row of schedule.loads.rows) rows.set(row.cap, [...(rows.get(row.cap) ?? []), row])
+  const rows = Map.groupBy(schedule.loads.rows, (row) => row.cap)
   const basis = JSON.stringify([schedule.designBasis, schedule.methods, schedule.limits])
   return new Map(
     schedule.caps.map((cap) => [

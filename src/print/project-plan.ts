@@ -1,3 +1,4 @@
+import { asked, pilesAt, sheetAt } from './addresses.ts'
 import { type CheckKind, checkWords } from './check-words.ts'
 import { courses, verdictWord } from './draw/courses.ts'
 import { planMap } from './draw/plan-map.ts'
@@ -6,17 +7,17 @@ import { html, joined, type Markup } from './markup.ts'
 import { page } from './page.ts'
 import { byUtilisation, inputChanges, type PlanCap, planCaps } from './plan-view.ts'
 import { shortQuantity } from './quantity.ts'
-import type { AssessmentRecord } from './record.ts'
+import type { AssessmentRecord, AssessmentResult } from './record.ts'
 import { paperStrip, titleBlock } from './title-block.ts'
 
 export type PlanOptions = {
   /** The revision that this one is laid beside. */
-  readonly previous?: AssessmentRecord
-  readonly check?: CheckKind
-  /** Where the sheet of a cap is; left out, marks are no links. */
-  readonly sheet?: (mark: string) => string
-  /** Where the plan is with another choice of check. Left out: the page cannot be asked again, and has no filter. */
-  readonly plan?: (check: CheckKind | undefined) => string
+  readonly previous?: AssessmentRecord | undefined
+  readonly check?: CheckKind | undefined
+  /** The path that the page was asked at. Left out: it cannot be asked again, and has no filter. */
+  readonly at?: string
+  /** Id of the revision before, to be offered beside this one. */
+  readonly before?: string | undefined
 }
 
 /** All caps of an assessment in plan, and a table of them by utilisation; beside an earlier revision with what changed. */
@@ -30,17 +31,17 @@ export function projectPlan(record: AssessmentRecord, options: PlanOptions = {})
   const name = (r: AssessmentRecord) => (r.revision === undefined ? 'This assessment' : `Revision ${r.revision}`)
   const map = (r: AssessmentRecord, all: readonly PlanCap[], id: string) =>
     html`<div class="sheetlet"><h3>${name(r)}</h3><div class="wide" tabindex="0" role="region" aria-label="Plan, ${name(r)}">${planMap(id, r, all, `Caps in plan, ${what}, ${name(r)}`, previous !== undefined)}</div></div>`
-  const body = html`${titleBlock(record, record.schedule.title, 'Plan of the caps')}
+  const body = html`${titleBlock(record, record.schedule.title, 'Plan of the caps')}${others(record, options)}
 <main>
 <section id="verdict"><h2>Question and verdict</h2><p class="question">Which caps exceed, what governs them, and which neighbours settle apart too far?</p>
-<p class="answer ${summary.exceeded > 0 ? 'fails' : 'stands'}"><strong>${summary.exceeded > 0 ? html`${summary.exceeded} of ${summary.caps}` : html`All ${summary.caps}`}</strong> <span>${summary.exceeded > 0 ? 'caps exceed a check' : 'caps hold every check'}${summary.worst && html`; largest utilisation ${short(summary.worst.utilisation)}: ${summary.worst.cap}, ${checkWords[summary.worst.check as CheckKind].name} in ${summary.worst.combination}`}</span></p>
+<p class="answer ${summary.exceeded > 0 || strained.length > 0 ? 'fails' : 'stands'}"><strong>${summary.exceeded > 0 ? html`${summary.exceeded} of ${summary.caps}` : html`All ${summary.caps}`}</strong> <span>${summary.exceeded > 0 ? 'caps exceed a check' : 'caps hold every check'}${summary.worst && html`; largest utilisation ${short(summary.worst.utilisation)}: ${worstWords(summary.worst)} in ${summary.worst.combination}`}</span></p>
 <p>${strained.length > 0 ? html`<strong class="exceeds">Neighbours that distort too much:</strong> ${joined(strained.map((n, i) => html`${i > 0 && ', '}${n.a}–${n.b} (utilisation ${short(n.utilisation!)})`))}.` : 'No two neighbours distort too much.'}</p>
 <p class="caution">${record.reply.notices[0]?.text}</p></section>
-<section id="plan"><h2>Plan, ${what}</h2>${options.plan && filters(options.plan, check)}
+<section id="plan"><h2>Plan, ${what}</h2>${filters(options)}
 <p class="legend">Outlines of the piles to scale. Stack of four courses: utilisation, a quarter each; a fifth course, crossed: exceeded. Dashed lines: equal settlement, straight between caps. Double line: neighbours that distort too much, with their utilisation.</p>
 <div class="plans">${previous && before && map(previous, before, 'before')}${map(record, caps, 'now')}</div></section>
 ${previous && before && changes(previous, before, record, caps)}
-<section id="caps"><h2>Caps by ${what}</h2>${table(record, caps, before, options)}</section>
+<section id="caps"><h2>Caps by ${what}</h2>${table(record, caps, before)}</section>
 </main>`
   return page({
     title: `${record.schedule.title}, plan`,
@@ -51,18 +52,31 @@ ${previous && before && changes(previous, before, record, caps)}
   })
 }
 
-function filters(plan: NonNullable<PlanOptions['plan']>, check: CheckKind | undefined): Markup {
+function worstWords({ cap, neighbour, check }: NonNullable<AssessmentResult['summary']['worst']>): Markup {
+  return check === 'angular-distortion'
+    ? html`${cap}–${neighbour}, angular distortion`
+    : html`${cap}, ${checkWords[check].name}`
+}
+
+function filters({ at, check, previous }: PlanOptions): Markup {
+  if (at === undefined) return html``
   const link = (to: CheckKind | undefined, words: string) =>
-    html`<a href="${plan(to)}"${to === check && html` aria-current="page"`}>${words}</a>`
+    html`<a href="${asked(at, { check: to, since: previous?.id })}"${to === check && html` aria-current="page"`}>${words}</a>`
   return html`<nav class="filters" aria-label="Show one check">${link(undefined, 'the largest of all')}${Object.entries(checkWords).map(([kind, { name }]) => link(kind as CheckKind, name))}</nav>`
 }
 
-function table(
-  record: AssessmentRecord,
-  caps: readonly PlanCap[],
-  before: readonly PlanCap[] | undefined,
-  { sheet }: PlanOptions,
-): Markup {
+/** Other pages of the record, and this one beside the revision before or alone. */
+function others({ id }: AssessmentRecord, { at, check, previous, before }: PlanOptions): Markup {
+  if (id === undefined || at === undefined) return html``
+  const link = (href: string, words: string) => html`<a class="leaves" href="${href}">${words}</a>`
+  return html`<nav class="contents" aria-label="Other pages of this record">${link(pilesAt(id), 'Schedule of piles')}${
+    previous
+      ? link(asked(at, { check }), 'This revision alone')
+      : before !== undefined && link(asked(at, { check, since: before }), 'Beside the revision before')
+  }</nav>`
+}
+
+function table(record: AssessmentRecord, caps: readonly PlanCap[], before: readonly PlanCap[] | undefined): Markup {
   const old = new Map(before?.map((c) => [c.mark, c]))
   const rows = byUtilisation(caps).map((cap) => {
     const { shown } = cap
@@ -71,7 +85,7 @@ function table(
       before &&
       html`<td class="num">${was ? short(was.utilisation) : '–'}</td><td>${was ? checkWords[was.check].name : 'new'}</td>`
     const given = record.schedule.caps[cap.index]!
-    return html`<tr id="cap-${cap.index}" data-cap="${cap.index}" class="${shown?.satisfied === false && 'exceeds'}"><th scope="row">${sheet ? html`<a href="${sheet(cap.mark)}">${cap.mark}</a>` : cap.mark}</th><td>${given.pileType}</td><td>${given.ground}</td>${
+    return html`<tr id="cap-${cap.index}" data-cap="${cap.index}" class="${shown?.satisfied === false && 'exceeds'}"><th scope="row">${record.id === undefined ? cap.mark : html`<a href="${sheetAt(record.id, cap.mark)}">${cap.mark}</a>`}</th><td>${given.pileType}</td><td>${given.ground}</td>${
       shown
         ? html`<td class="num">${short(shown.utilisation)}</td><td class="sign">${courses(shown.utilisation)}</td><td>${checkWords[shown.check].name}</td><td>${shown.combination}</td><td class="num">${shortQuantity(shown.demand, checkWords[shown.check].unit)}</td><td class="num">${shortQuantity(shown.resistance, checkWords[shown.check].unit)}</td><td>${verdictWord(shown.satisfied)}</td>`
         : html`<td class="num">–</td><td></td><td>not asked</td><td></td><td></td><td></td><td></td>`

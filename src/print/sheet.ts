@@ -12,6 +12,8 @@ export type SheetParts = {
   readonly issue: Issue
   readonly kind: string
   readonly subject: string
+  /** Other pages of the same record, with their names. */
+  readonly links?: readonly (readonly [href: string, words: string])[]
   readonly question: Markup
   readonly verdict: (lines: Lines) => Markup
   /** Plain words about what is given that is no number: names of ground and pile, methods. */
@@ -31,7 +33,7 @@ export function sheetPage(sheet: SheetParts): string {
   const lines = linesOf(sheet.trace)
   const [caution, ...notices] = sheet.notices
   const body = html`${titleBlock(sheet.issue, sheet.subject, sheet.kind)}
-<nav class="contents" aria-label="Parts of this sheet"><a href="#verdict">Verdict</a><a href="#given">Given</a><a href="#drawings">Drawings</a><a href="#lines">Calculation</a><a href="#sources">Sources</a></nav>
+<nav class="contents" aria-label="Parts of this sheet"><a href="#verdict">Verdict</a><a href="#given">Given</a><a href="#drawings">Drawings</a><a href="#lines">Calculation</a><a href="#sources">Sources</a>${sheet.links?.map(([href, words]) => html`<a class="leaves" href="${href}">${words}</a>`)}</nav>
 <main>
 <section id="verdict" class="verdict"><h2>Question and verdict</h2><p class="question">${sheet.question}</p>${sheet.verdict(lines)}
 ${notices.length > 0 && html`<h3>To be noticed</h3><ul class="notices">${joined(notices.map(noticeItem))}</ul>`}

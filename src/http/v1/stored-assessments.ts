@@ -6,6 +6,7 @@ import { ownRecord } from '../../operations/rights.ts'
 import { listSignatures, signAssessment } from '../../operations/sign-assessment.ts'
 import { verifyProject } from '../../operations/verify-project.ts'
 import { sendTagged } from '../conditional.ts'
+import { gone } from '../gone.ts'
 import { type Parameter, readQuery, whole } from '../query.ts'
 import { recordLinks } from './record-links.ts'
 
@@ -14,11 +15,6 @@ type Id = { Params: { id: string } }
 const hash: Parameter<string> = {
   expected: 'a record hash, sha256:…',
   read: (text) => (/^sha256:[0-9a-f]{64}$/.test(text) ? text : undefined),
-}
-const leaves = (raw: { on: (event: 'close', told: () => void) => unknown }): AbortSignal => {
-  const gone = new AbortController()
-  raw.on('close', () => gone.abort())
-  return gone.signal
 }
 
 /** One record: itself, its content, its signatures; the chain of a project; a record computed again. */
@@ -48,11 +44,11 @@ export function storedAssessments(app: FastifyInstance, office: Office): void {
   app.post<Id>('/v1/assessments/:id/reverify', async (request, reply) => {
     const { project } = await ownRecord(office, request.actor!, request.params.id)
     request.project = project
-    return reverifyRecord(office, request.params.id, leaves(reply.raw))
+    return reverifyRecord(office, request.params.id, gone(reply))
   })
   app.get<{ Params: { slug: string } }>('/v1/projects/:slug/integrity', async (request, reply) => {
     const given = readQuery(request, { revision: whole(1, 999_999_999), hash })
     const checkpoint = given.revision && given.hash ? { revision: given.revision, hash: given.hash } : undefined
-    return verifyProject(office, request.actor!, request.params.slug, checkpoint, leaves(reply.raw))
+    return verifyProject(office, request.actor!, request.params.slug, checkpoint, gone(reply))
   })
 }
