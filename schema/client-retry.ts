@@ -4,12 +4,13 @@ export type Patience = {
   readonly fetch: typeof fetch
 }
 
-const wait = (seconds: number) => new Promise((resolve) => setTimeout(resolve, seconds * 1000))
+export const waitSeconds = (seconds: number) => new Promise((resolve) => setTimeout(resolve, seconds * 1000))
 
 /**
  * fetch that tries again: where the service is busy (503), the first request with the same Idempotency-Key still runs (409), or
  * nobody answered. Every request of the client may be sent twice: the calculators are pure, stored assessments carry an
- * Idempotency-Key, PUT sets a value, and a signature stands only once.
+ * Idempotency-Key, PUT sets a value, what is cancelled stays so, and a signature stands
+ * only once.
  */
 export function patient({ retries, fetch }: Patience): (request: Request) => Promise<Response> {
   return async (request) => {
@@ -23,7 +24,7 @@ export function patient({ retries, fetch }: Patience): (request: Request) => Pro
       if (reply && (left <= 0 || !again(request, reply.status))) return reply
       // Seconds; a date would be read as none.
       const seconds = Number(reply?.headers.get('retry-after') ?? 1)
-      await wait(Number.isFinite(seconds) ? seconds : 1)
+      await waitSeconds(Number.isFinite(seconds) ? seconds : 1)
     }
   }
 }

@@ -1,5 +1,5 @@
 import createClient from 'openapi-fetch'
-import { type Patience, patient } from './client-retry.ts'
+import { type Patience, patient, waitSeconds } from './client-retry.ts'
 import type { components, paths } from './openapi.d.ts'
 
 export type Schemas = components['schemas']
@@ -32,6 +32,23 @@ function formOf(schedule: object, loads: string | Blob): FormData {
   return form
 }
 
+/** Longest time between two looks, s: the first ones come sooner. */
+const SELDOM = 2
+
+async function waitFor(
+  look: (id: string) => Promise<Schemas['AssessmentOrJob']>,
+  id: string,
+  told: (progress: Schemas['Job']['progress']) => void = () => undefined,
+): Promise<Schemas['Assessment']> {
+  for (let pause = 0.1; ; pause = Math.min(SELDOM, 1.5 * pause)) {
+    const found = await look(id)
+    if (found.state === 'completed') return found
+    if (found.problem) throw new KentledgeProblem(found.problem)
+    told(found.progress)
+    await waitSeconds(pause)
+  }
+}
+
 /** The way an exporter written in TypeScript calls the service: typed requests and answers, problems as errors. */
 export function kentledge({ baseUrl, key, retries = 3, fetch: base = globalThis.fetch }: ClientOptions) {
   const http = patient({ retries, fetch: base })
@@ -49,6 +66,8 @@ export function kentledge({ baseUrl, key, retries = 3, fetch: base = globalThis.
     return taken<Name>(reply.ok ? { data: read } : { error: read })
   }
   const onceKey = ({ idempotencyKey = crypto.randomUUID() }: RecordOptions) => ({ 'Idempotency-Key': idempotencyKey })
+  const assessment = async (id: string) =>
+    taken<'AssessmentOrJob'>(await client.GET('/v1/assessments/{id}', { params: { path: { id } } }))
   return {
     singlePile: async (body: Schemas['SinglePileRequest'], query: Trace = {}) =>
       taken<'SinglePileAnswer'>(await client.POST('/v1/single-pile', { body, params: { query } })),
@@ -90,8 +109,19 @@ export function kentledge({ baseUrl, key, retries = 3, fetch: base = globalThis.
       taken<'AssessmentList'>(
         await client.GET('/v1/projects/{slug}/assessments', { params: { path: { slug }, query: { cursor } } }),
       ),
-    assessment: async (id: string) =>
-      taken<'Assessment'>(await client.GET('/v1/assessments/{id}', { params: { path: { id } } })),
+    /** As `record`, but answers as soon as the schedule stands in line. */
+    queue: async (slug: string, body: Schemas['Schedule'], options: RecordOptions = {}) =>
+      taken<'Job'>(
+        await client.POST('/v1/projects/{slug}/assessments', {
+          body,
+          params: { path: { slug }, header: { ...onceKey(options), Prefer: 'respond-async' } },
+        }),
+      ),
+    assessment,
+    /** Waits until an assessment is completed, and tells how far it is. Throws the problem of one that fails or is cancelled. */
+    waitFor: (id: string, told?: (progress: Schemas['Job']['progress']) => void) => waitFor(assessment, id, told),
+    cancel: async (id: string) =>
+      taken<'Job'>(await client.DELETE('/v1/assessments/{id}', { params: { path: { id } } })),
     content: async (id: string) =>
       taken<'Content'>(await client.GET('/v1/assessments/{id}/content', { params: { path: { id } } })),
     /** Every cap of a record that the filters let through, page after page. */

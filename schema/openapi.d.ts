@@ -247,8 +247,26 @@ export interface paths {
             readonly path?: never;
             readonly cookie?: never;
         };
-        /** One record: state, summary, hashes */
+        /** One record: state, summary, hashes; how far it is, as long as it is none */
         readonly get: operations["getAssessment"];
+        readonly put?: never;
+        readonly post?: never;
+        /** Cancel an assessment that waits or runs; a record is never deleted */
+        readonly delete: operations["cancelAssessment"];
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/assessments/{id}/events": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** Progress as server-sent events, until the assessment ends */
+        readonly get: operations["watchAssessment"];
         readonly put?: never;
         readonly post?: never;
         readonly delete?: never;
@@ -1627,6 +1645,10 @@ export interface components {
             readonly assessmentSeconds: number;
             /** @description assessments that wait for a thread; beyond that 503 with Retry-After */
             readonly assessmentsWaiting: number;
+            /** @description assessments by `Prefer: respond-async` that wait or run; beyond that 503 with Retry-After */
+            readonly jobs: number;
+            /** @description seconds that `Prefer: wait` is heeded */
+            readonly waitSeconds: number;
             readonly graphql: {
                 /** @description fields above one another in a document */
                 readonly depth: number;
@@ -1710,6 +1732,42 @@ export interface components {
                     readonly exceeded: number;
                 }[];
             };
+        };
+        /** @description An assessment that is no record yet, or never will be; this is kept for 30 days */
+        readonly Job: {
+            /** @description of the record to come */
+            readonly id: string;
+            readonly project: string;
+            /** @enum {string} */
+            readonly state: "queued" | "running" | "failed" | "cancelled";
+            /** @description ISO 8601, UTC */
+            readonly createdAt: string;
+            /** @description when it was begun last */
+            readonly startedAt: string | null;
+            readonly finishedAt: string | null;
+            readonly actor: string;
+            readonly actorKey: string | null;
+            /** @description how often it was begun */
+            readonly attempts: number;
+            readonly progress: {
+                /** @description caps whose piles are computed */
+                readonly done: number;
+                /** @description of so many; null until the schedule has been read */
+                readonly caps: number | null;
+            };
+            /** @description why there is no record: of failed and cancelled ones */
+            readonly problem?: components["schemas"]["Problem"];
+        };
+        readonly AssessmentOrJob: components["schemas"]["Assessment"] | components["schemas"]["Job"];
+        /** @description The data of an event */
+        readonly JobProgress: {
+            readonly id: string;
+            /** @enum {string} */
+            readonly state: "queued" | "running" | "failed" | "cancelled" | "completed";
+            /** @description caps whose piles are computed */
+            readonly done: number;
+            /** @description of so many; null until the schedule has been read */
+            readonly caps: number | null;
         };
         readonly AssessmentList: {
             readonly items: readonly components["schemas"]["Assessment"][];
@@ -3731,6 +3789,8 @@ export interface operations {
             readonly header?: {
                 /** @description 1 to 255 printable characters: a retry within 24 hours gets the same answer */
                 readonly "Idempotency-Key"?: string;
+                /** @description `respond-async`: answer as soon as the schedule stands in line; `respond-async, wait=10`: or with the record, where it comes within so many seconds, at most 60 (RFC 7240) */
+                readonly Prefer?: string;
             };
             readonly path: {
                 /** @description The project */
@@ -4170,6 +4230,25 @@ export interface operations {
                     readonly "application/json": components["schemas"]["Assessment"];
                 };
             };
+            /** @description With `respond-async`: the schedule stands in line, on the disk */
+            readonly 202: {
+                headers: {
+                    /** @description Where the record will be; till then its state */
+                    readonly Location?: string;
+                    /** @description rel="monitor": its progress as server-sent events */
+                    readonly Link?: string;
+                    /** @description Seconds to the next look */
+                    readonly "Retry-After"?: string;
+                    /** @description What of Prefer was heeded */
+                    readonly "Preference-Applied"?: string;
+                    /** @description true where this is the answer of an earlier request */
+                    readonly "Idempotency-Replayed"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Job"];
+                };
+            };
             /** @description The body cannot be read */
             readonly 400: {
                 headers: {
@@ -4377,17 +4456,19 @@ export interface operations {
         };
         readonly requestBody?: never;
         readonly responses: {
-            /** @description The record */
+            /** @description The record, or the job that is to become one */
             readonly 200: {
                 headers: {
                     /** @description Strong: the same bytes have the same tag */
                     readonly ETag?: string;
                     /** @description rel="predecessor-version" and rel="successor-version" (RFC 5829), rel="collection" */
                     readonly Link?: string;
+                    /** @description Seconds to the next look, while it waits or runs */
+                    readonly "Retry-After"?: string;
                     readonly [name: string]: unknown;
                 };
                 content: {
-                    readonly "application/json": components["schemas"]["Assessment"];
+                    readonly "application/json": components["schemas"]["AssessmentOrJob"];
                 };
             };
             /** @description The client holds it already */
@@ -4396,6 +4477,176 @@ export interface operations {
                     readonly [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description No valid key */
+            readonly 401: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The key lacks a scope */
+            readonly 403: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description No such assessment, or none that the key has a right to */
+            readonly 404: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The route answers in no accepted type */
+            readonly 406: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description A parameter or the request is invalid */
+            readonly 422: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The service or its store is busy or stopping; try again */
+            readonly 503: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly cancelAssessment: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /** @description The assessment */
+                readonly id: string;
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description It is cancelled, now or before */
+            readonly 200: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Job"];
+                };
+            };
+            /** @description No valid key */
+            readonly 401: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The key lacks a scope */
+            readonly 403: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description No such assessment, or none that the key has a right to */
+            readonly 404: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The route answers in no accepted type */
+            readonly 406: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description It is completed, or has failed */
+            readonly 409: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description A parameter or the request is invalid */
+            readonly 422: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The service or its store is busy or stopping; try again */
+            readonly 503: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly watchAssessment: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /** @description The assessment */
+                readonly id: string;
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Events `progress`, then one named for the state at the end: `completed`, `failed` or `cancelled`. The data of each is a JobProgress */
+            readonly 200: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    /**
+                     * @example event: progress
+                     *     data: {"id":"0199…","state":"running","done":12,"caps":50}
+                     *
+                     *     event: completed
+                     *     data: {"id":"0199…","state":"completed","done":50,"caps":50}
+                     */
+                    readonly "text/event-stream": string;
+                };
             };
             /** @description No valid key */
             readonly 401: {
@@ -4522,6 +4773,15 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
+            /** @description The assessment is not completed */
+            readonly 409: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
             /** @description A parameter or the request is invalid */
             readonly 422: {
                 headers: {
@@ -4625,6 +4885,15 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
+            /** @description The assessment is not completed */
+            readonly 409: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
             /** @description A parameter or the request is invalid */
             readonly 422: {
                 headers: {
@@ -4719,6 +4988,15 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
+            /** @description The assessment is not completed */
+            readonly 409: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
             /** @description A parameter or the request is invalid */
             readonly 422: {
                 headers: {
@@ -4789,6 +5067,15 @@ export interface operations {
             };
             /** @description The route answers in no accepted type */
             readonly 406: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The assessment is not completed */
+            readonly 409: {
                 headers: {
                     readonly [name: string]: unknown;
                 };
@@ -5087,6 +5374,15 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
+            /** @description The assessment is not completed */
+            readonly 409: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
             /** @description A parameter is invalid */
             readonly 422: {
                 headers: {
@@ -5178,6 +5474,15 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
+            /** @description The assessment is not completed */
+            readonly 409: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
             /** @description A parameter is invalid */
             readonly 422: {
                 headers: {
@@ -5259,6 +5564,15 @@ export interface operations {
             };
             /** @description The route answers in no accepted type */
             readonly 406: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The assessment is not completed */
+            readonly 409: {
                 headers: {
                     readonly [name: string]: unknown;
                 };
@@ -5364,6 +5678,15 @@ export interface operations {
                     readonly "application/problem+json": components["schemas"]["Problem"];
                 };
             };
+            /** @description The assessment is not completed */
+            readonly 409: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
             /** @description A parameter is invalid */
             readonly 422: {
                 headers: {
@@ -5454,6 +5777,15 @@ export interface operations {
             };
             /** @description The route answers in no accepted type */
             readonly 406: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The assessment is not completed */
+            readonly 409: {
                 headers: {
                     readonly [name: string]: unknown;
                 };

@@ -2,7 +2,7 @@ import { maxHeaderSize } from 'node:http'
 import fastify, { type FastifyInstance, LogController } from 'fastify'
 import type { Config } from './config.ts'
 import { readExamples } from './contract/examples.ts'
-import { limits } from './contract/limits.ts'
+import { LONGEST_WAIT, limits } from './contract/limits.ts'
 import { openapi } from './contract/openapi.ts'
 import { readJson } from './contract/read-json.ts'
 import { engineVersion } from './engine/index.ts'
@@ -22,19 +22,30 @@ import { reference } from './http/reference.ts'
 import { assessments } from './http/v1/assessments.ts'
 import { calculators } from './http/v1/calculators.ts'
 import { caps } from './http/v1/caps.ts'
+import { jobs } from './http/v1/jobs.ts'
 import { projects } from './http/v1/projects.ts'
 import { recordPages } from './http/v1/record-pages.ts'
 import { storedAssessments } from './http/v1/stored-assessments.ts'
+import { embeddedQueue } from './jobs/embedded-queue.ts'
 import { WorkerPool } from './jobs/pool.ts'
+import { sharedQueue } from './jobs/shared-queue.ts'
 import { assessing } from './operations/assess-in-thread.ts'
 import { authenticate } from './operations/authenticate.ts'
 import { getMethod, listMethods, listSources } from './operations/list-methods.ts'
+import type { Office } from './operations/office.ts'
 import { replayTrace } from './operations/replay-trace.ts'
+import { runJob } from './operations/run-job.ts'
 import { releaseAll } from './store/idempotency.ts'
+import { countJobs, nextJob, requeueAll } from './store/jobs.ts'
 import { openStore, type Store } from './store/open-store.ts'
 import { probe } from './store/probe.ts'
 
-export type Service = { readonly app: FastifyInstance; readonly stop: Drain }
+export type Service = {
+  readonly app: FastifyInstance
+  readonly stop: Drain
+  /** Begins no more jobs; those that run after `ms` are ended and wait for the next start. */
+  readonly stopJobs: (ms: number) => Promise<void>
+}
 
 /** Composes the service, in reading order. */
 export async function buildService(config: Config, store: Store): Promise<Service> {
@@ -63,24 +74,40 @@ export async function buildService(config: Config, store: Store): Promise<Servic
     queue: config.WORK_QUEUE,
     seconds: config.WORK_TIMEOUT,
   })
-  const office = { store, pool }
-  if (store.capabilities.alone) await releaseAll(store)
+  if (store.capabilities.alone) await Promise.all([releaseAll(store), requeueAll(store)])
+  // One thread stays for those who wait for their answer.
+  const atOnce = Math.max(1, config.WORKERS - 1)
+  const report = (err: unknown) => app.log.error({ err }, 'the queue of jobs')
+  const queue = store.url
+    ? sharedQueue(store.url, atOnce, report)
+    : embeddedQueue((but) => nextJob(store, but), atOnce, report)
+  const stopping = new AbortController()
+  const stopJobs = async (ms: number) => {
+    stopping.abort()
+    await queue.stop(ms)
+  }
   app.addHook('onClose', async () => {
+    await stopJobs(0)
     await pool.close()
     await store.close()
   })
   const stop = drain(app)
   accessLog(app)
-  guard(app, authenticate(office, config.AUTH))
+  guard(app, authenticate({ store }, config.AUTH))
   negotiate(app)
   problems(app, config.BODY_LIMIT)
-  metrics(app, engineVersion, pool, () => store.capabilities.size(store.reader))
+  const ended = metrics(app, engineVersion, pool, {
+    size: () => store.capabilities.size(store.reader),
+    jobs: () => countJobs(store),
+  })
+  const office: Office = { store, pool, line: { queue, most: config.JOB_QUEUE, stopping: stopping.signal, ended } }
   probes(app, () => probe(store))
   calculators(app)
   const bodyLimit = config.BODY_LIMIT
   await app.register(assessments, { assess: (task, gone) => pool.run(assessing, task, gone), bodyLimit, office })
   projects(app, office)
   storedAssessments(app, office)
+  jobs(app, office)
   caps(app, office)
   recordPages(app, office)
   await pageScripts(app)
@@ -96,10 +123,13 @@ export async function buildService(config: Config, store: Store): Promise<Servic
     requestSeconds: config.REQUEST_TIMEOUT,
     assessmentSeconds: config.WORK_TIMEOUT,
     assessmentsWaiting: config.WORK_QUEUE,
+    jobs: config.JOB_QUEUE,
+    waitSeconds: LONGEST_WAIT,
     graphql: documentLimits,
   }))
   await graphqlPlugin(app, { production: config.NODE_ENV === 'production', actorOf: (request) => request.actor! })
-  return { app, stop }
+  await queue.start(runJob(office, app.log))
+  return { app, stop, stopJobs }
 }
 
 /** The service as one Fastify instance, for those who do not stop it by signal. Without a store of theirs it keeps its records in memory. */

@@ -19,6 +19,7 @@ const schema = z.object({
   WORKERS: whole(availableParallelism(), 1, 256),
   WORK_QUEUE: whole(32, 0, 10_000),
   WORK_TIMEOUT: whole(120, 1, 3600),
+  JOB_QUEUE: whole(1000, 0, 1_000_000),
   NODE_ENV: z.string().default('development'),
   SHUTDOWN_TIMEOUT: whole(10, 1, 3600),
 })

@@ -54,6 +54,10 @@ type Contract =
   | 'bad-idempotency-key'
   | 'signature-step'
   | 'signature-same-person'
+  | 'assessment-not-completed'
+  | 'assessment-ended'
+  | 'assessment-cancelled'
+  | 'job-abandoned'
   | 'engine-refuses-record'
 export type ErrorCode = FaultCode | Contract
 
@@ -382,6 +386,34 @@ export const catalogue: Readonly<Record<ErrorCode, ErrorEntry>> = {
     'Originator, checker and approver are three different people.',
     'Let somebody else sign.',
   ),
+  'assessment-not-completed': entry(
+    409,
+    'Assessment not completed',
+    'Assessment {id} is {state}.',
+    'What was asked for exists once the assessment is completed.',
+    'Read GET /v1/assessments/{id}: it tells the state, and the reason where the assessment failed.',
+  ),
+  'assessment-ended': entry(
+    409,
+    'The assessment has ended',
+    'Assessment {id} is {state}; only one that waits or runs can be cancelled.',
+    'The assessment ended before the request; a completed one is never deleted.',
+    'Nothing is to be done.',
+  ),
+  'assessment-cancelled': entry(
+    409,
+    'The assessment was cancelled',
+    'The assessment was cancelled before it was completed.',
+    'Somebody with a right to the project cancelled it.',
+    'Post the schedule again.',
+  ),
+  'job-abandoned': entry(
+    500,
+    'The assessment was given up',
+    'The assessment was begun {attempts} times and never came to its end. {reason}',
+    'Each time the worker or the service itself was lost, or the time ran out.',
+    'Split the schedule, or tell the operator the trace id.',
+  ),
   'engine-refuses-record': entry(
     409,
     'The engine refuses the stored request',
@@ -585,7 +617,10 @@ const shown = (fact: unknown): string =>
 /** The sentence of a fault: the template with its facts. */
 export const detailOf = (code: ErrorCode, facts: Readonly<Record<string, unknown>>): string =>
   catalogue[code].template
-    .replaceAll(/\{(\w+)\}/g, (_, name: string) => shown(facts[name]))
+    .replaceAll(/( ?)\{(\w+)\}/g, (_, gap: string, name: string) =>
+      // A ratio has no unit to show.
+      name === 'unit' && facts[name] === '1' ? '' : gap + shown(facts[name]),
+    )
     .replaceAll(/ +([;.])/g, '$1')
 
 /** A problem that is told to the caller (RFC 9457). */

@@ -40,7 +40,7 @@ async function hostOf({ HOST, AUTH }: Config, store: Store): Promise<string> {
 
 const config = settings()
 const store = await openedStore(config)
-const { app, stop } = await buildService(config, store)
+const { app, stop, stopJobs } = await buildService(config, store)
 await app.listen({ host: await hostOf(config, store), port: config.PORT })
 
 let stopping = false
@@ -49,9 +49,10 @@ for (const signal of ['SIGTERM', 'SIGINT'] as const) {
     // A second signal does not wait for requests that are under way.
     if (stopping) process.exit(1)
     stopping = true
-    setTimeout(() => process.exit(1), config.SHUTDOWN_TIMEOUT * 1000).unref()
-    void stop
-      .begin()
+    const budget = config.SHUTDOWN_TIMEOUT * 1000
+    setTimeout(() => process.exit(1), budget).unref()
+    // Jobs that take longer go back into line, which takes a moment too.
+    void Promise.all([stop.begin(), stopJobs(0.8 * budget)])
       .then(() => app.close())
       .then(() => process.exit(0))
   })

@@ -80,7 +80,7 @@ async function isThere(program: string): Promise<boolean> {
 const [curl, python] = await Promise.all([isThere('curl'), isThere('python3')])
 
 test('every block is of a language that is run here, and names the address that is replaced', () => {
-  expect(blocks.map((block) => block.language)).toEqual(['sh', 'sh', 'ts', 'python', 'sh', 'sh', 'python'])
+  expect(blocks.map((block) => block.language)).toEqual(['sh', 'sh', 'ts', 'python', 'sh', 'sh', 'sh', 'python'])
   for (const block of blocks) expect(block.text, block.title).toContain(inReadme)
 })
 
@@ -114,13 +114,16 @@ test.for(of('ts').map((block) => [block.title, block] as const))('ts, %s: its ty
 })
 
 test.runIf(curl)('sh: a project is made, and a schedule kept in it once, however often it is sent', async () => {
-  const [make, post] = of('sh')
+  const [make, post, queue] = of('sh')
     .filter(stored)
     .map((block) => here(block.text))
   expect(json(await output('sh', ['-euc', make!]))).toMatchObject({ slug: 'quay', revision: 0 })
   const record = json(await output('sh', ['-euc', post!]))
   expect(record).toMatchObject({ project: 'quay', revision: 1, summary: schedule.summary })
   expect(json(await output('sh', ['-euc', post!]))).toEqual(record)
+  const followed = await output('sh', ['-euc', queue!])
+  expect(followed).toMatch(/^event: (progress|completed)\ndata: /)
+  expect(json(followed.trim().split('\n').at(-1)!)).toMatchObject({ state: 'completed', revision: 2 })
 })
 
 test.runIf(python)('python: the hashes of a project are recomputed, and a changed one is seen', async () => {

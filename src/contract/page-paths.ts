@@ -13,6 +13,7 @@ const refusals = {
   '403': problem('The key lacks a scope'),
   '404': problem('No such record, cap or project, or none that the key has a right to'),
   '406': problem('The route answers in no accepted type'),
+  '409': problem('The assessment is not completed'),
   '422': problem('A parameter is invalid'),
   '503': problem('The service or its store is busy or stopping; try again'),
   '504': problem('The work took longer than the service allows'),

@@ -252,6 +252,8 @@ export const limitList = z.strictObject({
   requestSeconds: most('seconds until a request must have arrived whole; then 408'),
   assessmentSeconds: most('seconds of an assessment, waiting included; then 504'),
   assessmentsWaiting: most('assessments that wait for a thread; beyond that 503 with Retry-After'),
+  jobs: most('assessments by `Prefer: respond-async` that wait or run; beyond that 503 with Retry-After'),
+  waitSeconds: most('seconds that `Prefer: wait` is heeded'),
   graphql: z.strictObject({
     depth: most('fields above one another in a document'),
     aliases: most('aliases in a document'),

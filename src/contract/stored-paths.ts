@@ -22,7 +22,8 @@ const refusals = {
   '503': problem('The service or its store is busy or stopping; try again'),
 }
 const noProject = { '404': problem('No such project, or none that the key has a right to') }
-const noRecord = { '404': problem('No such assessment, or none that the key has a right to') }
+const noAssessment = { '404': problem('No such assessment, or none that the key has a right to') }
+const noRecord = { ...noAssessment, '409': problem('The assessment is not completed') }
 const body = (schema: string, example: unknown) => ({
   required: true,
   content: { 'application/json': { schema: schemaRef(schema), example } },
@@ -85,6 +86,10 @@ export const storedPaths = (examples: Readonly<Record<string, unknown>>) => ({
       parameters: [
         slug,
         inHeader('Idempotency-Key', '1 to 255 printable characters: a retry within 24 hours gets the same answer'),
+        inHeader(
+          'Prefer',
+          '`respond-async`: answer as soon as the schedule stands in line; `respond-async, wait=10`: or with the record, where it comes within so many seconds, at most 60 (RFC 7240)',
+        ),
       ],
       requestBody: {
         required: true,
@@ -97,6 +102,13 @@ export const storedPaths = (examples: Readonly<Record<string, unknown>>) => ({
         '201': json('Assessment', 'The record; it is on the disk', {
           ...tag,
           Location: header('The record'),
+          'Idempotency-Replayed': header('true where this is the answer of an earlier request'),
+        }),
+        '202': json('Job', 'With `respond-async`: the schedule stands in line, on the disk', {
+          Location: header('Where the record will be; till then its state'),
+          Link: header('rel="monitor": its progress as server-sent events'),
+          'Retry-After': header('Seconds to the next look'),
+          'Preference-Applied': header('What of Prefer was heeded'),
           'Idempotency-Replayed': header('true where this is the answer of an earlier request'),
         }),
         '400': problem('The body cannot be read'),
@@ -125,16 +137,52 @@ export const storedPaths = (examples: Readonly<Record<string, unknown>>) => ({
   '/v1/assessments/{id}': {
     get: {
       operationId: 'getAssessment',
-      summary: 'One record: state, summary, hashes',
+      summary: 'One record: state, summary, hashes; how far it is, as long as it is none',
       tags: ['records'],
       parameters: [id, ifNoneMatch],
       responses: {
-        '200': json('Assessment', 'The record', {
+        '200': json('AssessmentOrJob', 'The record, or the job that is to become one', {
           ...tag,
           Link: header('rel="predecessor-version" and rel="successor-version" (RFC 5829), rel="collection"'),
+          'Retry-After': header('Seconds to the next look, while it waits or runs'),
         }),
         ...notModified,
-        ...noRecord,
+        ...noAssessment,
+        ...refusals,
+      },
+    },
+    delete: {
+      operationId: 'cancelAssessment',
+      summary: 'Cancel an assessment that waits or runs; a record is never deleted',
+      tags: ['records'],
+      parameters: [id],
+      responses: {
+        '200': json('Job', 'It is cancelled, now or before'),
+        ...noAssessment,
+        '409': problem('It is completed, or has failed'),
+        ...refusals,
+      },
+    },
+  },
+  '/v1/assessments/{id}/events': {
+    get: {
+      operationId: 'watchAssessment',
+      summary: 'Progress as server-sent events, until the assessment ends',
+      tags: ['records'],
+      parameters: [id],
+      responses: {
+        '200': {
+          description:
+            'Events `progress`, then one named for the state at the end: `completed`, `failed` or `cancelled`. The data of each is a JobProgress',
+          content: {
+            'text/event-stream': {
+              schema: { type: 'string' },
+              example:
+                'event: progress\ndata: {"id":"0199…","state":"running","done":12,"caps":50}\n\nevent: completed\ndata: {"id":"0199…","state":"completed","done":50,"caps":50}\n\n',
+            },
+          },
+        },
+        ...noAssessment,
         ...refusals,
       },
     },

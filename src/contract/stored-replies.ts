@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { assessmentResult, checkKinds, notice, trace } from './replies.ts'
+import { assessmentResult, checkKinds, notice, problemReply, trace } from './replies.ts'
 
 const text = z.string()
 const time = z.string().meta({ description: 'ISO 8601, UTC' })
@@ -38,6 +38,34 @@ export const assessment = z.strictObject({
   recordHash: hash('the canonical JSON of this object without recordHash, state and summary'),
   summary: assessmentResult.shape.summary,
 })
+
+const jobState = z.enum(['queued', 'running', 'failed', 'cancelled'])
+const capsDone = {
+  done: z.int().meta({ description: 'caps whose piles are computed' }),
+  caps: z.int().nullable().meta({ description: 'of so many; null until the schedule has been read' }),
+}
+
+export const job = z
+  .strictObject({
+    id: text.meta({ description: 'of the record to come' }),
+    project: text,
+    state: jobState,
+    createdAt: time,
+    startedAt: time.nullable().meta({ description: 'when it was begun last' }),
+    finishedAt: time.nullable(),
+    actor: text,
+    actorKey: text.nullable(),
+    attempts: z.int().meta({ description: 'how often it was begun' }),
+    progress: z.strictObject(capsDone),
+    problem: problemReply.optional().meta({ description: 'why there is no record: of failed and cancelled ones' }),
+  })
+  .meta({ description: 'An assessment that is no record yet, or never will be; this is kept for 30 days' })
+
+export const assessmentOrJob = z.union([assessment, job])
+
+export const jobProgress = z
+  .strictObject({ id: text, state: z.enum([...jobState.options, 'completed']), ...capsDone })
+  .meta({ description: 'The data of an event' })
 
 const request = z.looseObject({}).meta({ description: 'the schedule, every quantity in its unit' })
 export const content = z.strictObject({ notices: z.array(notice), request, result: assessmentResult })

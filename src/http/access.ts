@@ -18,6 +18,8 @@ export const access: Readonly<Record<string, Access>> = {
   'POST /v1/projects/:slug/assessments': ['write'],
   'GET /v1/projects/:slug/integrity': ['read'],
   'GET /v1/assessments/:id': ['read'],
+  'DELETE /v1/assessments/:id': ['write'],
+  'GET /v1/assessments/:id/events': ['read'],
   'GET /v1/assessments/:id/content': ['read'],
   'GET /v1/assessments/:id/caps': ['read'],
   'GET /v1/assessments/:id/caps/:mark': ['read'],

@@ -1,12 +1,20 @@
 import type { FastifyInstance } from 'fastify'
-import { collectDefaultMetrics, Gauge, Histogram, Registry } from 'prom-client'
+import { Counter, collectDefaultMetrics, Gauge, Histogram, Registry } from 'prom-client'
 
 export type Load = { readonly busy: number; readonly queued: number }
-/** Bytes that the store takes; throws where it cannot be asked. */
-export type StoreSize = () => Promise<number>
+/** What the store is asked for; each throws where it cannot be asked. */
+export type Asked = {
+  /** Bytes that it takes. */
+  readonly size: () => Promise<number>
+  /** Assessments that wait, run, or ended without a record, by state. */
+  readonly jobs: () => Promise<Readonly<Record<string, number>>>
+}
 
-/** `/metrics` for Prometheus. Series go by route template, so that ids and typing errors add none. */
-export function metrics(app: FastifyInstance, engine: string, load: Load, storeSize: StoreSize): void {
+/**
+ * `/metrics` for Prometheus. Series go by route template, so that ids and typing errors add none. Gives back what counts the
+ * ends of jobs.
+ */
+export function metrics(app: FastifyInstance, engine: string, load: Load, store: Asked): (state: string) => void {
   const register = new Registry()
   collectDefaultMetrics({ register })
   const duration = new Histogram({
@@ -28,6 +36,18 @@ export function metrics(app: FastifyInstance, engine: string, load: Load, storeS
   gauge('kentledge_workers_busy', 'Worker threads at work', () => load.busy)
   gauge('kentledge_queue_depth', 'Assessments that wait for a worker thread', () => load.queued)
   const size = new Gauge({ name: 'kentledge_store_bytes', help: 'Size of the store', registers: [register] })
+  const jobs = new Gauge({
+    name: 'kentledge_jobs',
+    help: 'Assessments that wait, run, or ended without a record, over all replicas',
+    labelNames: ['state'],
+    registers: [register],
+  })
+  const ended = new Counter({
+    name: 'kentledge_jobs_ended_total',
+    help: 'Assessments that this process brought to an end',
+    labelNames: ['state'],
+    registers: [register],
+  })
   new Gauge({
     name: 'kentledge_build_info',
     help: 'Version of the engine',
@@ -40,7 +60,10 @@ export function metrics(app: FastifyInstance, engine: string, load: Load, storeS
   })
   app.get('/metrics', async (_, reply) => {
     // The other figures matter most while the store is away.
-    size.set(await storeSize().catch(() => Number.NaN))
+    size.set(await store.size().catch(() => Number.NaN))
+    jobs.reset()
+    for (const [state, count] of Object.entries(await store.jobs().catch(() => ({})))) jobs.set({ state }, count)
     return reply.type(register.contentType).send(await register.metrics())
   })
+  return (state) => ended.inc({ state })
 }

@@ -1,3 +1,4 @@
+import { MessageChannel, type MessagePort } from 'node:worker_threads'
 import { Piscina } from 'piscina'
 import { Problem } from '../errors.ts'
 
@@ -11,6 +12,9 @@ export type Work<Task, Answer> = {
   /** Holds the types together; never set. */
   readonly types?: (task: Task) => Answer
 }
+
+/** A task whose thread tells how far it is. */
+export type Telling = { readonly port?: MessagePort }
 
 export type PoolOptions = {
   readonly workers: number
@@ -59,17 +63,26 @@ export class WorkerPool {
   }
 
   /**
-   * Runs a task in a thread. A client that leaves (`signal`) or a task that overruns ends its thread, and nobody else's work.
+   * Runs a task in a thread; `told` hears what that posts to its `port`. A client that leaves (`signal`) or a task that overruns ends its thread, and nobody else's work.
    * Throws the thread's own problem; `overloaded` when the queue is full; `timed-out` past the deadline; `worker-died` when
    * the thread is lost; `internal-error` when the entry fails.
    */
-  async run<Task, Answer>(work: Work<Task, Answer>, task: Task, signal: AbortSignal): Promise<Answer> {
+  async run<Task extends object, Answer>(
+    work: Work<Task, Answer>,
+    task: Task,
+    signal: AbortSignal,
+    told?: (message: unknown) => void,
+  ): Promise<Answer> {
     if (this.#underWay >= this.#options.workers + this.#options.queue) throw new Problem('overloaded', { seconds: 1 })
     this.#underWay++
     const deadline = AbortSignal.timeout(this.#options.seconds * 1000)
     let outcome: Answer | Refusal
+    const channel = told && new MessageChannel()
+    channel?.port1.on('message', told!)
     try {
-      outcome = await this.#pool.run(task, {
+      outcome = await this.#pool.run(channel ? { ...task, port: channel.port2 } : task, {
+        // The declared type of the list is that of another function.
+        transferList: (channel ? [channel.port2] : []) as never,
         filename: work.entry.href,
         name: work.name,
         signal: AbortSignal.any([signal, deadline]),
@@ -81,6 +94,7 @@ export class WorkerPool {
         signal.aborted || /^(worker exited|Terminating worker)/i.test((cause as Error).message) || isOutOfMemory(cause)
       throw Object.assign(new Problem(lost ? 'worker-died' : 'internal-error'), { cause })
     } finally {
+      channel?.port1.close()
       this.#underWay--
     }
     if (!isRefusal(outcome)) return outcome

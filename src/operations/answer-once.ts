@@ -1,5 +1,5 @@
 import type { Transaction } from 'kysely'
-import { claim, LEASE_MS, type Reply, type Request, release, renew, settle } from '../store/idempotency.ts'
+import { amend, claim, LEASE_MS, type Reply, type Request, release, renew, settle } from '../store/idempotency.ts'
 import type { Tables } from '../store/tables.ts'
 import type { Office } from './office.ts'
 
@@ -30,4 +30,13 @@ export async function answerOnce(
   } finally {
     clearInterval(alive)
   }
+}
+
+/** Lets retries of a request get another reply than the one that was kept. */
+export async function answerBetter(
+  { store }: Pick<Office, 'store'>,
+  request: Request | undefined,
+  reply: Reply,
+): Promise<void> {
+  if (request) await amend(store, request, reply)
 }

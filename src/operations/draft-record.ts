@@ -11,10 +11,15 @@ import { told } from './calculate.ts'
 /** The cap that a number of the result belongs to; summary and neighbours come after the last. */
 const capOf = (pointer: string, caps: number) => Number(/^\/caps\/(\d+)/.exec(pointer)?.[1] ?? caps)
 
+/** Caps done of the caps of a schedule. */
+export type Told = (done: number, caps: number) => void
+
 /** Assesses a schedule and makes all of a record but its place in a project. The same schedule gives the same draft, wherever it runs. */
-export function draftRecord(input: unknown): Draft {
+export function draftRecord(input: unknown, tell: Told = () => undefined): Draft {
   const schedule = parse(scheduleRequest, input)
-  const { result, notices, trace } = told(() => assess(schedule, { trace: true }))
+  const caps = schedule.caps.length
+  tell(0, caps)
+  const { result, notices, trace } = told(() => assess(schedule, { trace: true, told: (done) => tell(done, caps) }))
   const rows = flatRows(schedule, result)
   const parts = {
     notices: canonicalText(notices),

@@ -5,14 +5,17 @@ import type { Page } from '../store/page.ts'
 import { capBodies } from '../store/read-caps.ts'
 import { adjacentRecords, findWholeRecord, listRecords } from '../store/read-records.ts'
 import type { Office } from './office.ts'
-import { ownProject, ownRecord } from './rights.ts'
+import { ownAssessment, ownProject, ownRecord } from './rights.ts'
+import { showJob } from './show-job.ts'
 import { showRecord } from './show-record.ts'
 
-/** A record, with the ids of the revisions before and after it. */
+/** A record, with the ids of the revisions before and after it; the job, as long as there is none. */
 export async function getAssessment(office: Office, actor: Actor, id: string) {
-  const record = await ownRecord(office, actor, id)
+  const found = await ownAssessment(office, actor, id)
+  if ('job' in found) return { job: showJob(found.job) }
+  const { record } = found
   const { before, after } = await adjacentRecords(office.store, record.project, record.revision)
-  return { record: showRecord(record), before, after }
+  return { job: undefined, record: showRecord(record), before, after }
 }
 
 /** Records of a project, oldest first. */

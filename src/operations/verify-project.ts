@@ -18,7 +18,7 @@ const PAGE = 200
  * them leave no mark inside the database: against that stands a checkpoint.
  */
 export async function verifyProject(
-  office: Office,
+  office: Pick<Office, 'store' | 'pool'>,
   actor: Actor,
   slug: string,
   checkpoint: Checkpoint | undefined,

@@ -38,7 +38,7 @@ export type AppendOptions = {
 export function appendRecord(
   store: Store,
   project: string,
-  actor: Actor,
+  actor: Pick<Actor, 'name' | 'key'>,
   draft: Draft,
   { id = randomUUIDv7(), also = async () => undefined }: AppendOptions = {},
 ): Promise<RecordRow> {

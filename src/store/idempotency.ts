@@ -86,6 +86,18 @@ export async function settle(trx: Transaction<Tables>, claim: Claim, reply: Repl
   if (!kept) throw new Problem('idempotency-running', { seconds: 1 })
 }
 
+/** Keeps another reply than the first: what was begun has ended before that was sent. */
+export async function amend(store: Store, { owner, key, fingerprint }: Request, reply: Reply): Promise<void> {
+  await store.db
+    .updateTable('idempotency')
+    .set({ status: reply.status, headers: JSON.stringify(reply.headers), body: reply.body })
+    .where('owner', '=', owner)
+    .where('key', '=', key)
+    .where('fingerprint', '=', fingerprint)
+    .where('state', '=', 'done')
+    .execute()
+}
+
 /** Gives the claim up: nothing was done, so the key may come again. */
 export async function release(store: Store, { owner, key, runner }: Claim): Promise<void> {
   await store.db

@@ -14,6 +14,8 @@ export type Store = {
   /** For reading alone: on SQLite a connection of its own, so that a page is read while a record is written. */
   readonly reader: Kysely<Tables>
   readonly capabilities: Capabilities
+  /** The address of its server, for those that need connections of their own. */
+  readonly url: string | undefined
   readonly clock: () => Date
   readonly close: () => Promise<void>
 }
@@ -59,5 +61,5 @@ export async function openStore(options: StoreOptions = {}): Promise<Store> {
     await close()
     throw fault
   }
-  return { db, reader, capabilities, clock, close }
+  return { db, reader, capabilities, url: options.url, clock, close }
 }

@@ -153,6 +153,32 @@ export type IdempotencyTable = {
   body: Uint8Array | null
 }
 
+/** An assessment that is not a record yet: it waits, runs, or ended without one. Its row goes when its record comes. */
+export type JobTable = {
+  /** That of the record to come. UUID version 7: jobs are begun in this order. */
+  id: string
+  project: string
+  state: 'queued' | 'running' | 'failed' | 'cancelled'
+  actor: string
+  actor_key: string | null
+  /** Trace id of the request that asked for it. */
+  trace_id: string
+  created_at: string
+  started_at: string | null
+  finished_at: string | null
+  /** How often it was begun, and by which run it is held now. */
+  attempts: number
+  runner: string | null
+  /** Caps done of caps; none are known before the schedule has been read. */
+  done: number
+  caps: number | null
+  /** A problem document as JSON, where it ended without a record. */
+  problem: string | null
+  /** The schedule as it came, JSON and CSV, compressed; gone when the job has ended. */
+  schedule: Uint8Array | null
+  loads: Uint8Array | null
+}
+
 export type VersionTable = { version: number; name: string; applied_at: string }
 export type ProbeTable = { id: number; written_at: string }
 
@@ -166,6 +192,7 @@ export type Tables = {
   signatures: SignatureTable
   keys: KeyTable
   idempotency: IdempotencyTable
+  jobs: JobTable
   schema_versions: VersionTable
   probe: ProbeTable
 }
@@ -178,4 +205,5 @@ export type NeighbourRow = Selectable<NeighbourTable>
 export type TraceRow = Selectable<TraceTable>
 export type SignatureRow = Selectable<SignatureTable>
 export type KeyRow = Selectable<KeyTable>
+export type JobRow = Selectable<JobTable>
 export type IdempotencyRow = Insertable<IdempotencyTable>

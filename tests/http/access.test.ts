@@ -12,7 +12,7 @@ import { openStore } from '../../src/store/open-store.ts'
 
 const keys = new Map<string, string>()
 const rows = Object.entries(access).map(([route, needed]) => {
-  const [method, url] = route.split(' ') as ['GET' | 'POST' | 'PUT', string]
+  const [method, url] = route.split(' ') as ['GET' | 'POST' | 'PUT' | 'DELETE', string]
   return { route, method, url, needed }
 })
 let app: FastifyInstance
@@ -46,7 +46,7 @@ const fill = (url: string) =>
     .replace(':id', url.includes('assessments') ? id : 'navfac-1986')
     .replace(':mark', 'A1')
     .replace(':code', 'overloaded')
-function ask(method: 'GET' | 'POST' | 'PUT', url: string, key: string | undefined, body?: object) {
+function ask(method: 'GET' | 'POST' | 'PUT' | 'DELETE', url: string, key: string | undefined, body?: object) {
   const authorization = key && `Bearer ${keys.get(key) ?? key}`
   const payload = method === 'GET' ? undefined : (body ?? {})
   return app.inject({ method, url, ...(payload && { payload }), headers: { ...(authorization && { authorization }) } })
@@ -108,6 +108,7 @@ test("another project's record is told like a missing one", async () => {
   const gone = id.replace(/.$/, (last) => (last === '0' ? '1' : '0'))
   for (const rest of [
     '',
+    '/events',
     '/content',
     '/caps',
     '/caps/A1',

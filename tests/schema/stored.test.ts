@@ -8,6 +8,7 @@ import { readExamples } from '../../src/contract/examples.ts'
 import { openapi } from '../../src/contract/openapi.ts'
 import { makeKey } from '../../src/store/keys.ts'
 import { openStore, type Store } from '../../src/store/open-store.ts'
+import { slowSchedule } from '../jobs/slow-schedule.ts'
 
 /** Every answer of the routes of projects and records against the schema that the document names for its status. */
 type Response = { content?: Record<string, { schema: { $ref?: string } }> }
@@ -33,7 +34,12 @@ beforeAll(async () => {
 afterAll(() => app.close())
 
 /** Sends a request to a documented path and holds the answer to what is documented for its status. */
-async function send(method: 'GET' | 'PUT' | 'POST', path: string, at: Record<string, string>, more: object = {}) {
+async function send(
+  method: 'GET' | 'PUT' | 'POST' | 'DELETE',
+  path: string,
+  at: Record<string, string>,
+  more: object = {},
+) {
   const url = path.replaceAll(/\{(\w+)\}/g, (_, name: string) => encodeURIComponent(at[name]!)) + (at.query ?? '')
   const operation = paths[path]![method.toLowerCase()]!
   const reply = await app.inject({ method, url, ...more })
@@ -57,7 +63,12 @@ test('every route of records, in each of its statuses that a request can bring a
   const assessments = `${project}/assessments`
   const record = '/v1/assessments/{id}'
   const statuses: Record<string, number[]> = {}
-  const tell = async (method: 'GET' | 'PUT' | 'POST', path: string, at: Record<string, string>, more: object = {}) => {
+  const tell = async (
+    method: 'GET' | 'PUT' | 'POST' | 'DELETE',
+    path: string,
+    at: Record<string, string>,
+    more: object = {},
+  ) => {
     const reply = await send(method, path, at, more)
     const list = statuses[`${method} ${path}`] ?? []
     statuses[`${method} ${path}`] = list
@@ -91,6 +102,24 @@ test('every route of records, in each of its statuses that a request can bring a
   await tell('POST', assessments, { slug }, { payload: '{', headers: { 'content-type': 'application/json' } })
   await tell('POST', assessments, { slug }, { payload: 'x', headers: { 'content-type': 'text/csv' } })
   await tell('POST', assessments, { slug }, json({ title: 'x'.repeat(1_100_000) }))
+  const queued = (await tell('POST', assessments, { slug }, json(example, { prefer: 'respond-async' }))).json()
+  const cancelled = (await tell('POST', assessments, { slug }, json(example, { prefer: 'respond-async' }))).json()
+  expect(queued.state).toBe('queued')
+  // One worker: the second waits for the first.
+  await tell('DELETE', record, { id: cancelled.id })
+  await tell('DELETE', record, { id: cancelled.id })
+  await tell('DELETE', record, { id })
+  await tell('DELETE', record, { id: 'none' })
+  await tell('GET', record, { id: cancelled.id })
+  for (const rest of ['/content', '/caps', '/signatures']) await tell('GET', record + rest, { id: cancelled.id })
+  await tell('GET', record, { id: queued.id })
+  const events = (await tell('GET', `${record}/events`, { id: queued.id })).body
+  expect(events.trim().split('\n\n').at(-1)).toMatch(/^event: completed\ndata: \{.*\}$/)
+  for (const [, data] of events.matchAll(/^data: (.*)$/gm))
+    expect(ajv.getSchema('contract#/components/schemas/JobProgress')!(JSON.parse(data!))).toBe(true)
+  await tell('GET', `${record}/events`, { id: 'none' })
+  await tell('GET', `${record}/events`, { id }, { headers: { accept: 'application/json' } })
+  await tell('GET', record, { id: queued.id })
   await tell('GET', assessments, { slug, query: '?limit=1' })
   await tell('GET', assessments, { slug: 'none' })
   await tell('GET', `${project}/integrity`, { slug })
@@ -134,7 +163,7 @@ test('every route of records, in each of its statuses that a request can bring a
   )
   expect(Object.keys(statuses).sort()).toEqual(stored.sort())
   expect(new Set(Object.values(statuses).flat())).toEqual(
-    new Set([200, 201, 304, 400, 401, 403, 404, 406, 409, 412, 413, 415, 422, 428]),
+    new Set([200, 201, 202, 304, 400, 401, 403, 404, 406, 409, 412, 413, 415, 422, 428]),
   )
 })
 
@@ -170,5 +199,26 @@ describe('the typed client', () => {
     const fault = await client.assessment('none').catch((e: unknown) => e)
     expect((fault as KentledgeProblem).problem.type).toBe('/problems/no-such-assessment')
     expect(fault).toBeInstanceOf(KentledgeProblem)
+  })
+
+  test('puts a schedule in line, waits for its record, and hears why there is none', async () => {
+    const { key } = await makeKey(store, { name: 'Pipeline', scopes: ['read', 'write'], projects: ['pier'] })
+    const client = kentledge({ baseUrl, key })
+    await client.putProject('pier', 'Pier')
+    const { id, state } = await client.queue('pier', example)
+    expect(state).toBe('queued')
+    const told: Schemas['Job']['progress'][] = []
+    const record = await client.waitFor(id, (progress) => told.push(progress))
+    expect(record).toMatchObject({ id, revision: 1, state: 'completed', actor: 'Pipeline' })
+    expect(told.length).toBeGreaterThan(0)
+    const problemOf = (run: Promise<unknown>) => run.catch((e: unknown) => (e as KentledgeProblem).problem.type)
+    const wrong = { ...example, title: '' }
+    expect(await problemOf(client.queue('pier', wrong).then((job) => client.waitFor(job.id)))).toBe(
+      '/problems/invalid-request',
+    )
+    const one = await client.queue('pier', slowSchedule(300) as never)
+    expect((await client.cancel(one.id)).state).toBe('cancelled')
+    expect(await problemOf(client.waitFor(one.id))).toBe('/problems/assessment-cancelled')
+    expect(await problemOf(client.cancel(id))).toBe('/problems/assessment-ended')
   })
 })

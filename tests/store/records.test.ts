@@ -7,6 +7,7 @@ import { draftRecord } from '../../src/operations/draft-record.ts'
 import { anonymous } from '../../src/store/actor.ts'
 import { appendRecord } from '../../src/store/append-record.ts'
 import { NOTHING, recordHash } from '../../src/store/chain.ts'
+import { migrations } from '../../src/store/migrations/list.ts'
 import { openStore } from '../../src/store/open-store.ts'
 import { putProject } from '../../src/store/projects.ts'
 import { findCap, findTrace, listCaps, listChecks } from '../../src/store/read-caps.ts'
@@ -80,6 +81,8 @@ describe.each(bothDatabases())('on $name', (database) => {
     const store = await openStore(options)
     await store.db.insertInto('schema_versions').values({ version: 99, name: 'later', applied_at: '' }).execute()
     await store.close()
-    await expect(openStore(options)).rejects.toThrow('The database has version 99; this program knows versions up to 1')
+    await expect(openStore(options)).rejects.toThrow(
+      `The database has version 99; this program knows versions up to ${migrations.length}.`,
+    )
   })
 })

@@ -48,7 +48,7 @@ export const settlementCards: readonly MethodCard[] = [
     validity:
       "Layers of constant or linear modulus, Poisson's ratio 0 to 0.5, rigid base at any depth from the toe down, head at or below the surface, any section by its circle of equal area. Piles at least 1.5 diameters apart, up to 2 500 in a cap, up to 64 with coupling full, up to 225 under a rigid cap with nonlinearity. Working loads, unless nonlinearity is asked for: no slip, no gap, no consolidation with time.",
     errorBounds:
-      'Against finite elements: single piles within 2 %, 5 % for a toe on ground more than 50 times stiffer than along the shaft; on the high side by 0.3 to 1.5 %. Against converged boundary elements: 0.2 %. Interaction factors within 0.001; superposition lies above full coupling by 0 to 5 % for stiff piles, up to 14 % for very compressible ones. Twice the elements change the settlement by less than 0.2 %. A modulus linear with depth is followed by slices: 0.3 %. The share of the base is poorly conditioned.',
+      'Against finite elements: single piles within 2 %, 5 % for a toe on ground more than 50 times stiffer than along the shaft; on the high side by 0.3 to 1.5 %. Against converged boundary elements: 0.2 %. Interaction factors within 0.001; superposition lies above full coupling by 0 to 5 % for stiff piles, up to 14 % for very compressible ones. Twice the elements change the settlement by less than 0.2 %. The ground flexibility is symmetric to 0.5 % of its diagonal before it is made so. A modulus linear with depth is followed by slices: 0.3 %. The share of the base is poorly conditioned.',
     formulas: formulas(toeDepthOf, equivalentRadius, axialStiffness, ...group, elementForce, shearOf, loadBelow),
   },
   {

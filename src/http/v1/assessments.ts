@@ -3,6 +3,7 @@ import type { FastifyInstance } from 'fastify'
 import type { AssessTask } from '../../operations/assess-in-thread.ts'
 import type { Office } from '../../operations/office.ts'
 import { JSON_OR_PAGE, pageHeaders } from '../html.ts'
+import { leaves } from '../leaves.ts'
 import { optionsOf } from './calculators.ts'
 import { projectAssessments } from './project-assessments.ts'
 import { scheduleBody } from './schedule-body.ts'
@@ -26,9 +27,7 @@ export async function assessments(app: FastifyInstance, { assess, bodyLimit, off
     const page = request.accepted === 'text/html'
     const options = optionsOf(request)
     const schedule = await scheduleBody(request, bodyLimit)
-    const gone = new AbortController()
-    reply.raw.on('close', () => gone.abort())
-    const bytes = await assess({ ...schedule, options, page }, gone.signal)
+    const bytes = await assess({ ...schedule, options, page }, leaves(reply.raw))
     if (page) return pageHeaders(reply).send(bytes)
     return reply.type('application/json; charset=utf-8').send(bytes)
   })

@@ -7,9 +7,12 @@ import { listAssessments } from '../../operations/read-assessment.ts'
 import { recordAssessment } from '../../operations/record-assessment.ts'
 import { ownProject } from '../../operations/rights.ts'
 import { showRecord } from '../../operations/show-record.ts'
+import { leaves } from '../leaves.ts'
 import { askedPage, pageOf, paging } from '../pages.ts'
+import { preferencesOf } from '../prefer.ts'
 import { readQuery } from '../query.ts'
-import { recordLinks } from './record-links.ts'
+import { recordReply } from './record-reply.ts'
+import { respondAsync } from './respond-async.ts'
 import { scheduleBody } from './schedule-body.ts'
 
 type Slug = { Params: { slug: string } }
@@ -27,19 +30,6 @@ function keyed(request: FastifyRequest, parts: { readonly schedule: string; read
   return { owner: request.actor!.key ?? '', key, fingerprint: hash.digest('hex') }
 }
 
-function replyOf(record: Parameters<typeof showRecord>[0]): Reply {
-  return {
-    status: 201,
-    headers: {
-      location: `/v1/assessments/${record.id}`,
-      etag: `"${record.content_hash}"`,
-      link: recordLinks(record.project, undefined, undefined),
-      'content-type': 'application/json; charset=utf-8',
-    },
-    body: Buffer.from(JSON.stringify(showRecord(record))),
-  }
-}
-
 /** Assessments of a project: posted as a schedule, kept as the next revision; listed oldest first. */
 export function projectAssessments(app: FastifyInstance, office: Office, bodyLimit: number): void {
   app.post<Slug>('/v1/projects/:slug/assessments', async (request, reply) => {
@@ -47,19 +37,22 @@ export function projectAssessments(app: FastifyInstance, office: Office, bodyLim
     readQuery(request, {})
     await ownProject(office, request.actor!, slug)
     const schedule = await scheduleBody(request, bodyLimit)
-    const gone = new AbortController()
-    reply.raw.on('close', () => gone.abort())
+    const once = keyed(request, schedule)
+    const gone = leaves(reply.raw)
     const run = async (keep: Keep) => {
       let made: Reply | undefined
-      const record = await recordAssessment(office, slug, request.actor!, schedule, gone.signal, {
+      await recordAssessment(office, slug, request.actor!, schedule, gone, {
         also: async (trx, kept) => {
-          made = replyOf(kept)
+          made = recordReply(showRecord(kept))
           await keep(trx, made)
         },
       })
-      return made ?? replyOf(record)
+      return made!
     }
-    const { status, headers, body, replayed } = await answerOnce(office, keyed(request, schedule), run)
+    const preferences = preferencesOf(request.headers.prefer)
+    const { status, headers, body, replayed } = preferences.respondAsync
+      ? await respondAsync(office, request, { project: slug, schedule, preferences, gone, once })
+      : await answerOnce(office, once, run)
     if (replayed) reply.header('idempotency-replayed', 'true')
     return reply.code(status).headers(headers).send(body)
   })

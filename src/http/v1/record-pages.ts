@@ -3,8 +3,8 @@ import { checkKinds } from '../../contract/replies.ts'
 import type { Office } from '../../operations/office.ts'
 import { printCapSheet, printOverview, printPiles, printPlan } from '../../operations/print-record.ts'
 import { sendTagged } from '../conditional.ts'
-import { gone } from '../gone.ts'
 import { pageHeaders } from '../html.ts'
+import { leaves } from '../leaves.ts'
 import { anyText, oneOf, readQuery } from '../query.ts'
 
 type Id = { Params: { id: string } }
@@ -21,7 +21,14 @@ export function recordPages(app: FastifyInstance, office: Office): void {
   app.get<{ Params: { slug: string } }>('/v1/projects/:slug/plan', PAGE, async (request, reply) => {
     const { slug } = request.params
     const query = readQuery(request, ofPlan)
-    const { bytes } = await printPlan(office, request.actor!, slug, `/v1/projects/${slug}/plan`, query, gone(reply))
+    const { bytes } = await printPlan(
+      office,
+      request.actor!,
+      slug,
+      `/v1/projects/${slug}/plan`,
+      query,
+      leaves(reply.raw),
+    )
     return pageHeaders(reply).send(bytes)
   })
   app.get<Id>('/v1/assessments/:id/sheet', PAGE, async (request, reply) => {
@@ -33,7 +40,7 @@ export function recordPages(app: FastifyInstance, office: Office): void {
       id,
       at,
       readQuery(request, ofPlan),
-      gone(reply),
+      leaves(reply.raw),
     )
     request.project = record.project
     return pageHeaders(reply).send(bytes)
@@ -44,7 +51,7 @@ export function recordPages(app: FastifyInstance, office: Office): void {
     async (request, reply) => {
       readQuery(request, {})
       const { id, mark } = request.params
-      const { record, bytes } = await printCapSheet(office, request.actor!, id, mark, gone(reply))
+      const { record, bytes } = await printCapSheet(office, request.actor!, id, mark, leaves(reply.raw))
       request.project = record.project
       return pageHeaders(reply).send(bytes)
     },
@@ -58,7 +65,7 @@ export function recordPages(app: FastifyInstance, office: Office): void {
       readQuery(request, {})
       const csv = request.accepted === 'text/csv'
       const page = csv ? 'piles-csv' : 'piles'
-      const { record, bytes } = await printPiles(office, request.actor!, request.params.id, page, gone(reply))
+      const { record, bytes } = await printPiles(office, request.actor!, request.params.id, page, leaves(reply.raw))
       request.project = record.project
       if (!csv) return pageHeaders(reply).send(bytes)
       const name = `${record.project}-${record.revision}-piles.csv`

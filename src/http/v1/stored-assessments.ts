@@ -6,9 +6,10 @@ import { ownRecord } from '../../operations/rights.ts'
 import { listSignatures, signAssessment } from '../../operations/sign-assessment.ts'
 import { verifyProject } from '../../operations/verify-project.ts'
 import { sendTagged } from '../conditional.ts'
-import { gone } from '../gone.ts'
+import { leaves } from '../leaves.ts'
 import { type Parameter, readQuery, whole } from '../query.ts'
 import { recordLinks } from './record-links.ts'
+import { POLL } from './respond-async.ts'
 
 type Id = { Params: { id: string } }
 
@@ -16,13 +17,16 @@ const hash: Parameter<string> = {
   expected: 'a record hash, sha256:…',
   read: (text) => (/^sha256:[0-9a-f]{64}$/.test(text) ? text : undefined),
 }
-
 /** One record: itself, its content, its signatures; the chain of a project; a record computed again. */
 export function storedAssessments(app: FastifyInstance, office: Office): void {
   app.get<Id>('/v1/assessments/:id', async (request, reply) => {
     readQuery(request, {})
-    const { record, before, after } = await getAssessment(office, request.actor!, request.params.id)
-    request.project = record.project
+    const { job, record, before, after } = await getAssessment(office, request.actor!, request.params.id)
+    request.project = (job ?? record).project
+    if (job) {
+      if (job.finishedAt === null) reply.header('retry-after', POLL)
+      return reply.header('cache-control', 'no-store').send(job)
+    }
     // The record itself stays as it is for ever; what came after it stands in the header.
     reply.header('link', recordLinks(record.project, before, after))
     return sendTagged(request, reply, record.contentHash, () => JSON.stringify(record))
@@ -44,11 +48,11 @@ export function storedAssessments(app: FastifyInstance, office: Office): void {
   app.post<Id>('/v1/assessments/:id/reverify', async (request, reply) => {
     const { project } = await ownRecord(office, request.actor!, request.params.id)
     request.project = project
-    return reverifyRecord(office, request.params.id, gone(reply))
+    return reverifyRecord(office, request.params.id, leaves(reply.raw))
   })
   app.get<{ Params: { slug: string } }>('/v1/projects/:slug/integrity', async (request, reply) => {
     const given = readQuery(request, { revision: whole(1, 999_999_999), hash })
     const checkpoint = given.revision && given.hash ? { revision: given.revision, hash: given.hash } : undefined
-    return verifyProject(office, request.actor!, request.params.slug, checkpoint, gone(reply))
+    return verifyProject(office, request.actor!, request.params.slug, checkpoint, leaves(reply.raw))
   })
 }

@@ -28,6 +28,8 @@ export class SoilFlexibility {
   readonly size: number
   readonly pile: ElasticPile
   readonly mesh: Mesh
+  /** Largest difference of two mirrored entries of `own` before they are made equal, of the geometric mean of their diagonals; known after it. */
+  asymmetry = 0
   readonly #depths: Float64Array
   readonly #E: Float64Array
   readonly #nu: Float64Array
@@ -167,6 +169,7 @@ export class SoilFlexibility {
     const E = this.#E[size - 1]!
     const nu = this.#nu[size - 1]!
     out[size * size - 1] = (this.#punch * Math.PI) / (2 * b) + surfaceShare(pile.toe, nu) / divisor(E, nu)
+    this.asymmetry = asymmetryOf(out, size)
     symmetrise(out, size)
     const grid = this.#grid
     if (grid)
@@ -245,6 +248,14 @@ export class SoilFlexibility {
     }
     for (let j = 0; j < base; j++) out[j * size + base] = out[base * size + j]!
   }
+}
+
+function asymmetryOf(a: Float64Array, n: number): number {
+  let most = 0
+  for (let i = 0; i < n; i++)
+    for (let j = 0; j < i; j++)
+      most = Math.max(most, Math.abs(a[i * n + j]! - a[j * n + i]!) / Math.sqrt(a[i * n + i]! * a[j * n + j]!))
+  return most
 }
 
 function symmetrise(a: Float64Array, n: number): void {
