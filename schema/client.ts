@@ -53,7 +53,8 @@ async function waitFor(
 export function kentledge({ baseUrl, key, retries = 3, fetch: base = globalThis.fetch }: ClientOptions) {
   const http = patient({ retries, fetch: base })
   const headers = key === undefined ? {} : { authorization: `Bearer ${key}` }
-  const client = createClient<paths>({ baseUrl, headers, fetch: (request) => http(request) })
+  // The pages that the same routes answer with are for eyes.
+  const client = createClient<paths, 'application/json'>({ baseUrl, headers, fetch: (request) => http(request) })
   // Named by their schemas: the types that openapi-fetch derives turn readonly lists into objects.
   const taken = <Name extends keyof Schemas>({ data, error }: { data?: unknown; error?: unknown }): Schemas[Name] => {
     if (data !== undefined) return data as Schemas[Name]

@@ -13,6 +13,7 @@ import { accessLog, traceIdOf } from './http/access-log.ts'
 import { answerClientError } from './http/client-errors.ts'
 import { type Drain, drain } from './http/drain.ts'
 import { guard } from './http/guard.ts'
+import { pageScripts } from './http/html.ts'
 import { metrics } from './http/metrics.ts'
 import { negotiate } from './http/negotiate.ts'
 import { probes } from './http/probes.ts'
@@ -23,6 +24,7 @@ import { calculators } from './http/v1/calculators.ts'
 import { caps } from './http/v1/caps.ts'
 import { jobs } from './http/v1/jobs.ts'
 import { projects } from './http/v1/projects.ts'
+import { recordPages } from './http/v1/record-pages.ts'
 import { storedAssessments } from './http/v1/stored-assessments.ts'
 import { embeddedQueue } from './jobs/embedded-queue.ts'
 import { WorkerPool } from './jobs/pool.ts'
@@ -107,6 +109,8 @@ export async function buildService(config: Config, store: Store): Promise<Servic
   storedAssessments(app, office)
   jobs(app, office)
   caps(app, office)
+  recordPages(app, office)
+  await pageScripts(app)
   await app.register(reference, { document: openapi(readExamples()) })
   app.post('/v1/replay', async (request) => replayTrace(request.body))
   app.get('/v1/methods', async () => listMethods())

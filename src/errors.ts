@@ -44,6 +44,7 @@ type Contract =
   | 'no-such-project'
   | 'no-such-assessment'
   | 'no-such-cap'
+  | 'no-assessment-yet'
   | 'bad-cursor'
   | 'bad-project-slug'
   | 'precondition-failed'
@@ -117,7 +118,7 @@ export const catalogue: Readonly<Record<ErrorCode, ErrorEntry>> = {
     'Not acceptable',
     'No answer of this path is of the accepted types.',
     'The Accept header names types that this path does not answer in.',
-    'Accept application/json.',
+    'Accept application/json; for pages and lists as files see the types of the path in /openapi.json.',
   ),
   'malformed-url': entry(
     400,
@@ -307,6 +308,13 @@ export const catalogue: Readonly<Record<ErrorCode, ErrorEntry>> = {
     'There is no assessment {id}, or the key has no right to its project.',
     'The id is misspelt, or the record belongs to another project.',
     'See GET /v1/projects/{slug}/assessments.',
+  ),
+  'no-assessment-yet': entry(
+    404,
+    'No assessment yet',
+    'The project "{slug}" has no assessment yet.',
+    'No schedule was posted to the project.',
+    'Post one to /v1/projects/{slug}/assessments.',
   ),
   'no-such-cap': entry(
     404,

@@ -36,7 +36,7 @@ const rooms: Readonly<Record<string, Room>> = {
   store: { floor: 11, only: ['engine', 'errors.ts', 'canonical.ts'] },
   jobs: { floor: 11, only: ['engine', 'errors.ts'] },
   operations: { floor: 12 },
-  http: { floor: 13, only: ['operations', 'contract', 'errors.ts', 'engine'] },
+  http: { floor: 13, only: ['operations', 'contract', 'print', 'errors.ts', 'engine'] },
   graphql: { floor: 13, only: ['operations', 'contract', 'errors.ts', 'engine'] },
   'app.ts': { floor: 14 },
   'main.ts': { floor: 15 },

@@ -1,6 +1,7 @@
 import { z } from 'zod'
 import { engineVersion } from '../engine/index.ts'
-import { inPath, json, problem, query, scheduleForm, schemaRef } from './openapi-parts.ts'
+import { header, inPath, json, problem, query, scheduleForm, schemaRef } from './openapi-parts.ts'
+import { pagePaths } from './page-paths.ts'
 import { designBasis, groundProfile, layout, pileType } from './parts.ts'
 import { replayRequest, step } from './replay.ts'
 import * as replies from './replies.ts'
@@ -130,11 +131,17 @@ function components(): Record<string, unknown> {
   return Object.fromEntries([...named(requests, 'input'), ...named(answers, 'output')])
 }
 
+/** A calculator's answer, or the sheet of it to look at and to sign. */
+const answerOrPage = (id: string) => ({
+  description: 'The answer; with `Accept: text/html` as a page',
+  headers: { Vary: header('Accept') },
+  content: { 'application/json': { schema: schemaRef(id) }, 'text/html': { schema: { type: 'string' } } },
+})
 const failures = {
   '400': problem('The body or URL cannot be read'),
   '401': problem('No valid key, where the service asks for one'),
   '403': problem('The key lacks a scope'),
-  '406': problem('The client accepts no JSON'),
+  '406': problem('The route answers in no accepted type'),
   '413': problem('The body is larger than the limit (`bodyBytes` of GET /v1/limits)'),
   '415': problem('The content type is not accepted'),
   '422': problem('The request is invalid or physically impossible; `errors` lists every fault'),
@@ -161,7 +168,11 @@ export function openapi(examples: Readonly<Record<string, unknown>>) {
         tags: ['calculators'],
         ...(example && { parameters: path === '/v1/assessments' ? [...options, oneCap] : options }),
         requestBody: { required: true, content },
-        responses: { '200': json(answer, 'The answer'), ...failures, ...slow },
+        responses: {
+          '200': example ? answerOrPage(answer) : json(answer, 'The answer'),
+          ...failures,
+          ...slow,
+        },
       },
     }
   }
@@ -176,7 +187,7 @@ export function openapi(examples: Readonly<Record<string, unknown>>) {
       responses: { '200': json('MethodReply', 'The methods'), '404': problem('No method has this id') },
     },
   }
-  Object.assign(paths, storedPaths(examples))
+  Object.assign(paths, storedPaths(examples), pagePaths)
   const description =
     'Axial design of pile foundations. Units: m, kN, kPa, kN/m3, degrees; settlement in mm. Every quantity also takes a string with a unit. What one request may hold: GET /v1/limits.'
   return {

@@ -23,6 +23,11 @@ export const access: Readonly<Record<string, Access>> = {
   'GET /v1/assessments/:id/content': ['read'],
   'GET /v1/assessments/:id/caps': ['read'],
   'GET /v1/assessments/:id/caps/:mark': ['read'],
+  'GET /v1/projects/:slug/plan': ['read'],
+  'GET /v1/assessments/:id/sheet': ['read'],
+  'GET /v1/assessments/:id/caps/:mark/sheet': ['read'],
+  'GET /v1/assessments/:id/piles': ['read'],
+  'GET /v1/assessments/:id/piles.csv': ['read'],
   'GET /v1/assessments/:id/signatures': ['read'],
   'POST /v1/assessments/:id/signatures': ['read', 'sign'],
   'POST /v1/assessments/:id/reverify': ['read', 'calculate'],
@@ -38,6 +43,7 @@ export const access: Readonly<Record<string, Access>> = {
   'GET /metrics': 'public',
   'GET /problems/:code': 'public',
   'GET /openapi.json': 'public',
+  'GET /print/plan.js': 'public',
 }
 
 /** Pages that hold nothing of anybody: the reference and the explorer, with their files. */

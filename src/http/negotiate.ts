@@ -1,4 +1,5 @@
 import type { FastifyInstance } from 'fastify'
+import { preferred } from '../contract/accepted.ts'
 import { Problem } from '../errors.ts'
 
 declare module 'fastify' {
@@ -10,34 +11,6 @@ declare module 'fastify' {
     /** The media type that the client likes best among those. */
     accepted: string
   }
-}
-
-type Range = { readonly type: string; readonly quality: number }
-
-const rangesOf = (accept: string): Range[] =>
-  accept.split(',').map((part) => {
-    const [type = '', ...parameters] = part.split(';').map((p) => p.trim().toLowerCase())
-    const quality = parameters.find((p) => p.startsWith('q='))?.slice(2)
-    return { type, quality: quality === undefined ? 1 : Number(quality) || 0 }
-  })
-
-/** The quality of a type: that of the closest range that covers it. */
-function qualityOf(type: string, ranges: readonly Range[]): number {
-  const wider = [type, `${type.split('/')[0]}/*`, '*/*']
-  for (const wanted of wider) {
-    const found = ranges.find((range) => range.type === wanted)
-    if (found) return found.quality
-  }
-  return 0
-}
-
-/** The offered type that an Accept header likes best; undefined where it takes none. */
-export function preferred(accept: string | undefined, offered: readonly string[]): string | undefined {
-  if (accept === undefined || accept.trim() === '') return offered[0]
-  const ranges = rangesOf(accept)
-  const rated = offered.map((type) => ({ type, quality: qualityOf(type, ranges) })).filter((r) => r.quality > 0)
-  return rated.reduce<(typeof rated)[number] | undefined>((a, b) => (!a || b.quality > a.quality ? b : a), undefined)
-    ?.type
 }
 
 /** Version 1 answers in the type that the client accepts, or with a 406. */

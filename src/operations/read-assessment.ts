@@ -2,6 +2,7 @@ import type { Actor } from '../store/actor.ts'
 import { unpack } from '../store/blobs.ts'
 import { contentPieces } from '../store/chain.ts'
 import type { Page } from '../store/page.ts'
+import { capBodies } from '../store/read-caps.ts'
 import { adjacentRecords, findWholeRecord, listRecords } from '../store/read-records.ts'
 import type { Office } from './office.ts'
 import { ownAssessment, ownProject, ownRecord } from './rights.ts'
@@ -27,12 +28,7 @@ export async function listAssessments(office: Office, actor: Actor, slug: string
 export async function getContent(office: Office, actor: Actor, id: string) {
   await ownRecord(office, actor, id)
   const record = (await findWholeRecord(office.store, id))!
-  const caps = await office.store.reader
-    .selectFrom('caps')
-    .select('body')
-    .where('record', '=', id)
-    .orderBy('ordinal')
-    .execute()
+  const caps = await capBodies(office.store, id)
   const pieces = contentPieces({
     notices: record.notices,
     outcome: unpack(record.outcome),

@@ -1,4 +1,5 @@
 import { Problem } from '../errors.ts'
+import { capBodies } from '../store/read-caps.ts'
 import { findWholeRecord } from '../store/read-records.ts'
 import type { Office } from './office.ts'
 import { reverifying } from './reverify-in-thread.ts'
@@ -7,12 +8,7 @@ import { reverifying } from './reverify-in-thread.ts'
 export async function reverifyRecord({ store, pool }: Office, id: string, gone: AbortSignal) {
   const record = await findWholeRecord(store, id)
   if (!record) throw new Problem('no-such-assessment', { id })
-  const caps = await store.reader
-    .selectFrom('caps')
-    .select('body')
-    .where('record', '=', id)
-    .orderBy('ordinal')
-    .execute()
+  const caps = await capBodies(store, id)
   const { request, outcome, notices } = record
   const stored = { request, outcome, notices, caps: caps.map((cap) => cap.body) }
   const { content_hash, engine, count, changes } = await pool.run(reverifying, stored, gone)

@@ -66,6 +66,13 @@ export async function findCap(store: Store, record: string, mark: string) {
   return row && { ...row, body: unpack(row.body) }
 }
 
+/** Parts of the result of all caps, or of the one of a mark, as they lie compressed. */
+export function capBodies({ reader }: Store, record: string, mark?: string) {
+  let query = reader.selectFrom('caps').select(['ordinal', 'body']).where('record', '=', record)
+  if (mark !== undefined) query = query.where('mark', '=', mark)
+  return query.orderBy('ordinal').execute()
+}
+
 /** Checks of the given caps (ordinals), of all caps without. */
 export function listChecks(store: Store, record: string, caps?: readonly number[]): Promise<CheckRow[]> {
   let query = store.reader.selectFrom('checks').selectAll().where('record', '=', record)

@@ -31,6 +31,15 @@ export type RecordHead = Pick<RecordRow, (typeof headColumns)[number]>
 export const findRecord = (store: Store, id: string): Promise<RecordHead | undefined> =>
   store.reader.selectFrom('records').select(headColumns).where('id', '=', id).executeTakeFirst()
 
+/** The record of a revision of a project. */
+export const findRevision = (store: Store, project: string, revision: number): Promise<RecordHead | undefined> =>
+  store.reader
+    .selectFrom('records')
+    .select(headColumns)
+    .where('project', '=', project)
+    .where('revision', '=', revision)
+    .executeTakeFirst()
+
 /** The record with its request, outcome and notices. */
 export const findWholeRecord = (store: Store, id: string): Promise<RecordRow | undefined> =>
   store.reader.selectFrom('records').selectAll().where('id', '=', id).executeTakeFirst()

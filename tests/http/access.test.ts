@@ -106,7 +106,18 @@ describe.each(rows)('$route', ({ method, url, needed }) => {
 
 test("another project's record is told like a missing one", async () => {
   const gone = id.replace(/.$/, (last) => (last === '0' ? '1' : '0'))
-  for (const rest of ['', '/events', '/content', '/caps', '/caps/A1', '/signatures']) {
+  for (const rest of [
+    '',
+    '/events',
+    '/content',
+    '/caps',
+    '/caps/A1',
+    '/signatures',
+    '/sheet',
+    '/caps/A1/sheet',
+    '/piles',
+    '/piles.csv',
+  ]) {
     const told = async (one: string) => {
       const { traceId, ...document } = (await ask('GET', `/v1/assessments/${one}${rest}`, 'all elsewhere')).json()
       return JSON.stringify(document).replaceAll(one, 'ID')

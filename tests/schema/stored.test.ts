@@ -135,6 +135,18 @@ test('every route of records, in each of its statuses that a request can bring a
   await tell('GET', `${record}/caps/{mark}`, { id, mark: 'A1' })
   await tell('GET', `${record}/caps/{mark}`, { id, mark: 'A1', query: '?trace=none' })
   await tell('GET', `${record}/caps/{mark}`, { id, mark: 'none' })
+  const piles = ['/piles', '/piles.csv'].map((rest) => record + rest)
+  for (const path of piles) {
+    const { headers } = await tell('GET', path, { id })
+    await tell('GET', path, { id }, { headers: { 'if-none-match': headers.etag } })
+  }
+  for (const path of [...piles, `${record}/sheet`, `${record}/caps/{mark}/sheet`, `${project}/plan`]) {
+    const at = { id, slug, mark: 'A1' }
+    await tell('GET', path, at, { headers: path.endsWith('.csv') ? {} : { accept: 'text/html' } })
+    await tell('GET', path, at, { headers: { accept: 'application/json' } })
+    await tell('GET', path, { ...at, query: '?x=1' })
+    await tell('GET', path, { id: 'none', slug: 'none', mark: 'A1' })
+  }
   const signature = paths[`${record}/signatures`]!.post!.requestBody!.content['application/json']!.example
   await tell('POST', `${record}/signatures`, { id }, json(signature))
   await tell('POST', `${record}/signatures`, { id }, json(signature))

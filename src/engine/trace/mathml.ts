@@ -53,8 +53,14 @@ const quantity = ({ value, unit }: { value: number; unit: UnitCode }) => texQuan
 const bracketed = (tex: string) => `\\left(${tex}\\right)`
 const list = (operands: readonly OperandLine[]) => operands.map(quantity).join(',\\; ')
 
+type Writing = { readonly tex: string; readonly power: boolean }
+const asRounded = (operand: OperandLine): Writing => {
+  const tex = quantity(operand)
+  return { tex, power: tex.includes('^') }
+}
+
 /** A number put in place of a symbol needs brackets where its sign, unit or power of ten would read wrongly. */
-function numbers(root: MathNode, operands: readonly OperandLine[]): Symbols {
+function numbers(root: MathNode, operands: readonly OperandLine[], write: (o: OperandLine) => Writing): Symbols {
   const values = new Map(operands.map((o) => [o.symbol, o]))
   const bare = new Set<MathNode>()
   const powered = new Set<MathNode>()
@@ -67,8 +73,8 @@ function numbers(root: MathNode, operands: readonly OperandLine[]): Symbols {
   return (name, node) => {
     const operand = values.get(name)
     if (!operand) return texSymbol(name)
-    const tex = quantity(operand)
-    const compound = powered.has(node) && (operand.unit !== '1' || tex.includes('^'))
+    const { tex, power } = write(operand)
+    const compound = powered.has(node) && (operand.unit !== '1' || power)
     return compound || (operand.value < 0 && !bare.has(node)) ? bracketed(tex) : tex
   }
 }
@@ -77,7 +83,7 @@ function texOperands(step: Step): string | undefined {
   switch (step.kind) {
     case 'formula': {
       const root = parsed(step.formula)
-      return texFormula(root, numbers(root, step.operands)).trim()
+      return texFormula(root, numbers(root, step.operands, asRounded)).trim()
     }
     case 'sum':
       return step.operands.map((o, i) => (o.value < 0 && i > 0 ? bracketed(quantity(o)) : quantity(o))).join(' + ')
@@ -103,4 +109,30 @@ export function stepMathml(step: Step): string {
   const parts = [texSymbol(step.symbol), ...(middle === undefined ? [] : [middle]), quantity(step)]
   // A formula without arithmetic (`c_u`, `4 m`) would print its value twice.
   return render(parts.filter((part, i) => i === 0 || part !== parts[i - 1]).join(' = '))
+}
+
+const slotted = new Map<string, readonly string[]>()
+/** Formulas come from declarations, signs and powers are few: the bound only stands against traces that were made up. */
+const MOST_SLOTTED = 2000
+
+/**
+ * The right side of a formula with places for its numbers: pieces of MathML, in turn a text and the index of the operand that
+ * stands after it. `powers` says which numbers will be written with a power of ten. Typesetting costs half a millisecond, so
+ * the pieces are kept: all steps of one declaration with the same signs share them.
+ */
+export function slottedMathml(
+  formula: string,
+  operands: readonly OperandLine[],
+  powers: readonly boolean[],
+): readonly string[] {
+  const shape = operands.map((o, i) => `${o.symbol} ${o.unit} ${o.value < 0} ${powers[i]}`)
+  const key = [formula, ...shape].join('|')
+  const known = slotted.get(key)
+  if (known) return known
+  const index = new Map(operands.map((o, i) => [o.symbol, i]))
+  const root = parsed(formula)
+  const write = (o: OperandLine) => ({ tex: `\\text{@${index.get(o.symbol)}@}`, power: powers[index.get(o.symbol)!]! })
+  const pieces = render(texFormula(root, numbers(root, operands, write))).split(/<mtext[^>]*>@(\d+)@<\/mtext>/)
+  if (slotted.size < MOST_SLOTTED) slotted.set(key, pieces)
+  return pieces
 }

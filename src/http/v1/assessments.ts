@@ -2,6 +2,7 @@ import multipart from '@fastify/multipart'
 import type { FastifyInstance } from 'fastify'
 import type { AssessTask } from '../../operations/assess-in-thread.ts'
 import type { Office } from '../../operations/office.ts'
+import { JSON_OR_PAGE, pageHeaders } from '../html.ts'
 import { leaves } from '../leaves.ts'
 import { optionsOf } from './calculators.ts'
 import { projectAssessments } from './project-assessments.ts'
@@ -22,10 +23,12 @@ export async function assessments(app: FastifyInstance, { assess, bodyLimit, off
   app.addContentTypeParser('application/json', { parseAs: 'string', bodyLimit }, (_request, body, done) =>
     done(null, body),
   )
-  app.post('/v1/assessments', async (request, reply) => {
+  app.post('/v1/assessments', { config: { produces: JSON_OR_PAGE } }, async (request, reply) => {
+    const page = request.accepted === 'text/html'
     const options = optionsOf(request)
     const schedule = await scheduleBody(request, bodyLimit)
-    const bytes = await assess({ ...schedule, options }, leaves(reply.raw))
+    const bytes = await assess({ ...schedule, options, page }, leaves(reply.raw))
+    if (page) return pageHeaders(reply).send(bytes)
     return reply.type('application/json; charset=utf-8').send(bytes)
   })
   projectAssessments(app, office, bodyLimit)

@@ -6,6 +6,8 @@ import { calculateBlock } from '../../operations/calculate-block.ts'
 import { calculateGroup } from '../../operations/calculate-group.ts'
 import { calculateSettlement } from '../../operations/calculate-settlement.ts'
 import { calculateSinglePile } from '../../operations/calculate-single-pile.ts'
+import { printCalculation } from '../../operations/print-calculation.ts'
+import { JSON_OR_PAGE, pageHeaders } from '../html.ts'
 
 /** `?trace=none` leaves the trace out; `?of=<pointer>` gives only the steps behind one part of the result. */
 export function optionsOf(request: FastifyRequest): Options {
@@ -19,18 +21,22 @@ export function optionsOf(request: FastifyRequest): Options {
   return { trace: trace === 'full', of, cap }
 }
 
-const routes = {
-  '/v1/single-pile': calculateSinglePile,
-  '/v1/block': calculateBlock,
-  '/v1/group': calculateGroup,
-  '/v1/settlement': calculateSettlement,
-}
+const operations = {
+  'single-pile': calculateSinglePile,
+  block: calculateBlock,
+  group: calculateGroup,
+  settlement: calculateSettlement,
+} as const
 
 /** The calculators: pure, nothing is stored. */
 export function calculators(app: FastifyInstance): void {
-  for (const [url, operation] of Object.entries(routes)) {
-    app.post(url, async (request, reply) =>
-      reply.type('application/json; charset=utf-8').send(answerText(operation(request.body, optionsOf(request)))),
-    )
+  for (const kind of Object.keys(operations) as (keyof typeof operations)[]) {
+    app.post(`/v1/${kind}`, { config: { produces: JSON_OR_PAGE } }, async (request, reply) => {
+      const options = optionsOf(request)
+      if (request.accepted === 'text/html')
+        return pageHeaders(reply).send(printCalculation(kind, request.body, options))
+      const answer = answerText(operations[kind](request.body, options))
+      return reply.type('application/json; charset=utf-8').send(answer)
+    })
   }
 }
