@@ -21,6 +21,7 @@ import { reference } from './http/reference.ts'
 import { assessments } from './http/v1/assessments.ts'
 import { calculators } from './http/v1/calculators.ts'
 import { caps } from './http/v1/caps.ts'
+import { changes } from './http/v1/changes.ts'
 import { jobs } from './http/v1/jobs.ts'
 import { projects } from './http/v1/projects.ts'
 import { storedAssessments } from './http/v1/stored-assessments.ts'
@@ -107,6 +108,7 @@ export async function buildService(config: Config, store: Store): Promise<Servic
   storedAssessments(app, office)
   jobs(app, office)
   caps(app, office)
+  changes(app, office)
   await app.register(reference, { document: openapi(readExamples()) })
   app.post('/v1/replay', async (request) => replayTrace(request.body))
   app.get('/v1/methods', async () => listMethods())

@@ -23,6 +23,7 @@ export const access: Readonly<Record<string, Access>> = {
   'GET /v1/assessments/:id/content': ['read'],
   'GET /v1/assessments/:id/caps': ['read'],
   'GET /v1/assessments/:id/caps/:mark': ['read'],
+  'GET /v1/assessments/:id/changes': ['read'],
   'GET /v1/assessments/:id/signatures': ['read'],
   'POST /v1/assessments/:id/signatures': ['read', 'sign'],
   'POST /v1/assessments/:id/reverify': ['read', 'calculate'],
