@@ -125,7 +125,11 @@ export async function buildService(config: Config, store: Store): Promise<Servic
     waitSeconds: LONGEST_WAIT,
     graphql: documentLimits,
   }))
-  await graphqlPlugin(app, { production: config.NODE_ENV === 'production', actorOf: (request) => request.actor! })
+  await graphqlPlugin(app, {
+    production: config.NODE_ENV === 'production',
+    actorOf: (request) => request.actor!,
+    office,
+  })
   await queue.start(runJob(office, app.log))
   return { app, stop, stopJobs }
 }

@@ -1,20 +1,20 @@
 import { Problem } from '../errors.ts'
 import type { Actor } from '../store/actor.ts'
 import {
+  countRecords,
   findRecords,
   type RecordFilter,
   type RecordOrder,
   type RecordPosition,
   recordPosition,
   sumRecords,
-  sumRecordsByCheck,
 } from '../store/find-records.ts'
 import type { Page } from '../store/page.ts'
 import { listName } from './cursors.ts'
 import type { Office } from './office.ts'
 import { showRecord } from './show-record.ts'
 
-export { countRecords as countAssessments, recordOrders } from '../store/find-records.ts'
+export { recordOrders } from '../store/find-records.ts'
 export type { RecordFilter, RecordOrder, RecordPosition }
 
 export const assessmentList = (filter: RecordFilter, order: RecordOrder): string =>
@@ -41,8 +41,9 @@ export async function findAssessments(
   return rows.map((row) => ({ ...showRecord(row), position: recordPosition(filter, order, row) }))
 }
 
+export const countAssessments = async ({ store }: Pick<Office, 'store'>, actor: Actor, filter: RecordFilter) =>
+  (await countRecords(store, actor, filter)).get('')!
+
 /** Counts and the largest utilisation over them, as a whole and by the check that is the worst. */
-export async function sumAssessments({ store }: Pick<Office, 'store'>, actor: Actor, filter: RecordFilter) {
-  const [sums, byWorstCheck] = [await sumRecords(store, actor, filter), await sumRecordsByCheck(store, actor, filter)]
-  return { ...sums, byWorstCheck }
-}
+export const sumAssessments = async ({ store }: Pick<Office, 'store'>, actor: Actor, filter: RecordFilter) =>
+  (await sumRecords(store, actor, filter)).get('')!

@@ -1,9 +1,11 @@
 import { type Kysely, sql } from 'kysely'
-import { type Actor, hasProject } from './actor.ts'
+import { type Actor as AnyActor, hasProject } from './actor.ts'
 import type { Store } from './open-store.ts'
 import type { Page } from './page.ts'
 import { headColumns, type RecordHead } from './read-records.ts'
 import type { Tables } from './tables.ts'
+
+type Actor = Pick<AnyActor, 'projects'>
 
 export type RecordFilter = {
   readonly project?: string
@@ -67,50 +69,95 @@ export function findRecords(
   return query.execute()
 }
 
-/** How many records there are, with how many caps; how many have caps that are exceeded, and how many. */
-export async function sumRecords({ reader }: Store, actor: Actor, filter: RecordFilter) {
-  const sums = await filtered(reader, actor, filter)
-    .select(({ fn }) => [
-      fn.countAll().as('count'),
-      fn.sum('records.caps').as('caps'),
-      fn.sum('records.exceeded').as('capsExceeded'),
-      sql<number>`sum(case when records.exceeded > 0 then 1 else 0 end)`.as('exceeded'),
-      fn.max('records.worst_utilisation').as('largest'),
-    ])
-    .executeTakeFirstOrThrow()
-  return {
-    assessments: Number(sums.count),
-    exceeded: Number(sums.exceeded ?? 0),
-    caps: Number(sums.caps ?? 0),
-    capsExceeded: Number(sums.capsExceeded ?? 0),
-    largestUtilisation: sums.largest,
+type Sums = {
+  readonly count: number
+  readonly exceeded: number
+  readonly caps: number
+  readonly capsExceeded: number
+  readonly largestUtilisation: number | null
+}
+export type CheckSums = Pick<Sums, 'count' | 'exceeded'> & {
+  readonly check: string
+  readonly largestUtilisation: number
+}
+export type RecordSums = Sums & { readonly byWorstCheck: readonly CheckSums[] }
+
+/**
+ * Counts and the largest utilisation over the records of the filter, as a whole and by the check that is a record's worst: of each
+ * of some projects (by slug), or of all together (by an empty name).
+ */
+export async function sumRecords(
+  { reader }: Store,
+  actor: Actor,
+  filter: RecordFilter,
+  projects?: readonly string[],
+): Promise<ReadonlyMap<string, RecordSums>> {
+  const of = projects ? sql<string>`records.project` : sql<string>`''`
+  let query = filtered(reader, actor, filter).select(({ fn }) => [
+    of.as('of'),
+    'records.worst_check as check',
+    fn.countAll().as('count'),
+    fn.sum('records.caps').as('caps'),
+    fn.sum('records.exceeded').as('capsExceeded'),
+    sql<number>`sum(case when records.exceeded > 0 then 1 else 0 end)`.as('exceeded'),
+    fn.max('records.worst_utilisation').as('largest'),
+  ])
+  if (projects) query = query.where('records.project', 'in', projects).groupBy('records.project')
+  const rows = await query.groupBy('records.worst_check').orderBy('records.worst_check').execute()
+  const none: RecordSums = {
+    count: 0,
+    exceeded: 0,
+    caps: 0,
+    capsExceeded: 0,
+    largestUtilisation: null,
+    byWorstCheck: [],
   }
+  const sums = new Map((projects ?? ['']).map((slug) => [slug, none]))
+  for (const row of rows) {
+    const [count, exceeded, before] = [Number(row.count), Number(row.exceeded), sums.get(row.of)!]
+    const largest =
+      row.largest === null ? null : { check: row.check!, count, exceeded, largestUtilisation: row.largest }
+    sums.set(row.of, {
+      count: before.count + count,
+      exceeded: before.exceeded + exceeded,
+      caps: before.caps + Number(row.caps),
+      capsExceeded: before.capsExceeded + Number(row.capsExceeded),
+      largestUtilisation:
+        row.largest === null ? before.largestUtilisation : Math.max(before.largestUtilisation ?? 0, row.largest),
+      byWorstCheck: largest ? [...before.byWorstCheck, largest] : before.byWorstCheck,
+    })
+  }
+  return sums
 }
 
-export async function countRecords({ reader }: Store, actor: Actor, filter: RecordFilter): Promise<number> {
-  const { count } = await filtered(reader, actor, filter)
-    .select(({ fn }) => fn.countAll().as('count'))
-    .executeTakeFirstOrThrow()
-  return Number(count)
+/** How many records the filter lets through, of each of some projects or of all together. */
+export async function countRecords(store: Store, actor: Actor, filter: RecordFilter, projects?: readonly string[]) {
+  let query = filtered(store.reader, actor, filter).select(({ fn }) => [
+    (projects ? sql<string>`records.project` : sql<string>`''`).as('of'),
+    fn.countAll().as('count'),
+  ])
+  if (projects) query = query.where('records.project', 'in', projects).groupBy('records.project')
+  return new Map((await query.execute()).map((row) => [row.of, Number(row.count)]))
 }
 
-/** Records by the check that is their worst: how many, how many of them exceeded, and the largest utilisation. */
-export async function sumRecordsByCheck({ reader }: Store, actor: Actor, filter: RecordFilter) {
-  const rows = await filtered(reader, actor, filter)
-    .select(({ fn }) => [
-      'records.worst_check as check',
-      fn.countAll().as('count'),
-      sql<number>`sum(case when records.exceeded > 0 then 1 else 0 end)`.as('exceeded'),
-      fn.max('records.worst_utilisation').as('largest'),
-    ])
-    .where('records.worst_check', 'is not', null)
-    .groupBy('records.worst_check')
-    .orderBy('records.worst_check')
-    .execute()
-  return rows.map(({ check, count, exceeded, largest }) => ({
-    check: check!,
-    count: Number(count),
-    exceeded: Number(exceeded),
-    largestUtilisation: largest!,
-  }))
+/** The same page of the records of each project, in one query. The actor has a right to them. */
+export async function findRecordsOf(
+  store: Store,
+  projects: readonly string[],
+  filter: Omit<RecordFilter, 'project'>,
+  order: RecordOrder,
+  page: Page<RecordPosition>,
+): Promise<RecordHead[]> {
+  const everybody = { projects: ['*'] }
+  const [only] = projects
+  if (projects.length === 1) return findRecords(store, everybody, { ...filter, project: only! }, order, page)
+  const key = order === 'utilisation' ? sql`${rank} desc, records.id desc` : sql`records.revision`
+  const sorted = order === 'newest' ? sql`${key} desc` : key
+  const place = sql<number>`row_number() over (partition by records.project order by ${sorted})`
+  const rows = filtered(store.reader, everybody, filter)
+    .select(columns)
+    .select(place.as('place'))
+    .where('records.project', 'in', projects)
+  const list = store.reader.selectFrom(rows.as('page')).selectAll().where('place', '<=', page.limit)
+  return (await list.orderBy('project').orderBy('place').execute()).map(({ place, ...row }) => row)
 }
