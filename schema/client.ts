@@ -23,7 +23,15 @@ export type ClientOptions = Partial<Patience> & {
 export type RecordOptions = { readonly idempotencyKey?: string }
 
 type Trace = { readonly trace?: 'none'; readonly of?: string; readonly cap?: string }
-type CapQuery = { readonly check?: string; readonly utilisationAtLeast?: string; readonly exceeded?: 'true' | 'false' }
+type CapQuery = {
+  readonly check?: string
+  readonly utilisationAtLeast?: string
+  readonly exceeded?: 'true' | 'false'
+  readonly ground?: string
+  readonly pileType?: string
+  readonly mark?: string
+  readonly order?: 'schedule' | 'mark' | 'utilisation' | 'settlement'
+}
 
 function formOf(schedule: object, loads: string | Blob): FormData {
   const form = new FormData()
@@ -137,6 +145,11 @@ export function kentledge({ baseUrl, key, retries = 3, fetch: base = globalThis.
     cap: async (id: string, mark: string, query: Pick<Trace, 'trace'> = {}) =>
       taken<'CapReply'>(
         await client.GET('/v1/assessments/{id}/caps/{mark}', { params: { path: { id, mark }, query } }),
+      ),
+    /** What differs from another revision of the project; without `since` from the one right before. */
+    changes: async (id: string, since?: string) =>
+      taken<'ChangesReply'>(
+        await client.GET('/v1/assessments/{id}/changes', { params: { path: { id }, query: { since } } }),
       ),
     sign: async (id: string, body: Schemas['SignatureRequest']) =>
       taken<'Signature'>(await client.POST('/v1/assessments/{id}/signatures', { body, params: { path: { id } } })),

@@ -23,6 +23,17 @@ export async function resolverTypes(): Promise<string> {
       enumsAsTypes: true,
       immutableTypes: true,
       contextType: './context.ts#Context',
+      mappers: {
+        Project: '../operations/put-project.ts#ShownProject',
+        Assessment: '../operations/show-record.ts#ShownRecord',
+        Cap: '../operations/read-many.ts#CapNode',
+        Changes: '../operations/changes-in-thread.ts#ToldChanges',
+        CapAggregates: './nodes.ts#AggregateNode',
+        ProjectConnection: './nodes.ts#ProjectConnectionNode',
+        AssessmentConnection: './nodes.ts#AssessmentConnectionNode',
+        CapConnection: './nodes.ts#CapConnectionNode',
+        NeighbourConnection: './nodes.ts#NeighbourConnectionNode',
+      },
       scalars: {
         Quantity: 'number | string',
         Varying: 'unknown',

@@ -299,7 +299,7 @@ export interface paths {
             readonly path?: never;
             readonly cookie?: never;
         };
-        /** Caps of a record as flat rows, in the order of its schedule */
+        /** Caps of a record as flat rows */
         readonly get: operations["listCaps"];
         readonly put?: never;
         readonly post?: never;
@@ -318,6 +318,23 @@ export interface paths {
         };
         /** One cap of a record: checks, settlement, stiffness, and the trace behind them */
         readonly get: operations["getCap"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/assessments/{id}/changes": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** What differs from another revision: verdicts that turned, caps and what governs them, inputs by pointer */
+        readonly get: operations["listChanges"];
         readonly put?: never;
         readonly post?: never;
         readonly delete?: never;
@@ -1921,6 +1938,190 @@ export interface components {
             };
             /** @description pointers lead into `result` of the content */
             readonly trace?: components["schemas"]["Trace"];
+        };
+        readonly ChangesReply: {
+            readonly before: components["schemas"]["Assessment"];
+            readonly after: components["schemas"]["Assessment"];
+            /** @description of all changes, also where a list is cut */
+            readonly counts: {
+                readonly turnedExceeded: number;
+                readonly turnedSatisfied: number;
+                readonly caps: number;
+                readonly added: number;
+                readonly gone: number;
+                readonly neighbours: number;
+                readonly inputs: {
+                    readonly [key: string]: number;
+                };
+            };
+            /** @description checks whose verdict turned, of a cap or of a pair of neighbours; those now exceeded first */
+            readonly verdicts: readonly {
+                readonly cap?: string;
+                readonly a?: string;
+                readonly b?: string;
+                /** @enum {string} */
+                readonly check: "pile-compression" | "pile-uplift" | "group-compression" | "block-compression" | "group-uplift" | "block-uplift" | "pile-section" | "settlement" | "tilt" | "angular-distortion";
+                readonly before?: {
+                    readonly combination: string;
+                    /** @description demand over resistance */
+                    readonly utilisation: number;
+                    readonly satisfied: boolean;
+                };
+                readonly after?: {
+                    readonly combination: string;
+                    /** @description demand over resistance */
+                    readonly utilisation: number;
+                    readonly satisfied: boolean;
+                };
+                /** @description utilisation after less before */
+                readonly by?: number;
+                /** @enum {string} */
+                readonly turned: "exceeded" | "satisfied";
+            }[];
+            readonly caps: readonly {
+                readonly mark: string;
+                /** @description into schedule and result */
+                readonly pointer: {
+                    readonly before: string;
+                    readonly after: string;
+                };
+                /**
+                 * @description where the verdict of the whole cap turned
+                 * @enum {string}
+                 */
+                readonly turned?: "exceeded" | "satisfied";
+                readonly governing: {
+                    readonly before?: {
+                        /** @enum {string} */
+                        readonly check: "pile-compression" | "pile-uplift" | "group-compression" | "block-compression" | "group-uplift" | "block-uplift" | "pile-section" | "settlement" | "tilt" | "angular-distortion";
+                        readonly combination: string;
+                        /** @description demand over resistance */
+                        readonly utilisation: number;
+                        readonly satisfied: boolean;
+                    };
+                    readonly after?: {
+                        /** @enum {string} */
+                        readonly check: "pile-compression" | "pile-uplift" | "group-compression" | "block-compression" | "group-uplift" | "block-uplift" | "pile-section" | "settlement" | "tilt" | "angular-distortion";
+                        readonly combination: string;
+                        /** @description demand over resistance */
+                        readonly utilisation: number;
+                        readonly satisfied: boolean;
+                    };
+                };
+                readonly governingChanged: boolean;
+                /** @description utilisation after less before */
+                readonly by?: number;
+                /** @description those that changed */
+                readonly checks: readonly {
+                    /** @enum {string} */
+                    readonly check: "pile-compression" | "pile-uplift" | "group-compression" | "block-compression" | "group-uplift" | "block-uplift" | "pile-section" | "settlement" | "tilt" | "angular-distortion";
+                    readonly before?: {
+                        readonly combination: string;
+                        /** @description demand over resistance */
+                        readonly utilisation: number;
+                        readonly satisfied: boolean;
+                    };
+                    readonly after?: {
+                        readonly combination: string;
+                        /** @description demand over resistance */
+                        readonly utilisation: number;
+                        readonly satisfied: boolean;
+                    };
+                    /** @description utilisation after less before */
+                    readonly by?: number;
+                }[];
+                readonly settlement?: {
+                    /** @description largest over the combinations */
+                    readonly before?: number;
+                    /** @description largest over the combinations */
+                    readonly after?: number;
+                    /** @description after less before */
+                    readonly by?: number;
+                };
+                readonly verticalStiffness?: {
+                    /** @description of the cap */
+                    readonly before?: number;
+                    /** @description of the cap */
+                    readonly after?: number;
+                    /** @description after less before */
+                    readonly by?: number;
+                };
+            }[];
+            readonly added: readonly {
+                readonly mark: string;
+                /** @description into the schedule that has it */
+                readonly pointer: string;
+                readonly exceeded: boolean;
+                readonly governing?: {
+                    /** @enum {string} */
+                    readonly check: "pile-compression" | "pile-uplift" | "group-compression" | "block-compression" | "group-uplift" | "block-uplift" | "pile-section" | "settlement" | "tilt" | "angular-distortion";
+                    readonly combination: string;
+                    /** @description demand over resistance */
+                    readonly utilisation: number;
+                    readonly satisfied: boolean;
+                };
+            }[];
+            readonly gone: readonly {
+                readonly mark: string;
+                /** @description into the schedule that has it */
+                readonly pointer: string;
+                readonly exceeded: boolean;
+                readonly governing?: {
+                    /** @enum {string} */
+                    readonly check: "pile-compression" | "pile-uplift" | "group-compression" | "block-compression" | "group-uplift" | "block-uplift" | "pile-section" | "settlement" | "tilt" | "angular-distortion";
+                    readonly combination: string;
+                    /** @description demand over resistance */
+                    readonly utilisation: number;
+                    readonly satisfied: boolean;
+                };
+            }[];
+            readonly neighbours: readonly {
+                readonly a: string;
+                readonly b: string;
+                /** @enum {string} */
+                readonly check: "pile-compression" | "pile-uplift" | "group-compression" | "block-compression" | "group-uplift" | "block-uplift" | "pile-section" | "settlement" | "tilt" | "angular-distortion";
+                readonly before?: {
+                    readonly combination: string;
+                    /** @description demand over resistance */
+                    readonly utilisation: number;
+                    readonly satisfied: boolean;
+                };
+                readonly after?: {
+                    readonly combination: string;
+                    /** @description demand over resistance */
+                    readonly utilisation: number;
+                    readonly satisfied: boolean;
+                };
+                /** @description utilisation after less before */
+                readonly by?: number;
+                readonly angularDistortion: {
+                    /** @description of the pair */
+                    readonly before?: number;
+                    /** @description of the pair */
+                    readonly after?: number;
+                    /** @description after less before */
+                    readonly by?: number;
+                };
+            }[];
+            readonly inputs: readonly {
+                /** @enum {string} */
+                readonly part: "reaction" | "combination" | "signs" | "ground" | "pile-type" | "cap" | "layout" | "limit" | "method" | "design-basis" | "title";
+                /** @description mark, ground profile, pile type or combination; empty: of the whole schedule */
+                readonly name: string;
+                readonly combination?: string;
+                readonly layer?: string;
+                /** @description into the schedule of each side */
+                readonly pointer: {
+                    readonly before?: string;
+                    readonly after?: string;
+                };
+                readonly field: string;
+                readonly before?: unknown;
+                readonly after?: unknown;
+                /** @description after less before */
+                readonly by?: number;
+                readonly unit?: string;
+            }[];
         };
         readonly Signature: {
             readonly id: string;
@@ -4815,6 +5016,14 @@ export interface operations {
                 readonly utilisationAtLeast?: string;
                 /** @description `true` or `false` */
                 readonly exceeded?: string;
+                /** @description Only caps on this ground profile */
+                readonly ground?: string;
+                /** @description Only caps on piles of this type */
+                readonly pileType?: string;
+                /** @description Only caps whose mark contains this */
+                readonly mark?: string;
+                /** @description `schedule` (as without), `mark`, or largest first by `utilisation` or `settlement` */
+                readonly order?: string;
             };
             readonly header?: {
                 /** @description ETag of what the client holds: 304 where nothing changed */
@@ -5008,6 +5217,116 @@ export interface operations {
             };
             /** @description The service or its store is busy or stopping; try again */
             readonly 503: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly listChanges: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description Id of another revision of the project; without it the one right before */
+                readonly since?: string;
+            };
+            readonly header?: {
+                /** @description ETag of what the client holds: 304 where nothing changed */
+                readonly "If-None-Match"?: string;
+            };
+            readonly path: {
+                /** @description The assessment */
+                readonly id: string;
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description The changes */
+            readonly 200: {
+                headers: {
+                    /** @description Strong: the same bytes have the same tag */
+                    readonly ETag?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["ChangesReply"];
+                };
+            };
+            /** @description The client holds it already */
+            readonly 304: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description No valid key */
+            readonly 401: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The key lacks a scope */
+            readonly 403: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description No such assessment, or none that the key has a right to */
+            readonly 404: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The route answers in no accepted type */
+            readonly 406: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The assessment is not completed */
+            readonly 409: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description A parameter or the request is invalid */
+            readonly 422: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The service or its store is busy or stopping; try again */
+            readonly 503: {
+                headers: {
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description The work took longer than the service allows */
+            readonly 504: {
                 headers: {
                     readonly [name: string]: unknown;
                 };

@@ -22,6 +22,7 @@ import { reference } from './http/reference.ts'
 import { assessments } from './http/v1/assessments.ts'
 import { calculators } from './http/v1/calculators.ts'
 import { caps } from './http/v1/caps.ts'
+import { changes } from './http/v1/changes.ts'
 import { jobs } from './http/v1/jobs.ts'
 import { projects } from './http/v1/projects.ts'
 import { recordPages } from './http/v1/record-pages.ts'
@@ -111,6 +112,7 @@ export async function buildService(config: Config, store: Store): Promise<Servic
   caps(app, office)
   recordPages(app, office)
   await pageScripts(app)
+  changes(app, office)
   await app.register(reference, { document: openapi(readExamples()) })
   app.post('/v1/replay', async (request) => replayTrace(request.body))
   app.get('/v1/methods', async () => listMethods())
@@ -127,7 +129,11 @@ export async function buildService(config: Config, store: Store): Promise<Servic
     waitSeconds: LONGEST_WAIT,
     graphql: documentLimits,
   }))
-  await graphqlPlugin(app, { production: config.NODE_ENV === 'production', actorOf: (request) => request.actor! })
+  await graphqlPlugin(app, {
+    production: config.NODE_ENV === 'production',
+    actorOf: (request) => request.actor!,
+    office,
+  })
   await queue.start(runJob(office, app.log))
   return { app, stop, stopJobs }
 }

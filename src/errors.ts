@@ -46,6 +46,7 @@ type Contract =
   | 'no-such-cap'
   | 'no-assessment-yet'
   | 'bad-cursor'
+  | 'not-comparable'
   | 'bad-project-slug'
   | 'precondition-failed'
   | 'precondition-required'
@@ -329,6 +330,13 @@ export const catalogue: Readonly<Record<ErrorCode, ErrorEntry>> = {
     'The cursor does not belong to this list.',
     'A cursor was changed, or comes from a list with other filters.',
     'Start again without a cursor.',
+  ),
+  'not-comparable': entry(
+    422,
+    'Not comparable',
+    'The assessment cannot be compared: {reason}.',
+    'Changes are told between two revisions of one project.',
+    'Send `since` with the id of another revision of the same project.',
   ),
   'bad-project-slug': entry(
     422,

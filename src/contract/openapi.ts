@@ -1,5 +1,6 @@
 import { z } from 'zod'
 import { engineVersion } from '../engine/index.ts'
+import { changesReply } from './changes-reply.ts'
 import { header, inPath, json, problem, query, scheduleForm, schemaRef } from './openapi-parts.ts'
 import { pagePaths } from './page-paths.ts'
 import { designBasis, groundProfile, layout, pileType } from './parts.ts'
@@ -54,6 +55,7 @@ const answers = {
   CapRow: stored.capRow,
   CapList: stored.capList,
   CapReply: stored.capReply,
+  ChangesReply: changesReply,
   Signature: stored.signature,
   SignatureList: stored.signatureList,
   IntegrityReply: stored.integrityReply,

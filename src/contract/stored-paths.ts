@@ -199,7 +199,7 @@ export const storedPaths = (examples: Readonly<Record<string, unknown>>) => ({
   '/v1/assessments/{id}/caps': {
     get: {
       operationId: 'listCaps',
-      summary: 'Caps of a record as flat rows, in the order of its schedule',
+      summary: 'Caps of a record as flat rows',
       tags: ['records'],
       parameters: [
         id,
@@ -207,6 +207,10 @@ export const storedPaths = (examples: Readonly<Record<string, unknown>>) => ({
         query('check', 'Only caps with this kind of check, to which the other filters then refer'),
         query('utilisationAtLeast', 'Only caps whose utilisation is at least this'),
         query('exceeded', '`true` or `false`'),
+        query('ground', 'Only caps on this ground profile'),
+        query('pileType', 'Only caps on piles of this type'),
+        query('mark', 'Only caps whose mark contains this'),
+        query('order', '`schedule` (as without), `mark`, or largest first by `utilisation` or `settlement`'),
         ifNoneMatch,
       ],
       responses: {
@@ -231,6 +235,20 @@ export const storedPaths = (examples: Readonly<Record<string, unknown>>) => ({
       tags: ['records'],
       parameters: [id, inPath('mark', 'Mark of the cap'), query('trace', '`none` leaves the trace out'), ifNoneMatch],
       responses: { '200': json('CapReply', 'The cap', tag), ...notModified, ...noRecord, ...refusals },
+    },
+  },
+  '/v1/assessments/{id}/changes': {
+    get: {
+      operationId: 'listChanges',
+      summary:
+        'What differs from another revision: verdicts that turned, caps and what governs them, inputs by pointer',
+      tags: ['records'],
+      parameters: [
+        id,
+        query('since', 'Id of another revision of the project; without it the one right before'),
+        ifNoneMatch,
+      ],
+      responses: { '200': json('ChangesReply', 'The changes', tag), ...notModified, ...noRecord, ...refusals, ...late },
     },
   },
   '/v1/assessments/{id}/signatures': {

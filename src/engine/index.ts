@@ -1,5 +1,7 @@
 /** The engine's only door. */
 export { assess } from './assessment/assess.ts'
+export { changedParts } from './assessment/changes/changed-inputs.ts'
+export { type Assessed, type Changes, changes } from './assessment/changes/changes.ts'
 export { type Answer, calculateBlock, calculateGroup, calculateSettlement, calculateSinglePile } from './calculators.ts'
 export { methodCards } from './catalogue.ts'
 export { EngineFault } from './faults.ts'

@@ -1,6 +1,8 @@
 import type { FastifyInstance, FastifyReply, FastifyRequest } from 'fastify'
 import type { GraphQLFormattedError } from 'graphql'
+import type { Office } from '../operations/office.ts'
 import type { Actor } from '../operations/rights.ts'
+import { contextOf } from './context.ts'
 import { type FormatOptions, formatError } from './error-format.ts'
 import { judgeVariables } from './judge-variables.ts'
 import { type GraphqlMediaType, legacy, modern, negotiate } from './media-type.ts'
@@ -33,7 +35,7 @@ const textOf = ({ query, operationName }: GraphqlRequest) =>
 async function run(
   app: FastifyInstance,
   request: GraphqlRequest,
-  options: FormatOptions,
+  options: RouteOptions,
   actor: Actor,
 ): Promise<Answer> {
   const refused = refuseJson(request.query)
@@ -41,7 +43,7 @@ async function run(
   try {
     const { data, errors } = await app.graphql(
       textOf(request),
-      { actor },
+      contextOf(options.office, actor, request.operationName) as never,
       { ...request.variables },
       request.operationName,
     )
@@ -62,6 +64,7 @@ async function run(
 export type RouteOptions = FormatOptions & {
   /** Who asks. */
   readonly actorOf: (request: FastifyRequest) => Actor
+  readonly office: Office
 }
 
 export function graphqlRoute(app: FastifyInstance, options: RouteOptions): void {

@@ -5,14 +5,27 @@ export const limits = {
   /** Aliases, a fragment counted wherever it is spread. */
   aliases: 30,
   tokens: 2_000,
-  /** Sum of `rootCosts`. */
-  cost: 100,
+  /** Objects of the answer, as many as its lists may hold, and `fieldCosts`. */
+  cost: 10_000,
   /** Characters of a document: one token may be a very long string, and parsed documents are kept. */
   characters: 32_768,
 } as const
 
-/** Cost of a field at the root, about its computing time; one that is not listed costs 1. */
-export const rootCosts: Readonly<Record<string, number>> = { singlePile: 5, block: 5, group: 10, settlement: 10 }
+/** Cost of a field that takes longer than an object of an answer, about its computing time; any other with fields of its own costs 1. */
+export const fieldCosts: Readonly<Record<string, number>> = {
+  'Query.singlePile': 475,
+  'Query.block': 475,
+  'Query.group': 950,
+  'Query.settlement': 950,
+  'Assessment.changes': 950,
+  'Assessment.aggregates': 50,
+  'AssessmentConnection.aggregates': 200,
+  'Cap.trace': 475,
+}
+
+/** Members of a list that is no page, where they are known; of any other. */
+export const listSizes: Readonly<Record<string, number>> = { 'Cap.checks': 9, 'Assessment.signatures': 3 }
+export const LIST = 10
 
 /** Parsed and compiled documents that are kept. */
 export const cachedDocuments = 256

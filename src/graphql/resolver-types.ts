@@ -3,9 +3,15 @@
 // biome-ignore-all format: generated
 // biome-ignore-all assist: generated
 import type { GraphQLResolveInfo, GraphQLScalarType, GraphQLScalarTypeConfig } from 'graphql';
+import type { ShownProject } from '../operations/put-project.ts';
+import type { ShownRecord } from '../operations/show-record.ts';
+import type { CapNode } from '../operations/read-many.ts';
+import type { ToldChanges } from '../operations/changes-in-thread.ts';
+import type { AggregateNode, ProjectConnectionNode, AssessmentConnectionNode, CapConnectionNode, NeighbourConnectionNode } from './nodes.ts';
 import type { Context } from './context.ts';
 export type Maybe<T> = T | null;
 export type InputMaybe<T> = Maybe<T>;
+export type Omit<T, K extends keyof T> = Pick<T, Exclude<keyof T, K>>;
 export type RequireFields<T, K extends keyof T> = Omit<T, K> & { [P in K]-?: NonNullable<T[P]> };
 /** All built-in and custom scalars, mapped to their actual values */
 export type Scalars = {
@@ -28,6 +34,14 @@ export type Scalars = {
 
 export type Query = {
   readonly __typename?: 'Query';
+  /** Projects that the key has a right to, by slug. */
+  readonly projects: ProjectConnection;
+  /** One project; an error where there is none, or the key has no right to it. */
+  readonly project?: Maybe<Project>;
+  /** Assessments of every project that the key has a right to, as one flat list. */
+  readonly assessments: AssessmentConnection;
+  /** One assessment; an error where there is none, or the key has no right to it. */
+  readonly assessment?: Maybe<Assessment>;
   /** Resistance of one pile in compression or uplift. */
   readonly singlePile: SinglePileAnswer;
   /** Resistance of the prism of soil and piles that a layout encloses. */
@@ -44,6 +58,34 @@ export type Query = {
   readonly sources: ReadonlyArray<Source>;
   /** What this endpoint accepts. */
   readonly limits: Limits;
+};
+
+
+export type QueryProjectsArgs = {
+  first?: InputMaybe<Scalars['Int']['input']>;
+  after?: InputMaybe<Scalars['String']['input']>;
+};
+
+
+export type QueryProjectArgs = {
+  slug: Scalars['String']['input'];
+};
+
+
+export type QueryAssessmentsArgs = {
+  project?: InputMaybe<Scalars['String']['input']>;
+  from?: InputMaybe<Scalars['String']['input']>;
+  to?: InputMaybe<Scalars['String']['input']>;
+  exceeded?: InputMaybe<Scalars['Boolean']['input']>;
+  latest?: InputMaybe<Scalars['Boolean']['input']>;
+  order?: InputMaybe<AssessmentOrder>;
+  first?: InputMaybe<Scalars['Int']['input']>;
+  after?: InputMaybe<Scalars['String']['input']>;
+};
+
+
+export type QueryAssessmentArgs = {
+  id: Scalars['ID']['input'];
 };
 
 
@@ -676,7 +718,7 @@ export type Limits = {
   readonly aliases: Scalars['Int']['output'];
   /** Tokens of a document. */
   readonly tokens: Scalars['Int']['output'];
-  /** Sum of the costs of the fields at the root. */
+  /** Objects of an answer, as many as its lists may hold; a calculator, a trace and a comparison count as hundreds. */
   readonly cost: Scalars['Int']['output'];
   /** Bytes of a request. */
   readonly bodyBytes: Scalars['Int']['output'];
@@ -684,6 +726,469 @@ export type Limits = {
   readonly layers: Scalars['Int']['output'];
   /** Piles of a layout. */
   readonly pilesPerCap: Scalars['Int']['output'];
+};
+
+export type AssessmentOrder =
+  | 'oldest'
+  | 'newest'
+  /** The largest utilisation first. */
+  | 'utilisation';
+
+export type CapOrder =
+  /** As the schedule has them. */
+  | 'schedule'
+  | 'mark'
+  /** The largest utilisation first; with check, that of this check. */
+  | 'utilisation'
+  /** The largest settlement first. */
+  | 'settlement';
+
+export type NeighbourOrder =
+  | 'schedule'
+  /** The largest angular distortion first. */
+  | 'distortion';
+
+export type PageInfo = {
+  readonly __typename?: 'PageInfo';
+  readonly hasNextPage: Scalars['Boolean']['output'];
+  /** Of the last row. */
+  readonly endCursor?: Maybe<Scalars['String']['output']>;
+};
+
+export type ProjectConnection = {
+  readonly __typename?: 'ProjectConnection';
+  readonly nodes: ReadonlyArray<Project>;
+  readonly edges: ReadonlyArray<ProjectEdge>;
+  readonly pageInfo: PageInfo;
+  readonly totalCount: Scalars['Int']['output'];
+};
+
+export type ProjectEdge = {
+  readonly __typename?: 'ProjectEdge';
+  readonly cursor: Scalars['String']['output'];
+  readonly node: Project;
+};
+
+export type Project = {
+  readonly __typename?: 'Project';
+  readonly slug: Scalars['String']['output'];
+  readonly title: Scalars['String']['output'];
+  readonly createdAt: Scalars['String']['output'];
+  readonly updatedAt: Scalars['String']['output'];
+  /** Number of its newest assessment; 0 before the first. */
+  readonly revision: Scalars['Int']['output'];
+  /** The newest assessment. */
+  readonly latest?: Maybe<Assessment>;
+  /** Its assessments: the revisions. */
+  readonly assessments: AssessmentConnection;
+};
+
+
+export type ProjectAssessmentsArgs = {
+  from?: InputMaybe<Scalars['String']['input']>;
+  to?: InputMaybe<Scalars['String']['input']>;
+  exceeded?: InputMaybe<Scalars['Boolean']['input']>;
+  order?: InputMaybe<AssessmentOrder>;
+  first?: InputMaybe<Scalars['Int']['input']>;
+  after?: InputMaybe<Scalars['String']['input']>;
+};
+
+export type AssessmentConnection = {
+  readonly __typename?: 'AssessmentConnection';
+  readonly nodes: ReadonlyArray<Assessment>;
+  readonly edges: ReadonlyArray<AssessmentEdge>;
+  readonly pageInfo: PageInfo;
+  readonly totalCount: Scalars['Int']['output'];
+  /** Over all of the list, not only its page. */
+  readonly aggregates: AssessmentAggregates;
+};
+
+export type AssessmentEdge = {
+  readonly __typename?: 'AssessmentEdge';
+  readonly cursor: Scalars['String']['output'];
+  readonly node: Assessment;
+};
+
+export type AssessmentAggregates = {
+  readonly __typename?: 'AssessmentAggregates';
+  /** Assessments. */
+  readonly count: Scalars['Int']['output'];
+  /** Assessments with an exceeded cap. */
+  readonly exceeded: Scalars['Int']['output'];
+  readonly caps: Scalars['Int']['output'];
+  readonly capsExceeded: Scalars['Int']['output'];
+  readonly largestUtilisation?: Maybe<Scalars['Float']['output']>;
+  /** By the check that is the worst of its assessment. */
+  readonly byWorstCheck: ReadonlyArray<WorstCheckAggregate>;
+};
+
+export type WorstCheckAggregate = {
+  readonly __typename?: 'WorstCheckAggregate';
+  readonly check: Scalars['String']['output'];
+  readonly count: Scalars['Int']['output'];
+  readonly exceeded: Scalars['Int']['output'];
+  readonly largestUtilisation: Scalars['Float']['output'];
+};
+
+/** A record: one run of all checks for a schedule. It never changes. */
+export type Assessment = {
+  readonly __typename?: 'Assessment';
+  readonly id: Scalars['ID']['output'];
+  /** Slug of its project. */
+  readonly projectSlug: Scalars['String']['output'];
+  readonly project: Project;
+  /** 1, 2, 3 ... in its project. */
+  readonly revision: Scalars['Int']['output'];
+  readonly title: Scalars['String']['output'];
+  /** completed */
+  readonly state: Scalars['String']['output'];
+  readonly createdAt: Scalars['String']['output'];
+  /** The person or pipeline that the key belongs to. */
+  readonly actor: Scalars['String']['output'];
+  readonly actorKey?: Maybe<Scalars['String']['output']>;
+  readonly engine: Scalars['String']['output'];
+  readonly requestHash: Scalars['String']['output'];
+  readonly contentHash: Scalars['String']['output'];
+  readonly traceHash: Scalars['String']['output'];
+  readonly previousHash: Scalars['String']['output'];
+  readonly recordHash: Scalars['String']['output'];
+  readonly summary: Summary;
+  /** The revision right before, and right after. */
+  readonly previous?: Maybe<Assessment>;
+  readonly next?: Maybe<Assessment>;
+  readonly caps: CapConnection;
+  /** One cap; null where there is none of this mark. */
+  readonly cap?: Maybe<Cap>;
+  readonly neighbours: NeighbourConnection;
+  readonly signatures: ReadonlyArray<Signature>;
+  /** What differs from another revision of the project; without since from the one right before. */
+  readonly changes?: Maybe<Changes>;
+  readonly aggregates: CapAggregates;
+};
+
+
+/** A record: one run of all checks for a schedule. It never changes. */
+export type AssessmentCapsArgs = {
+  check?: InputMaybe<Scalars['String']['input']>;
+  utilisationAtLeast?: InputMaybe<Scalars['Float']['input']>;
+  exceeded?: InputMaybe<Scalars['Boolean']['input']>;
+  ground?: InputMaybe<Scalars['String']['input']>;
+  pileType?: InputMaybe<Scalars['String']['input']>;
+  mark?: InputMaybe<Scalars['String']['input']>;
+  order?: InputMaybe<CapOrder>;
+  first?: InputMaybe<Scalars['Int']['input']>;
+  after?: InputMaybe<Scalars['String']['input']>;
+};
+
+
+/** A record: one run of all checks for a schedule. It never changes. */
+export type AssessmentCapArgs = {
+  mark: Scalars['String']['input'];
+};
+
+
+/** A record: one run of all checks for a schedule. It never changes. */
+export type AssessmentNeighboursArgs = {
+  exceeded?: InputMaybe<Scalars['Boolean']['input']>;
+  cap?: InputMaybe<Scalars['String']['input']>;
+  order?: InputMaybe<NeighbourOrder>;
+  first?: InputMaybe<Scalars['Int']['input']>;
+  after?: InputMaybe<Scalars['String']['input']>;
+};
+
+
+/** A record: one run of all checks for a schedule. It never changes. */
+export type AssessmentChangesArgs = {
+  since?: InputMaybe<Scalars['ID']['input']>;
+  first?: InputMaybe<Scalars['Int']['input']>;
+};
+
+export type Summary = {
+  readonly __typename?: 'Summary';
+  readonly caps: Scalars['Int']['output'];
+  readonly satisfied: Scalars['Int']['output'];
+  readonly exceeded: Scalars['Int']['output'];
+  readonly worst?: Maybe<WorstCheck>;
+};
+
+export type WorstCheck = {
+  readonly __typename?: 'WorstCheck';
+  readonly cap: Scalars['String']['output'];
+  readonly check: Scalars['String']['output'];
+  readonly combination: Scalars['String']['output'];
+  readonly utilisation: Scalars['Float']['output'];
+};
+
+/** Counts over all caps of an assessment, and where the utilisation is largest. */
+export type CapAggregates = {
+  readonly __typename?: 'CapAggregates';
+  readonly byCheck: ReadonlyArray<CapAggregate>;
+  readonly byGround: ReadonlyArray<CapAggregate>;
+  readonly byPileType: ReadonlyArray<CapAggregate>;
+};
+
+export type CapAggregate = {
+  readonly __typename?: 'CapAggregate';
+  /** The kind of check, the ground profile or the pile type. */
+  readonly name: Scalars['String']['output'];
+  readonly count: Scalars['Int']['output'];
+  readonly exceeded: Scalars['Int']['output'];
+  readonly largestUtilisation?: Maybe<Scalars['Float']['output']>;
+  /** Mark of the cap, and the combination, of the largest utilisation. */
+  readonly cap: Scalars['String']['output'];
+  readonly combination?: Maybe<Scalars['String']['output']>;
+};
+
+export type CapConnection = {
+  readonly __typename?: 'CapConnection';
+  readonly nodes: ReadonlyArray<Cap>;
+  readonly edges: ReadonlyArray<CapEdge>;
+  readonly pageInfo: PageInfo;
+  readonly totalCount: Scalars['Int']['output'];
+};
+
+export type CapEdge = {
+  readonly __typename?: 'CapEdge';
+  readonly cursor: Scalars['String']['output'];
+  readonly node: Cap;
+};
+
+export type Cap = {
+  readonly __typename?: 'Cap';
+  readonly mark: Scalars['String']['output'];
+  readonly ground: Scalars['String']['output'];
+  readonly pileType: Scalars['String']['output'];
+  readonly pileCount: Scalars['Int']['output'];
+  /** m */
+  readonly x: Scalars['Float']['output'];
+  /** m */
+  readonly y: Scalars['Float']['output'];
+  readonly governingCheck?: Maybe<Scalars['String']['output']>;
+  readonly governingCombination?: Maybe<Scalars['String']['output']>;
+  /** Largest of its checks. */
+  readonly utilisation?: Maybe<Scalars['Float']['output']>;
+  readonly exceeded: Scalars['Boolean']['output'];
+  /** mm, largest over the combinations */
+  readonly settlement?: Maybe<Scalars['Float']['output']>;
+  /** Largest over the combinations. */
+  readonly tilt?: Maybe<Scalars['Float']['output']>;
+  /** kN/m */
+  readonly verticalStiffness: Scalars['Float']['output'];
+  /** kN.m/rad */
+  readonly rockingStiffnessAlongX: Scalars['Float']['output'];
+  /** kN.m/rad */
+  readonly rockingStiffnessAlongY: Scalars['Float']['output'];
+  /** The largest utilisation first. */
+  readonly checks: ReadonlyArray<Check>;
+  /** The steps behind every number of this cap; its pointers lead into the result of the assessment. */
+  readonly trace?: Maybe<Trace>;
+};
+
+export type Check = {
+  readonly __typename?: 'Check';
+  readonly check: Scalars['String']['output'];
+  readonly combination: Scalars['String']['output'];
+  /** ultimate | working | serviceability */
+  readonly limitState: Scalars['String']['output'];
+  /** kN, mm or ratio, by check */
+  readonly demand: Scalars['Float']['output'];
+  /** In the unit of the demand. */
+  readonly resistance: Scalars['Float']['output'];
+  readonly utilisation: Scalars['Float']['output'];
+  readonly satisfied: Scalars['Boolean']['output'];
+  /** Number of the pile, from 0. */
+  readonly pile?: Maybe<Scalars['Int']['output']>;
+};
+
+export type NeighbourConnection = {
+  readonly __typename?: 'NeighbourConnection';
+  readonly nodes: ReadonlyArray<Neighbours>;
+  readonly edges: ReadonlyArray<NeighbourEdge>;
+  readonly pageInfo: PageInfo;
+  readonly totalCount: Scalars['Int']['output'];
+};
+
+export type NeighbourEdge = {
+  readonly __typename?: 'NeighbourEdge';
+  readonly cursor: Scalars['String']['output'];
+  readonly node: Neighbours;
+};
+
+/** Two neighbouring caps. */
+export type Neighbours = {
+  readonly __typename?: 'Neighbours';
+  readonly a: Scalars['String']['output'];
+  readonly b: Scalars['String']['output'];
+  /** m */
+  readonly distance: Scalars['Float']['output'];
+  readonly combination: Scalars['String']['output'];
+  /** mm */
+  readonly differentialSettlement: Scalars['Float']['output'];
+  readonly angularDistortion: Scalars['Float']['output'];
+  /** Only where the schedule has a limit. */
+  readonly utilisation?: Maybe<Scalars['Float']['output']>;
+  readonly satisfied?: Maybe<Scalars['Boolean']['output']>;
+};
+
+export type Signature = {
+  readonly __typename?: 'Signature';
+  readonly id: Scalars['ID']['output'];
+  readonly assessment: Scalars['ID']['output'];
+  readonly ordinal: Scalars['Int']['output'];
+  /** originator | checker | approver */
+  readonly role: Scalars['String']['output'];
+  readonly meaning: Scalars['String']['output'];
+  readonly actor: Scalars['String']['output'];
+  readonly actorKey?: Maybe<Scalars['String']['output']>;
+  readonly signedAt: Scalars['String']['output'];
+  readonly signedHash: Scalars['String']['output'];
+  readonly previousHash: Scalars['String']['output'];
+  readonly signatureHash: Scalars['String']['output'];
+};
+
+/** What differs between two revisions. Everything that is the same on both sides is left out. */
+export type Changes = {
+  readonly __typename?: 'Changes';
+  readonly before: Assessment;
+  readonly after: Assessment;
+  readonly counts: ChangeCounts;
+  /** Checks whose verdict turned, of a cap or of a pair of neighbours; those now exceeded first. */
+  readonly verdicts: ReadonlyArray<TurnedVerdict>;
+  readonly caps: ReadonlyArray<CapChange>;
+  readonly added: ReadonlyArray<LoneCap>;
+  readonly gone: ReadonlyArray<LoneCap>;
+  readonly neighbours: ReadonlyArray<NeighbourChange>;
+  readonly inputs: ReadonlyArray<InputChange>;
+};
+
+/** Of all changes, also where a list is cut. */
+export type ChangeCounts = {
+  readonly __typename?: 'ChangeCounts';
+  readonly turnedExceeded: Scalars['Int']['output'];
+  readonly turnedSatisfied: Scalars['Int']['output'];
+  readonly caps: Scalars['Int']['output'];
+  readonly added: Scalars['Int']['output'];
+  readonly gone: Scalars['Int']['output'];
+  readonly neighbours: Scalars['Int']['output'];
+  /** Changed values of the schedule by part: { reaction: 3 }. */
+  readonly inputs: Scalars['JSON']['output'];
+};
+
+export type Verdict = {
+  readonly __typename?: 'Verdict';
+  readonly combination: Scalars['String']['output'];
+  readonly utilisation: Scalars['Float']['output'];
+  readonly satisfied: Scalars['Boolean']['output'];
+};
+
+export type GoverningCheck = {
+  readonly __typename?: 'GoverningCheck';
+  readonly check: Scalars['String']['output'];
+  readonly combination: Scalars['String']['output'];
+  readonly utilisation: Scalars['Float']['output'];
+  readonly satisfied: Scalars['Boolean']['output'];
+};
+
+export type TurnedVerdict = {
+  readonly __typename?: 'TurnedVerdict';
+  readonly cap?: Maybe<Scalars['String']['output']>;
+  readonly a?: Maybe<Scalars['String']['output']>;
+  readonly b?: Maybe<Scalars['String']['output']>;
+  readonly check: Scalars['String']['output'];
+  readonly before?: Maybe<Verdict>;
+  readonly after?: Maybe<Verdict>;
+  /** Utilisation after less before. */
+  readonly by?: Maybe<Scalars['Float']['output']>;
+  /** exceeded | satisfied */
+  readonly turned: Scalars['String']['output'];
+};
+
+export type CapChange = {
+  readonly __typename?: 'CapChange';
+  readonly mark: Scalars['String']['output'];
+  /** Into schedule and result. */
+  readonly pointer: PointerPair;
+  /** Where the verdict of the whole cap turned: exceeded | satisfied. */
+  readonly turned?: Maybe<Scalars['String']['output']>;
+  readonly governing: GoverningPair;
+  readonly governingChanged: Scalars['Boolean']['output'];
+  /** Utilisation after less before. */
+  readonly by?: Maybe<Scalars['Float']['output']>;
+  /** Those that changed. */
+  readonly checks: ReadonlyArray<CheckChange>;
+  /** mm, largest over the combinations */
+  readonly settlement?: Maybe<Figure>;
+  /** kN/m */
+  readonly verticalStiffness?: Maybe<Figure>;
+};
+
+export type PointerPair = {
+  readonly __typename?: 'PointerPair';
+  readonly before?: Maybe<Scalars['String']['output']>;
+  readonly after?: Maybe<Scalars['String']['output']>;
+};
+
+export type GoverningPair = {
+  readonly __typename?: 'GoverningPair';
+  readonly before?: Maybe<GoverningCheck>;
+  readonly after?: Maybe<GoverningCheck>;
+};
+
+export type CheckChange = {
+  readonly __typename?: 'CheckChange';
+  readonly check: Scalars['String']['output'];
+  readonly before?: Maybe<Verdict>;
+  readonly after?: Maybe<Verdict>;
+  /** Utilisation after less before. */
+  readonly by?: Maybe<Scalars['Float']['output']>;
+};
+
+export type Figure = {
+  readonly __typename?: 'Figure';
+  readonly before?: Maybe<Scalars['Float']['output']>;
+  readonly after?: Maybe<Scalars['Float']['output']>;
+  readonly by?: Maybe<Scalars['Float']['output']>;
+};
+
+/** A cap of one side only. */
+export type LoneCap = {
+  readonly __typename?: 'LoneCap';
+  readonly mark: Scalars['String']['output'];
+  /** Into the schedule that has it. */
+  readonly pointer: Scalars['String']['output'];
+  readonly exceeded: Scalars['Boolean']['output'];
+  readonly governing?: Maybe<GoverningCheck>;
+};
+
+export type NeighbourChange = {
+  readonly __typename?: 'NeighbourChange';
+  readonly a: Scalars['String']['output'];
+  readonly b: Scalars['String']['output'];
+  readonly check: Scalars['String']['output'];
+  readonly before?: Maybe<Verdict>;
+  readonly after?: Maybe<Verdict>;
+  /** Utilisation after less before. */
+  readonly by?: Maybe<Scalars['Float']['output']>;
+  readonly angularDistortion: Figure;
+};
+
+/** One value of the schedule that changed. */
+export type InputChange = {
+  readonly __typename?: 'InputChange';
+  /** reaction | combination | signs | ground | pile-type | cap | layout | limit | method | design-basis | title */
+  readonly part: Scalars['String']['output'];
+  /** Mark, ground profile, pile type or combination; empty: of the whole schedule. */
+  readonly name: Scalars['String']['output'];
+  readonly combination?: Maybe<Scalars['String']['output']>;
+  readonly layer?: Maybe<Scalars['String']['output']>;
+  /** Into the schedule of each side. */
+  readonly pointer: PointerPair;
+  readonly field: Scalars['String']['output'];
+  readonly before?: Maybe<Scalars['JSON']['output']>;
+  readonly after?: Maybe<Scalars['JSON']['output']>;
+  /** After less before. */
+  readonly by?: Maybe<Scalars['Float']['output']>;
+  readonly unit?: Maybe<Scalars['String']['output']>;
 };
 
 
@@ -774,7 +1279,10 @@ export type ResolversTypes = {
   MethodChoice: ResolverTypeWrapper<Scalars['MethodChoice']['output']>;
   JSON: ResolverTypeWrapper<Scalars['JSON']['output']>;
   Query: ResolverTypeWrapper<Record<PropertyKey, never>>;
+  Int: ResolverTypeWrapper<Scalars['Int']['output']>;
   String: ResolverTypeWrapper<Scalars['String']['output']>;
+  Boolean: ResolverTypeWrapper<Scalars['Boolean']['output']>;
+  ID: ResolverTypeWrapper<Scalars['ID']['output']>;
   SinglePileRequestInput: SinglePileRequestInput;
   GroupRequestInput: GroupRequestInput;
   SettlementRequestInput: SettlementRequestInput;
@@ -783,7 +1291,6 @@ export type ResolversTypes = {
   SectionResistanceInput: SectionResistanceInput;
   SectionInput: SectionInput;
   GroundProfileInput: GroundProfileInput;
-  Boolean: ResolverTypeWrapper<Scalars['Boolean']['output']>;
   LayerInput: LayerInput;
   LayoutInput: LayoutInput;
   PointInput: PointInput;
@@ -805,7 +1312,6 @@ export type ResolversTypes = {
   LayerResistance: ResolverTypeWrapper<LayerResistance>;
   BlockResult: ResolverTypeWrapper<BlockResult>;
   GroupResult: ResolverTypeWrapper<GroupResult>;
-  Int: ResolverTypeWrapper<Scalars['Int']['output']>;
   SettlementResult: ResolverTypeWrapper<SettlementResult>;
   SinglePileSettlement: ResolverTypeWrapper<SinglePileSettlement>;
   CurvePoint: ResolverTypeWrapper<CurvePoint>;
@@ -829,6 +1335,43 @@ export type ResolversTypes = {
   MethodParameter: ResolverTypeWrapper<MethodParameter>;
   MethodFormula: ResolverTypeWrapper<MethodFormula>;
   Limits: ResolverTypeWrapper<Limits>;
+  AssessmentOrder: AssessmentOrder;
+  CapOrder: CapOrder;
+  NeighbourOrder: NeighbourOrder;
+  PageInfo: ResolverTypeWrapper<PageInfo>;
+  ProjectConnection: ResolverTypeWrapper<ProjectConnectionNode>;
+  ProjectEdge: ResolverTypeWrapper<Omit<ProjectEdge, 'node'> & { node: ResolversTypes['Project'] }>;
+  Project: ResolverTypeWrapper<ShownProject>;
+  AssessmentConnection: ResolverTypeWrapper<AssessmentConnectionNode>;
+  AssessmentEdge: ResolverTypeWrapper<Omit<AssessmentEdge, 'node'> & { node: ResolversTypes['Assessment'] }>;
+  AssessmentAggregates: ResolverTypeWrapper<AssessmentAggregates>;
+  WorstCheckAggregate: ResolverTypeWrapper<WorstCheckAggregate>;
+  Assessment: ResolverTypeWrapper<ShownRecord>;
+  Summary: ResolverTypeWrapper<Summary>;
+  WorstCheck: ResolverTypeWrapper<WorstCheck>;
+  CapAggregates: ResolverTypeWrapper<AggregateNode>;
+  CapAggregate: ResolverTypeWrapper<CapAggregate>;
+  CapConnection: ResolverTypeWrapper<CapConnectionNode>;
+  CapEdge: ResolverTypeWrapper<Omit<CapEdge, 'node'> & { node: ResolversTypes['Cap'] }>;
+  Cap: ResolverTypeWrapper<CapNode>;
+  Check: ResolverTypeWrapper<Check>;
+  NeighbourConnection: ResolverTypeWrapper<NeighbourConnectionNode>;
+  NeighbourEdge: ResolverTypeWrapper<NeighbourEdge>;
+  Neighbours: ResolverTypeWrapper<Neighbours>;
+  Signature: ResolverTypeWrapper<Signature>;
+  Changes: ResolverTypeWrapper<ToldChanges>;
+  ChangeCounts: ResolverTypeWrapper<ChangeCounts>;
+  Verdict: ResolverTypeWrapper<Verdict>;
+  GoverningCheck: ResolverTypeWrapper<GoverningCheck>;
+  TurnedVerdict: ResolverTypeWrapper<TurnedVerdict>;
+  CapChange: ResolverTypeWrapper<CapChange>;
+  PointerPair: ResolverTypeWrapper<PointerPair>;
+  GoverningPair: ResolverTypeWrapper<GoverningPair>;
+  CheckChange: ResolverTypeWrapper<CheckChange>;
+  Figure: ResolverTypeWrapper<Figure>;
+  LoneCap: ResolverTypeWrapper<LoneCap>;
+  NeighbourChange: ResolverTypeWrapper<NeighbourChange>;
+  InputChange: ResolverTypeWrapper<InputChange>;
 };
 
 /** Mapping between all available schema types and the resolvers parents */
@@ -839,7 +1382,10 @@ export type ResolversParentTypes = {
   MethodChoice: Scalars['MethodChoice']['output'];
   JSON: Scalars['JSON']['output'];
   Query: Record<PropertyKey, never>;
+  Int: Scalars['Int']['output'];
   String: Scalars['String']['output'];
+  Boolean: Scalars['Boolean']['output'];
+  ID: Scalars['ID']['output'];
   SinglePileRequestInput: SinglePileRequestInput;
   GroupRequestInput: GroupRequestInput;
   SettlementRequestInput: SettlementRequestInput;
@@ -848,7 +1394,6 @@ export type ResolversParentTypes = {
   SectionResistanceInput: SectionResistanceInput;
   SectionInput: SectionInput;
   GroundProfileInput: GroundProfileInput;
-  Boolean: Scalars['Boolean']['output'];
   LayerInput: LayerInput;
   LayoutInput: LayoutInput;
   PointInput: PointInput;
@@ -870,7 +1415,6 @@ export type ResolversParentTypes = {
   LayerResistance: LayerResistance;
   BlockResult: BlockResult;
   GroupResult: GroupResult;
-  Int: Scalars['Int']['output'];
   SettlementResult: SettlementResult;
   SinglePileSettlement: SinglePileSettlement;
   CurvePoint: CurvePoint;
@@ -894,6 +1438,40 @@ export type ResolversParentTypes = {
   MethodParameter: MethodParameter;
   MethodFormula: MethodFormula;
   Limits: Limits;
+  PageInfo: PageInfo;
+  ProjectConnection: ProjectConnectionNode;
+  ProjectEdge: Omit<ProjectEdge, 'node'> & { node: ResolversParentTypes['Project'] };
+  Project: ShownProject;
+  AssessmentConnection: AssessmentConnectionNode;
+  AssessmentEdge: Omit<AssessmentEdge, 'node'> & { node: ResolversParentTypes['Assessment'] };
+  AssessmentAggregates: AssessmentAggregates;
+  WorstCheckAggregate: WorstCheckAggregate;
+  Assessment: ShownRecord;
+  Summary: Summary;
+  WorstCheck: WorstCheck;
+  CapAggregates: AggregateNode;
+  CapAggregate: CapAggregate;
+  CapConnection: CapConnectionNode;
+  CapEdge: Omit<CapEdge, 'node'> & { node: ResolversParentTypes['Cap'] };
+  Cap: CapNode;
+  Check: Check;
+  NeighbourConnection: NeighbourConnectionNode;
+  NeighbourEdge: NeighbourEdge;
+  Neighbours: Neighbours;
+  Signature: Signature;
+  Changes: ToldChanges;
+  ChangeCounts: ChangeCounts;
+  Verdict: Verdict;
+  GoverningCheck: GoverningCheck;
+  TurnedVerdict: TurnedVerdict;
+  CapChange: CapChange;
+  PointerPair: PointerPair;
+  GoverningPair: GoverningPair;
+  CheckChange: CheckChange;
+  Figure: Figure;
+  LoneCap: LoneCap;
+  NeighbourChange: NeighbourChange;
+  InputChange: InputChange;
 };
 
 export interface QuantityScalarConfig extends GraphQLScalarTypeConfig<ResolversTypes['Quantity'], any> {
@@ -917,6 +1495,10 @@ export interface JsonScalarConfig extends GraphQLScalarTypeConfig<ResolversTypes
 }
 
 export type QueryResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Query'] = ResolversParentTypes['Query']> = {
+  projects?: Resolver<ResolversTypes['ProjectConnection'], ParentType, ContextType, RequireFields<QueryProjectsArgs, 'first'>>;
+  project?: Resolver<Maybe<ResolversTypes['Project']>, ParentType, ContextType, RequireFields<QueryProjectArgs, 'slug'>>;
+  assessments?: Resolver<ResolversTypes['AssessmentConnection'], ParentType, ContextType, RequireFields<QueryAssessmentsArgs, 'order' | 'first'>>;
+  assessment?: Resolver<Maybe<ResolversTypes['Assessment']>, ParentType, ContextType, RequireFields<QueryAssessmentArgs, 'id'>>;
   singlePile?: Resolver<ResolversTypes['SinglePileAnswer'], ParentType, ContextType, RequireFields<QuerySinglePileArgs, 'request'>>;
   block?: Resolver<ResolversTypes['BlockAnswer'], ParentType, ContextType, RequireFields<QueryBlockArgs, 'request'>>;
   group?: Resolver<ResolversTypes['GroupAnswer'], ParentType, ContextType, RequireFields<QueryGroupArgs, 'request'>>;
@@ -1206,6 +1788,309 @@ export type LimitsResolvers<ContextType = Context, ParentType extends ResolversP
   pilesPerCap?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
 };
 
+export type PageInfoResolvers<ContextType = Context, ParentType extends ResolversParentTypes['PageInfo'] = ResolversParentTypes['PageInfo']> = {
+  hasNextPage?: Resolver<ResolversTypes['Boolean'], ParentType, ContextType>;
+  endCursor?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
+};
+
+export type ProjectConnectionResolvers<ContextType = Context, ParentType extends ResolversParentTypes['ProjectConnection'] = ResolversParentTypes['ProjectConnection']> = {
+  nodes?: Resolver<ReadonlyArray<ResolversTypes['Project']>, ParentType, ContextType>;
+  edges?: Resolver<ReadonlyArray<ResolversTypes['ProjectEdge']>, ParentType, ContextType>;
+  pageInfo?: Resolver<ResolversTypes['PageInfo'], ParentType, ContextType>;
+  totalCount?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+};
+
+export type ProjectEdgeResolvers<ContextType = Context, ParentType extends ResolversParentTypes['ProjectEdge'] = ResolversParentTypes['ProjectEdge']> = {
+  cursor?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  node?: Resolver<ResolversTypes['Project'], ParentType, ContextType>;
+};
+
+export type ProjectResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Project'] = ResolversParentTypes['Project']> = {
+  slug?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  title?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  createdAt?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  updatedAt?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  revision?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  latest?: Resolver<Maybe<ResolversTypes['Assessment']>, ParentType, ContextType>;
+  assessments?: Resolver<ResolversTypes['AssessmentConnection'], ParentType, ContextType, RequireFields<ProjectAssessmentsArgs, 'order' | 'first'>>;
+};
+
+export type AssessmentConnectionResolvers<ContextType = Context, ParentType extends ResolversParentTypes['AssessmentConnection'] = ResolversParentTypes['AssessmentConnection']> = {
+  nodes?: Resolver<ReadonlyArray<ResolversTypes['Assessment']>, ParentType, ContextType>;
+  edges?: Resolver<ReadonlyArray<ResolversTypes['AssessmentEdge']>, ParentType, ContextType>;
+  pageInfo?: Resolver<ResolversTypes['PageInfo'], ParentType, ContextType>;
+  totalCount?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  aggregates?: Resolver<ResolversTypes['AssessmentAggregates'], ParentType, ContextType>;
+};
+
+export type AssessmentEdgeResolvers<ContextType = Context, ParentType extends ResolversParentTypes['AssessmentEdge'] = ResolversParentTypes['AssessmentEdge']> = {
+  cursor?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  node?: Resolver<ResolversTypes['Assessment'], ParentType, ContextType>;
+};
+
+export type AssessmentAggregatesResolvers<ContextType = Context, ParentType extends ResolversParentTypes['AssessmentAggregates'] = ResolversParentTypes['AssessmentAggregates']> = {
+  count?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  exceeded?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  caps?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  capsExceeded?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  largestUtilisation?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
+  byWorstCheck?: Resolver<ReadonlyArray<ResolversTypes['WorstCheckAggregate']>, ParentType, ContextType>;
+};
+
+export type WorstCheckAggregateResolvers<ContextType = Context, ParentType extends ResolversParentTypes['WorstCheckAggregate'] = ResolversParentTypes['WorstCheckAggregate']> = {
+  check?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  count?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  exceeded?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  largestUtilisation?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
+};
+
+export type AssessmentResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Assessment'] = ResolversParentTypes['Assessment']> = {
+  id?: Resolver<ResolversTypes['ID'], ParentType, ContextType>;
+  projectSlug?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  project?: Resolver<ResolversTypes['Project'], ParentType, ContextType>;
+  revision?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  title?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  state?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  createdAt?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  actor?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  actorKey?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
+  engine?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  requestHash?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  contentHash?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  traceHash?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  previousHash?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  recordHash?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  summary?: Resolver<ResolversTypes['Summary'], ParentType, ContextType>;
+  previous?: Resolver<Maybe<ResolversTypes['Assessment']>, ParentType, ContextType>;
+  next?: Resolver<Maybe<ResolversTypes['Assessment']>, ParentType, ContextType>;
+  caps?: Resolver<ResolversTypes['CapConnection'], ParentType, ContextType, RequireFields<AssessmentCapsArgs, 'order' | 'first'>>;
+  cap?: Resolver<Maybe<ResolversTypes['Cap']>, ParentType, ContextType, RequireFields<AssessmentCapArgs, 'mark'>>;
+  neighbours?: Resolver<ResolversTypes['NeighbourConnection'], ParentType, ContextType, RequireFields<AssessmentNeighboursArgs, 'order' | 'first'>>;
+  signatures?: Resolver<ReadonlyArray<ResolversTypes['Signature']>, ParentType, ContextType>;
+  changes?: Resolver<Maybe<ResolversTypes['Changes']>, ParentType, ContextType, RequireFields<AssessmentChangesArgs, 'first'>>;
+  aggregates?: Resolver<ResolversTypes['CapAggregates'], ParentType, ContextType>;
+};
+
+export type SummaryResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Summary'] = ResolversParentTypes['Summary']> = {
+  caps?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  satisfied?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  exceeded?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  worst?: Resolver<Maybe<ResolversTypes['WorstCheck']>, ParentType, ContextType>;
+};
+
+export type WorstCheckResolvers<ContextType = Context, ParentType extends ResolversParentTypes['WorstCheck'] = ResolversParentTypes['WorstCheck']> = {
+  cap?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  check?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  combination?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  utilisation?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
+};
+
+export type CapAggregatesResolvers<ContextType = Context, ParentType extends ResolversParentTypes['CapAggregates'] = ResolversParentTypes['CapAggregates']> = {
+  byCheck?: Resolver<ReadonlyArray<ResolversTypes['CapAggregate']>, ParentType, ContextType>;
+  byGround?: Resolver<ReadonlyArray<ResolversTypes['CapAggregate']>, ParentType, ContextType>;
+  byPileType?: Resolver<ReadonlyArray<ResolversTypes['CapAggregate']>, ParentType, ContextType>;
+};
+
+export type CapAggregateResolvers<ContextType = Context, ParentType extends ResolversParentTypes['CapAggregate'] = ResolversParentTypes['CapAggregate']> = {
+  name?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  count?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  exceeded?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  largestUtilisation?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
+  cap?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  combination?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
+};
+
+export type CapConnectionResolvers<ContextType = Context, ParentType extends ResolversParentTypes['CapConnection'] = ResolversParentTypes['CapConnection']> = {
+  nodes?: Resolver<ReadonlyArray<ResolversTypes['Cap']>, ParentType, ContextType>;
+  edges?: Resolver<ReadonlyArray<ResolversTypes['CapEdge']>, ParentType, ContextType>;
+  pageInfo?: Resolver<ResolversTypes['PageInfo'], ParentType, ContextType>;
+  totalCount?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+};
+
+export type CapEdgeResolvers<ContextType = Context, ParentType extends ResolversParentTypes['CapEdge'] = ResolversParentTypes['CapEdge']> = {
+  cursor?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  node?: Resolver<ResolversTypes['Cap'], ParentType, ContextType>;
+};
+
+export type CapResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Cap'] = ResolversParentTypes['Cap']> = {
+  mark?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  ground?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  pileType?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  pileCount?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  x?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
+  y?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
+  governingCheck?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
+  governingCombination?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
+  utilisation?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
+  exceeded?: Resolver<ResolversTypes['Boolean'], ParentType, ContextType>;
+  settlement?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
+  tilt?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
+  verticalStiffness?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
+  rockingStiffnessAlongX?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
+  rockingStiffnessAlongY?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
+  checks?: Resolver<ReadonlyArray<ResolversTypes['Check']>, ParentType, ContextType>;
+  trace?: Resolver<Maybe<ResolversTypes['Trace']>, ParentType, ContextType>;
+};
+
+export type CheckResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Check'] = ResolversParentTypes['Check']> = {
+  check?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  combination?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  limitState?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  demand?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
+  resistance?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
+  utilisation?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
+  satisfied?: Resolver<ResolversTypes['Boolean'], ParentType, ContextType>;
+  pile?: Resolver<Maybe<ResolversTypes['Int']>, ParentType, ContextType>;
+};
+
+export type NeighbourConnectionResolvers<ContextType = Context, ParentType extends ResolversParentTypes['NeighbourConnection'] = ResolversParentTypes['NeighbourConnection']> = {
+  nodes?: Resolver<ReadonlyArray<ResolversTypes['Neighbours']>, ParentType, ContextType>;
+  edges?: Resolver<ReadonlyArray<ResolversTypes['NeighbourEdge']>, ParentType, ContextType>;
+  pageInfo?: Resolver<ResolversTypes['PageInfo'], ParentType, ContextType>;
+  totalCount?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+};
+
+export type NeighbourEdgeResolvers<ContextType = Context, ParentType extends ResolversParentTypes['NeighbourEdge'] = ResolversParentTypes['NeighbourEdge']> = {
+  cursor?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  node?: Resolver<ResolversTypes['Neighbours'], ParentType, ContextType>;
+};
+
+export type NeighboursResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Neighbours'] = ResolversParentTypes['Neighbours']> = {
+  a?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  b?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  distance?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
+  combination?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  differentialSettlement?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
+  angularDistortion?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
+  utilisation?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
+  satisfied?: Resolver<Maybe<ResolversTypes['Boolean']>, ParentType, ContextType>;
+};
+
+export type SignatureResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Signature'] = ResolversParentTypes['Signature']> = {
+  id?: Resolver<ResolversTypes['ID'], ParentType, ContextType>;
+  assessment?: Resolver<ResolversTypes['ID'], ParentType, ContextType>;
+  ordinal?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  role?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  meaning?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  actor?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  actorKey?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
+  signedAt?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  signedHash?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  previousHash?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  signatureHash?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+};
+
+export type ChangesResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Changes'] = ResolversParentTypes['Changes']> = {
+  before?: Resolver<ResolversTypes['Assessment'], ParentType, ContextType>;
+  after?: Resolver<ResolversTypes['Assessment'], ParentType, ContextType>;
+  counts?: Resolver<ResolversTypes['ChangeCounts'], ParentType, ContextType>;
+  verdicts?: Resolver<ReadonlyArray<ResolversTypes['TurnedVerdict']>, ParentType, ContextType>;
+  caps?: Resolver<ReadonlyArray<ResolversTypes['CapChange']>, ParentType, ContextType>;
+  added?: Resolver<ReadonlyArray<ResolversTypes['LoneCap']>, ParentType, ContextType>;
+  gone?: Resolver<ReadonlyArray<ResolversTypes['LoneCap']>, ParentType, ContextType>;
+  neighbours?: Resolver<ReadonlyArray<ResolversTypes['NeighbourChange']>, ParentType, ContextType>;
+  inputs?: Resolver<ReadonlyArray<ResolversTypes['InputChange']>, ParentType, ContextType>;
+};
+
+export type ChangeCountsResolvers<ContextType = Context, ParentType extends ResolversParentTypes['ChangeCounts'] = ResolversParentTypes['ChangeCounts']> = {
+  turnedExceeded?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  turnedSatisfied?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  caps?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  added?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  gone?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  neighbours?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  inputs?: Resolver<ResolversTypes['JSON'], ParentType, ContextType>;
+};
+
+export type VerdictResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Verdict'] = ResolversParentTypes['Verdict']> = {
+  combination?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  utilisation?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
+  satisfied?: Resolver<ResolversTypes['Boolean'], ParentType, ContextType>;
+};
+
+export type GoverningCheckResolvers<ContextType = Context, ParentType extends ResolversParentTypes['GoverningCheck'] = ResolversParentTypes['GoverningCheck']> = {
+  check?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  combination?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  utilisation?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
+  satisfied?: Resolver<ResolversTypes['Boolean'], ParentType, ContextType>;
+};
+
+export type TurnedVerdictResolvers<ContextType = Context, ParentType extends ResolversParentTypes['TurnedVerdict'] = ResolversParentTypes['TurnedVerdict']> = {
+  cap?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
+  a?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
+  b?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
+  check?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  before?: Resolver<Maybe<ResolversTypes['Verdict']>, ParentType, ContextType>;
+  after?: Resolver<Maybe<ResolversTypes['Verdict']>, ParentType, ContextType>;
+  by?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
+  turned?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+};
+
+export type CapChangeResolvers<ContextType = Context, ParentType extends ResolversParentTypes['CapChange'] = ResolversParentTypes['CapChange']> = {
+  mark?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  pointer?: Resolver<ResolversTypes['PointerPair'], ParentType, ContextType>;
+  turned?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
+  governing?: Resolver<ResolversTypes['GoverningPair'], ParentType, ContextType>;
+  governingChanged?: Resolver<ResolversTypes['Boolean'], ParentType, ContextType>;
+  by?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
+  checks?: Resolver<ReadonlyArray<ResolversTypes['CheckChange']>, ParentType, ContextType>;
+  settlement?: Resolver<Maybe<ResolversTypes['Figure']>, ParentType, ContextType>;
+  verticalStiffness?: Resolver<Maybe<ResolversTypes['Figure']>, ParentType, ContextType>;
+};
+
+export type PointerPairResolvers<ContextType = Context, ParentType extends ResolversParentTypes['PointerPair'] = ResolversParentTypes['PointerPair']> = {
+  before?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
+  after?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
+};
+
+export type GoverningPairResolvers<ContextType = Context, ParentType extends ResolversParentTypes['GoverningPair'] = ResolversParentTypes['GoverningPair']> = {
+  before?: Resolver<Maybe<ResolversTypes['GoverningCheck']>, ParentType, ContextType>;
+  after?: Resolver<Maybe<ResolversTypes['GoverningCheck']>, ParentType, ContextType>;
+};
+
+export type CheckChangeResolvers<ContextType = Context, ParentType extends ResolversParentTypes['CheckChange'] = ResolversParentTypes['CheckChange']> = {
+  check?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  before?: Resolver<Maybe<ResolversTypes['Verdict']>, ParentType, ContextType>;
+  after?: Resolver<Maybe<ResolversTypes['Verdict']>, ParentType, ContextType>;
+  by?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
+};
+
+export type FigureResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Figure'] = ResolversParentTypes['Figure']> = {
+  before?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
+  after?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
+  by?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
+};
+
+export type LoneCapResolvers<ContextType = Context, ParentType extends ResolversParentTypes['LoneCap'] = ResolversParentTypes['LoneCap']> = {
+  mark?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  pointer?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  exceeded?: Resolver<ResolversTypes['Boolean'], ParentType, ContextType>;
+  governing?: Resolver<Maybe<ResolversTypes['GoverningCheck']>, ParentType, ContextType>;
+};
+
+export type NeighbourChangeResolvers<ContextType = Context, ParentType extends ResolversParentTypes['NeighbourChange'] = ResolversParentTypes['NeighbourChange']> = {
+  a?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  b?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  check?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  before?: Resolver<Maybe<ResolversTypes['Verdict']>, ParentType, ContextType>;
+  after?: Resolver<Maybe<ResolversTypes['Verdict']>, ParentType, ContextType>;
+  by?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
+  angularDistortion?: Resolver<ResolversTypes['Figure'], ParentType, ContextType>;
+};
+
+export type InputChangeResolvers<ContextType = Context, ParentType extends ResolversParentTypes['InputChange'] = ResolversParentTypes['InputChange']> = {
+  part?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  name?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  combination?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
+  layer?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
+  pointer?: Resolver<ResolversTypes['PointerPair'], ParentType, ContextType>;
+  field?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  before?: Resolver<Maybe<ResolversTypes['JSON']>, ParentType, ContextType>;
+  after?: Resolver<Maybe<ResolversTypes['JSON']>, ParentType, ContextType>;
+  by?: Resolver<Maybe<ResolversTypes['Float']>, ParentType, ContextType>;
+  unit?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
+};
+
 export type Resolvers<ContextType = Context> = {
   Quantity?: GraphQLScalarType;
   Varying?: GraphQLScalarType;
@@ -1247,4 +2132,38 @@ export type Resolvers<ContextType = Context> = {
   MethodParameter?: MethodParameterResolvers<ContextType>;
   MethodFormula?: MethodFormulaResolvers<ContextType>;
   Limits?: LimitsResolvers<ContextType>;
+  PageInfo?: PageInfoResolvers<ContextType>;
+  ProjectConnection?: ProjectConnectionResolvers<ContextType>;
+  ProjectEdge?: ProjectEdgeResolvers<ContextType>;
+  Project?: ProjectResolvers<ContextType>;
+  AssessmentConnection?: AssessmentConnectionResolvers<ContextType>;
+  AssessmentEdge?: AssessmentEdgeResolvers<ContextType>;
+  AssessmentAggregates?: AssessmentAggregatesResolvers<ContextType>;
+  WorstCheckAggregate?: WorstCheckAggregateResolvers<ContextType>;
+  Assessment?: AssessmentResolvers<ContextType>;
+  Summary?: SummaryResolvers<ContextType>;
+  WorstCheck?: WorstCheckResolvers<ContextType>;
+  CapAggregates?: CapAggregatesResolvers<ContextType>;
+  CapAggregate?: CapAggregateResolvers<ContextType>;
+  CapConnection?: CapConnectionResolvers<ContextType>;
+  CapEdge?: CapEdgeResolvers<ContextType>;
+  Cap?: CapResolvers<ContextType>;
+  Check?: CheckResolvers<ContextType>;
+  NeighbourConnection?: NeighbourConnectionResolvers<ContextType>;
+  NeighbourEdge?: NeighbourEdgeResolvers<ContextType>;
+  Neighbours?: NeighboursResolvers<ContextType>;
+  Signature?: SignatureResolvers<ContextType>;
+  Changes?: ChangesResolvers<ContextType>;
+  ChangeCounts?: ChangeCountsResolvers<ContextType>;
+  Verdict?: VerdictResolvers<ContextType>;
+  GoverningCheck?: GoverningCheckResolvers<ContextType>;
+  TurnedVerdict?: TurnedVerdictResolvers<ContextType>;
+  CapChange?: CapChangeResolvers<ContextType>;
+  PointerPair?: PointerPairResolvers<ContextType>;
+  GoverningPair?: GoverningPairResolvers<ContextType>;
+  CheckChange?: CheckChangeResolvers<ContextType>;
+  Figure?: FigureResolvers<ContextType>;
+  LoneCap?: LoneCapResolvers<ContextType>;
+  NeighbourChange?: NeighbourChangeResolvers<ContextType>;
+  InputChange?: InputChangeResolvers<ContextType>;
 };

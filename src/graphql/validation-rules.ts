@@ -1,8 +1,9 @@
 import { type ASTVisitor, GraphQLError, Kind, type SelectionSetNode, type ValidationContext } from 'graphql'
-import { limits, rootCosts } from './limits.ts'
+import { costOf } from './cost.ts'
+import { limits } from './limits.ts'
 
-type Tally = { readonly depth: number; readonly aliases: number; readonly cost: number }
-const nothing: Tally = { depth: 0, aliases: 0, cost: 0 }
+type Tally = { readonly depth: number; readonly aliases: number }
+const nothing: Tally = { depth: 0, aliases: 0 }
 
 /** Counts a document as it will be executed: each fragment once, its tally added wherever it is spread. */
 function tallies(context: ValidationContext): (set: SelectionSetNode) => Tally {
@@ -22,11 +23,10 @@ function tallies(context: ValidationContext): (set: SelectionSetNode) => Tally {
     return tally
   }
   const count = (set: SelectionSetNode): Tally => {
-    let [depth, aliases, cost] = [0, 0, 0]
+    let [depth, aliases] = [0, 0]
     for (const node of set.selections) {
       if (node.kind === Kind.FIELD) {
         aliases += node.alias ? 1 : 0
-        cost += rootCosts[node.name.value] ?? 1
         // Introspection is deep by nature; in production it is off altogether.
         const inner = node.selectionSet && !node.name.value.startsWith('__') ? count(node.selectionSet) : nothing
         depth = Math.max(depth, 1 + inner.depth)
@@ -35,10 +35,9 @@ function tallies(context: ValidationContext): (set: SelectionSetNode) => Tally {
         const inner = node.kind === Kind.FRAGMENT_SPREAD ? fragment(node.name.value) : count(node.selectionSet)
         depth = Math.max(depth, inner.depth)
         aliases += inner.aliases
-        cost += inner.cost
       }
     }
-    return { depth, aliases, cost }
+    return { depth, aliases }
   }
   return count
 }
@@ -46,17 +45,22 @@ function tallies(context: ValidationContext): (set: SelectionSetNode) => Tally {
 const refusal = (code: string, what: string, got: number, limit: number) =>
   new GraphQLError(`${what}: ${got}, at most ${limit} are allowed.`, { extensions: { code, got, limit } })
 
+/** The refusal of an operation of this cost; undefined where it is not above the limit. */
+export const tooCostly = (cost: number): GraphQLError | undefined =>
+  cost > limits.cost ? refusal('query-too-costly', 'Cost of the query', cost, limits.cost) : undefined
+
 /** Refuses a document that is too deep, renames too much, or asks for too much at once. */
 export function documentLimits(context: ValidationContext): ASTVisitor {
   const count = tallies(context)
   return {
     OperationDefinition: (node) => {
-      const { depth, aliases, cost } = count(node.selectionSet)
+      const { depth, aliases } = count(node.selectionSet)
       if (depth > limits.depth)
         context.reportError(refusal('query-too-deep', 'Depth of the query', depth, limits.depth))
       if (aliases > limits.aliases)
         context.reportError(refusal('too-many-aliases', 'Aliases in the query', aliases, limits.aliases))
-      if (cost > limits.cost) context.reportError(refusal('query-too-costly', 'Cost of the query', cost, limits.cost))
+      const costly = tooCostly(costOf(context.getSchema(), context.getDocument(), node))
+      if (costly) context.reportError(costly)
       return false
     },
   }

@@ -28,6 +28,7 @@ export const access: Readonly<Record<string, Access>> = {
   'GET /v1/assessments/:id/caps/:mark/sheet': ['read'],
   'GET /v1/assessments/:id/piles': ['read'],
   'GET /v1/assessments/:id/piles.csv': ['read'],
+  'GET /v1/assessments/:id/changes': ['read'],
   'GET /v1/assessments/:id/signatures': ['read'],
   'POST /v1/assessments/:id/signatures': ['read', 'sign'],
   'POST /v1/assessments/:id/reverify': ['read', 'calculate'],

@@ -6,6 +6,10 @@ export function tagsOf(header: string | undefined): string[] | undefined {
   return [...header.matchAll(/(?:W\/)?"([^"]*)"|\*/g)].map((found) => found[1] ?? '*')
 }
 
+/** Whether the client holds what has this tag. */
+export const isHeld = (request: FastifyRequest, tag: string): boolean =>
+  tagsOf(request.headers['if-none-match'])?.some((one) => one === '*' || one === tag) ?? false
+
 /** Sends a body with its strong ETag, or 304 where the client holds it already. */
 export function sendTagged(
   request: FastifyRequest,
@@ -14,7 +18,6 @@ export function sendTagged(
   body: () => string | Uint8Array,
 ): FastifyReply {
   reply.header('etag', `"${tag}"`).header('cache-control', 'private, no-cache')
-  const held = tagsOf(request.headers['if-none-match'])
-  if (held?.some((one) => one === '*' || one === tag)) return reply.code(304).send()
+  if (isHeld(request, tag)) return reply.code(304).send()
   return reply.type(`${request.accepted}; charset=utf-8`).send(body())
 }

@@ -17,6 +17,7 @@ export const showProject = (row: ProjectRow) => ({
   updatedAt: row.updated_at,
   revision: row.revision,
 })
+export type ShownProject = ReturnType<typeof showProject>
 export const projectTag = (row: ProjectRow): string => hashOf(showProject(row))
 
 const SLUG = /^[a-z0-9]([a-z0-9-]{0,62}[a-z0-9])?$/

@@ -1,7 +1,16 @@
 import { Problem } from '../errors.ts'
 import type { Actor } from '../store/actor.ts'
+import {
+  type CapFilter,
+  type CapLine,
+  type CapOrder,
+  type CapPosition,
+  capPosition,
+  listCaps as list,
+} from '../store/cap-pages.ts'
 import type { Page } from '../store/page.ts'
-import { type CapFilter, type CapLine, findCap, findTrace, listCaps as list } from '../store/read-caps.ts'
+import { findCap, findTrace } from '../store/read-caps.ts'
+import { listName } from './cursors.ts'
 import type { Office } from './office.ts'
 import { ownRecord } from './rights.ts'
 
@@ -25,11 +34,24 @@ export const showCap = (c: CapLine) => ({
 })
 export type ShownCap = ReturnType<typeof showCap>
 
-/** Caps of a record in the order of its schedule, each with its place in it. */
-export async function listCaps(office: Office, actor: Actor, id: string, filter: CapFilter, page: Page<number>) {
+export { capOrders } from '../store/cap-pages.ts'
+export type { CapFilter, CapOrder, CapPosition }
+
+export const capList = (id: string, filter: CapFilter, order: CapOrder): string =>
+  listName('caps', id, { ...filter, order })
+
+/** Caps of a record, each with its place in the list. */
+export async function listCaps(
+  office: Office,
+  actor: Actor,
+  id: string,
+  filter: CapFilter,
+  order: CapOrder,
+  page: Page<CapPosition>,
+) {
   const record = await ownRecord(office, actor, id)
-  const rows = await list(office.store, id, filter, page)
-  return { record, rows: rows.map((row) => ({ ordinal: row.ordinal, cap: showCap(row) })) }
+  const rows = await list(office.store, [id], filter, order, page)
+  return { record, rows: rows.map((row) => ({ position: capPosition(order, row), cap: showCap(row) })) }
 }
 
 /** One cap: its part of the result as JSON, and its trace. Throws `no-such-cap`. */

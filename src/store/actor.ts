@@ -17,5 +17,5 @@ export const anonymous: Actor = { name: 'anonymous', key: null, scopes: ['admin'
 /** `admin` holds every scope. */
 export const hasScope = (actor: Actor, scope: Scope): boolean =>
   actor.scopes.includes(scope) || actor.scopes.includes('admin')
-export const hasProject = (actor: Actor, slug: string): boolean =>
+export const hasProject = (actor: Pick<Actor, 'projects'>, slug: string): boolean =>
   actor.projects.includes('*') || actor.projects.includes(slug)

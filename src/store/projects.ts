@@ -48,3 +48,10 @@ export async function listProjects(store: Store, actor: Actor, page: Page<string
   if (page.after !== undefined) query = query.where('slug', '>', page.after)
   return (await query.execute()).filter((row) => hasProject(actor, row.slug))
 }
+
+/** How many projects the actor has a right to. */
+export async function countProjects(store: Store, actor: Actor): Promise<number> {
+  let query = store.reader.selectFrom('projects').select(({ fn }) => fn.countAll().as('count'))
+  if (!actor.projects.includes('*')) query = query.where('slug', 'in', [...actor.projects, ''])
+  return Number((await query.executeTakeFirstOrThrow()).count)
+}

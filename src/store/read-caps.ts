@@ -1,59 +1,7 @@
 import { joinTrace, type Trace, type TracePart } from '../engine/index.ts'
 import { unpack } from './blobs.ts'
 import type { Store } from './open-store.ts'
-import type { Page } from './page.ts'
-import type { CapRow, CheckRow, NeighbourRow } from './tables.ts'
-
-const flat = [
-  'record',
-  'mark',
-  'ordinal',
-  'ground',
-  'pile_type',
-  'pile_count',
-  'x',
-  'y',
-  'governing_check',
-  'governing_combination',
-  'utilisation',
-  'exceeded',
-  'settlement',
-  'tilt',
-  'stiffness_vertical',
-  'stiffness_rocking_x',
-  'stiffness_rocking_y',
-] as const
-export type CapLine = Pick<CapRow, (typeof flat)[number]>
-
-export type CapFilter = {
-  /** With a kind of check, utilisation and exceeded are those of this check. */
-  readonly check?: string
-  readonly utilisationAtLeast?: number
-  readonly exceeded?: boolean
-}
-
-/** Caps of a record in the order of the schedule. */
-export function listCaps(store: Store, record: string, filter: CapFilter, page: Page<number>): Promise<CapLine[]> {
-  const { check, utilisationAtLeast: least, exceeded } = filter
-  let query = store.reader.selectFrom('caps').select(flat).where('record', '=', record)
-  if (page.after !== undefined) query = query.where('ordinal', '>', page.after)
-  if (check === undefined) {
-    if (least !== undefined) query = query.where('utilisation', '>=', least)
-    if (exceeded !== undefined) query = query.where('exceeded', '=', exceeded ? 1 : 0)
-  } else {
-    query = query.where(({ exists, selectFrom }) => {
-      let checks = selectFrom('checks')
-        .select('checks.cap')
-        .whereRef('checks.record', '=', 'caps.record')
-        .whereRef('checks.cap', '=', 'caps.ordinal')
-        .where('check_kind', '=', check)
-      if (least !== undefined) checks = checks.where('checks.utilisation', '>=', least)
-      if (exceeded !== undefined) checks = checks.where('checks.exceeded', '=', exceeded ? 1 : 0)
-      return exists(checks)
-    })
-  }
-  return query.orderBy('ordinal').limit(page.limit).execute()
-}
+import type { CheckRow, NeighbourRow } from './tables.ts'
 
 /** One cap with its part of the result as canonical JSON. */
 export async function findCap(store: Store, record: string, mark: string) {

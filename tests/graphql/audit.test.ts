@@ -3,11 +3,12 @@ import { serverAudits } from 'graphql-http'
 import { afterAll, beforeAll, expect, test } from 'vitest'
 import { graphqlPlugin } from '../../src/graphql/plugin.ts'
 import { anonymous } from '../../src/store/actor.ts'
+import { emptyOffice } from './office.ts'
 
 const app = Fastify()
 let url = ''
 beforeAll(async () => {
-  await graphqlPlugin(app, { production: false, actorOf: () => anonymous })
+  await graphqlPlugin(app, { production: false, actorOf: () => anonymous, office: await emptyOffice() })
   url = `${await app.listen({ port: 0, host: '127.0.0.1' })}/graphql`
 })
 afterAll(() => app.close())

@@ -6,6 +6,7 @@ import { Problem } from '../../src/errors.ts'
 import { calculators } from '../../src/graphql/calculators.ts'
 import { graphqlPlugin } from '../../src/graphql/plugin.ts'
 import { anonymous } from '../../src/store/actor.ts'
+import { emptyOffice } from './office.ts'
 
 const file = (path: string) => readFileSync(new URL(path, import.meta.url), 'utf8')
 const schema = buildSchema(file('../../schema/schema.graphql'))
@@ -37,7 +38,7 @@ const requestOf = (role: Role, { layout, ...rest }: Record<string, unknown>) =>
   role === 'singlePile' ? rest : { ...rest, layout }
 
 const app = Fastify()
-beforeAll(() => graphqlPlugin(app, { production: true, actorOf: () => anonymous }))
+beforeAll(async () => graphqlPlugin(app, { production: true, actorOf: () => anonymous, office: await emptyOffice() }))
 afterAll(() => app.close())
 async function send(query: string, variables: unknown) {
   const headers = { accept: 'application/graphql-response+json' }

@@ -3,11 +3,12 @@ import { afterAll, beforeAll, describe, expect, test } from 'vitest'
 import { limits } from '../../src/graphql/limits.ts'
 import { graphqlPlugin } from '../../src/graphql/plugin.ts'
 import { anonymous } from '../../src/store/actor.ts'
+import { emptyOffice } from './office.ts'
 
 const apps: Record<'development' | 'production', FastifyInstance> = { development: Fastify(), production: Fastify() }
 beforeAll(async () => {
-  await graphqlPlugin(apps.development, { production: false, actorOf: () => anonymous })
-  await graphqlPlugin(apps.production, { production: true, actorOf: () => anonymous })
+  await graphqlPlugin(apps.development, { production: false, actorOf: () => anonymous, office: await emptyOffice() })
+  await graphqlPlugin(apps.production, { production: true, actorOf: () => anonymous, office: await emptyOffice() })
 })
 afterAll(() => Promise.all(Object.values(apps).map((app) => app.close())))
 

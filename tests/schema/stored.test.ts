@@ -147,6 +147,19 @@ test('every route of records, in each of its statuses that a request can bring a
     await tell('GET', path, { ...at, query: '?x=1' })
     await tell('GET', path, { id: 'none', slug: 'none', mark: 'A1' })
   }
+  await tell('GET', `${record}/changes`, { id })
+  const [first, ...others] = example.caps
+  const bent = { ...example, caps: [{ ...first, capWeight: 777 }, ...others] }
+  const next = (await tell('POST', assessments, { slug }, json(bent))).json().id
+  const changed = await tell('GET', `${record}/changes`, { id: next })
+  expect(changed.json().inputs).toMatchObject([{ part: 'cap', field: 'capWeight', after: 777, unit: 'kN' }])
+  await tell(
+    'GET',
+    `${record}/changes`,
+    { id: next, query: `?since=${id}` },
+    { headers: { 'if-none-match': changed.headers.etag } },
+  )
+  await tell('GET', `${record}/changes`, { id: next, query: '?since=none' })
   const signature = paths[`${record}/signatures`]!.post!.requestBody!.content['application/json']!.example
   await tell('POST', `${record}/signatures`, { id }, json(signature))
   await tell('POST', `${record}/signatures`, { id }, json(signature))
@@ -191,9 +204,13 @@ describe('the typed client', () => {
     for await (const cap of client.caps(record.id)) marks.push(cap.mark)
     expect(marks).toEqual(example.caps.map((cap) => cap.mark))
     expect((await client.cap(record.id, marks[0]!)).result.checks.length).toBeGreaterThan(0)
+    const second = await client.record('dock', { ...example, title: 'Second' })
+    expect((await client.changes(second.id)).inputs).toMatchObject([
+      { part: 'title', before: example.title, after: 'Second' },
+    ])
     expect((await client.sign(record.id, { role: 'originator', meaning: 'mine' })).signedHash).toBe(record.recordHash)
     const { checkpoint, holds } = await client.integrity('dock')
-    expect([holds, checkpoint]).toEqual([true, { revision: 1, hash: record.recordHash }])
+    expect([holds, checkpoint]).toEqual([true, { revision: 2, hash: second.recordHash }])
     expect((await client.integrity('dock', checkpoint)).holds).toBe(true)
     expect((await client.reverify(record.id)).identical).toBe(true)
     const fault = await client.assessment('none').catch((e: unknown) => e)

@@ -6,11 +6,12 @@ import { assessSchedule } from '../../src/operations/assess-schedule.ts'
 import { draftRecord } from '../../src/operations/draft-record.ts'
 import { anonymous } from '../../src/store/actor.ts'
 import { appendRecord } from '../../src/store/append-record.ts'
+import { listCaps } from '../../src/store/cap-pages.ts'
 import { NOTHING, recordHash } from '../../src/store/chain.ts'
 import { migrations } from '../../src/store/migrations/list.ts'
 import { openStore } from '../../src/store/open-store.ts'
 import { putProject } from '../../src/store/projects.ts'
-import { findCap, findTrace, listCaps, listChecks } from '../../src/store/read-caps.ts'
+import { findCap, findTrace, listChecks } from '../../src/store/read-caps.ts'
 import { findRecord, listRecords } from '../../src/store/read-records.ts'
 import { bothDatabases, closeStores, emptyStore } from './databases.ts'
 
@@ -31,8 +32,8 @@ describe.each(bothDatabases())('on $name', (database) => {
     expect(await findRecord(store, record.id)).toEqual(head)
     expect(record).toMatchObject({ revision: 1, previous_hash: NOTHING, actor: 'anonymous' })
     expect(record.record_hash).toBe(recordHash(record))
-    const caps = await listCaps(store, record.id, {}, { limit: 100 })
-    expect(caps).toEqual(draft.caps.map(({ body, ...row }) => ({ record: record.id, ...row })))
+    const caps = await listCaps(store, [record.id], {}, 'schedule', { limit: 100 })
+    expect(caps).toEqual(draft.caps.map(({ body, ...row }) => ({ record: record.id, ...row, rank: row.ordinal })))
     expect(await listChecks(store, record.id)).toHaveLength(draft.checks.length)
     const cap = await findCap(store, record.id, caps[0]!.mark)
     expect(JSON.parse(cap!.body)).toMatchObject({ mark: caps[0]!.mark })

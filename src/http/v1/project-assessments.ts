@@ -2,6 +2,7 @@ import { createHash } from 'node:crypto'
 import type { FastifyInstance, FastifyRequest } from 'fastify'
 import { Problem } from '../../errors.ts'
 import { answerOnce, type Keep, type Reply } from '../../operations/answer-once.ts'
+import { assessmentList } from '../../operations/find-assessments.ts'
 import type { Office } from '../../operations/office.ts'
 import { listAssessments } from '../../operations/read-assessment.ts'
 import { recordAssessment } from '../../operations/record-assessment.ts'
@@ -57,8 +58,10 @@ export function projectAssessments(app: FastifyInstance, office: Office, bodyLim
     return reply.code(status).headers(headers).send(body)
   })
   app.get<Slug>('/v1/projects/:slug/assessments', async (request, reply) => {
-    const { limit, page } = askedPage<number>(request, readQuery(request, paging))
-    const rows = await listAssessments(office, request.actor!, request.params.slug, page)
-    return pageOf(request, reply, rows, limit, (row) => row.revision)
+    const { slug } = request.params
+    const list = assessmentList({ project: slug }, 'oldest')
+    const { limit, page } = askedPage<number>(list, readQuery(request, paging))
+    const rows = await listAssessments(office, request.actor!, slug, page)
+    return pageOf(request, reply, list, rows, limit, (row) => row.revision)
   })
 }

@@ -1,5 +1,5 @@
 import type { FastifyInstance } from 'fastify'
-import { getProject, listProjects } from '../../operations/list-projects.ts'
+import { getProject, listProjects, projectList } from '../../operations/list-projects.ts'
 import type { Office } from '../../operations/office.ts'
 import { putProject } from '../../operations/put-project.ts'
 import { sendTagged, tagsOf } from '../conditional.ts'
@@ -11,9 +11,9 @@ type Slug = { Params: { slug: string } }
 /** Projects: made and renamed by PUT, read one by one and as a list. */
 export function projects(app: FastifyInstance, office: Office): void {
   app.get('/v1/projects', async (request, reply) => {
-    const { limit, page } = askedPage<string>(request, readQuery(request, paging))
+    const { limit, page } = askedPage<string>(projectList, readQuery(request, paging))
     const rows = await listProjects(office, request.actor!, page)
-    return pageOf(request, reply, rows, limit, (row) => row.slug)
+    return pageOf(request, reply, projectList, rows, limit, (row) => row.slug)
   })
   app.get<Slug>('/v1/projects/:slug', async (request, reply) => {
     const { tag, project } = await getProject(office, request.actor!, request.params.slug)
