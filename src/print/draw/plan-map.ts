@@ -10,6 +10,8 @@ import { round } from './frame.ts'
 
 /** Distance between neighbouring caps on the drawing: wide where there are few, since utilisations stand beside them. */
 const [WIDE, NARROW, FEW] = [180, 104, 40]
+/** Two revisions stand beside each other on a usual screen when each keeps to HALF; caps closer than LEAST would cover each other. */
+const [HALF, LEAST] = [390, 76]
 const [LARGEST, MARGIN] = [3600, 64]
 /** Beyond this many caps the single piles would be dots of ink: their outline stands for them. */
 const MOST_WITH_PILES = 150
@@ -32,7 +34,8 @@ export function planMap(
   ]
   const extent = Math.max(x1 - x0, y1 - y0, 1)
   const apart = usualDistance(beside ? [record, beside.record] : [record])
-  const scale = Math.min((beside || caps.length > FEW ? NARROW : WIDE) / apart, LARGEST / extent)
+  const usual = Math.min((beside || caps.length > FEW ? NARROW : WIDE) / apart, LARGEST / extent)
+  const scale = beside ? Math.min(usual, Math.max(HALF / (x1 - x0 || 1), LEAST / apart)) : usual
   const x = scaleLinear([x0, x1 === x0 ? x0 + 1 : x1], [MARGIN, MARGIN + Math.max(1, (x1 - x0) * scale)])
   const y = scaleLinear([y0, y1 === y0 ? y0 + 1 : y1], [MARGIN + Math.max(1, (y1 - y0) * scale), MARGIN])
   const [width, height] = [(x1 - x0) * scale + 2 * MARGIN + 40, (y1 - y0) * scale + 2 * MARGIN + 30]
@@ -41,7 +44,14 @@ export function planMap(
     caps.flatMap((c) => (c.settlement === undefined ? [] : [{ x: x(c.x), y: y(c.y), value: c.settlement }])),
     levels,
   )
-  const discs = caps.map((c): Disc => [x(c.x), y(c.y), reach(record, c) * scale])
+  // What a label of a contour keeps clear of: each cap, and its mark below it.
+  const discs = caps.flatMap((c): Disc[] => {
+    const r = reach(record, c) * scale
+    return [
+      [x(c.x), y(c.y), r],
+      [x(c.x) - r + 34, y(c.y) + r + 8, 14],
+    ]
+  })
   const labels: Spot[] = []
   const drawn = lines.map(({ level, segments }) => {
     const d = segments.map(([a, b, c, e]) => `M${round(a)} ${round(b)}L${round(c)} ${round(e)}`).join('')
@@ -83,7 +93,7 @@ function labelPlace(
     const own = Math.min(near(at, labels), near(at, discs))
     if (own > room) [best, room] = [at, own]
   }
-  return room > 20 ? best : undefined
+  return room > 22 ? best : undefined
 }
 
 function capMark(
@@ -123,9 +133,12 @@ function usualDistance(records: readonly AssessmentRecord[]): number {
   return distances[Math.floor(distances.length / 4)] || 10
 }
 
-/** How far the piles of a cap reach from its place, m. */
-const reach = ({ schedule }: AssessmentRecord, { index }: PlanCap): number =>
-  Math.max(...positions(schedule.caps[index]!.layout).map((p) => Math.max(Math.abs(p.x), Math.abs(p.y))))
+/** How far the outline of a cap reaches from its place, m. */
+function reach({ schedule }: AssessmentRecord, { index }: PlanCap): number {
+  const { layout, pileType } = schedule.caps[index]!
+  const points = positions(layout).map((p) => Math.max(Math.abs(p.x), Math.abs(p.y)))
+  return Math.max(...points) + sectionWidth(schedule.pileTypes[pileType]!.section)
+}
 
 function settlementLevels(caps: readonly PlanCap[]): number[] {
   const known = caps.flatMap((c) => c.settlement ?? [])
