@@ -27,9 +27,9 @@ export function pileSchedule(record: AssessmentRecord): string {
     title: `${subject}, schedule of piles`,
     strip: paperStrip(record, 'Schedule of piles'),
     wide: true,
-    body: html`${titleBlock(record, subject, 'Schedule of piles')}
+    body: html`${titleBlock(record, subject, 'Schedule of piles')}${record.id !== undefined && html`<nav class="contents" aria-label="Other pages of this record"><a class="leaves" href="${overviewAt(record.id)}">All caps</a><a class="leaves" href="${pilesCsvAt(record.id)}">The same as CSV</a></nav>`}
 <main><section id="piles"><h2>Piles</h2>
-<p class="rule">x and y are the place of the cap plus that of the pile in its layout. Cut-off and toe are depths below the surface of the cap's ground profile. Load, resistance and utilisation are those of the most loaded pile of the cap: all piles of a cap are built alike.</p>${record.id !== undefined && html`<nav class="contents" aria-label="Other pages of this record"><a class="leaves" href="${overviewAt(record.id)}">All caps</a><a class="leaves" href="${pilesCsvAt(record.id)}">The same as CSV</a></nav>`}
+<p class="rule">x and y are the place of the cap plus that of the pile in its layout. Cut-off and toe are depths below the surface of the cap's ground profile. Load, resistance and utilisation are those of the most loaded pile of the cap: all piles of a cap are built alike.</p>
 <div class="wide" tabindex="0" role="region" aria-label="Piles"><table class="checks"><thead><tr>${head('cap')}${head('pile', '', true)}${head('type')}${head('x', 'm', true)}${head('y', 'm', true)}${head('cut-off', 'm', true)}${head('toe level', 'm', true)}${head('design load', '', true)}${head('resistance', '', true)}${head('utilisation', '', true)}${head('governs')}</tr></thead><tbody>
 ${joined(rows)}</tbody></table></div>
 <p class="caution">${record.reply.notices[0]?.text}</p></section></main>`,

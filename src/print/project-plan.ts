@@ -29,17 +29,17 @@ export function projectPlan(record: AssessmentRecord, options: PlanOptions = {})
   const strained = neighbours.filter((n) => n.satisfied === false)
   const what = check ? checkWords[check].name : 'largest utilisation'
   const name = (r: AssessmentRecord) => (r.revision === undefined ? 'This assessment' : `Revision ${r.revision}`)
-  const map = (r: AssessmentRecord, all: readonly PlanCap[], id: string) =>
-    html`<div class="sheetlet"><h3>${name(r)}</h3><div class="wide" tabindex="0" role="region" aria-label="Plan, ${name(r)}">${planMap(id, r, all, `Caps in plan, ${what}, ${name(r)}`, previous !== undefined)}</div></div>`
+  const map = (r: AssessmentRecord, all: readonly PlanCap[], id: string, beside?: Parameters<typeof planMap>[4]) =>
+    html`<div class="sheetlet"><h3>${name(r)}</h3><div class="wide" tabindex="0" role="region" aria-label="Plan, ${name(r)}">${planMap(id, r, all, `Caps in plan, ${what}, ${name(r)}`, beside)}</div></div>`
   const body = html`${titleBlock(record, record.schedule.title, 'Plan of the caps')}${others(record, options)}
 <main>
 <section id="verdict"><h2>Question and verdict</h2><p class="question">Which caps exceed, what governs them, and which neighbours settle apart too far?</p>
-<p class="answer ${summary.exceeded > 0 || strained.length > 0 ? 'fails' : 'stands'}"><strong>${summary.exceeded > 0 ? html`${summary.exceeded} of ${summary.caps}` : html`All ${summary.caps}`}</strong> <span>${summary.exceeded > 0 ? 'caps exceed a check' : 'caps hold every check'}${summary.worst && html`; largest utilisation ${short(summary.worst.utilisation)}: ${worstWords(summary.worst)} in ${summary.worst.combination}`}</span></p>
+<p class="answer ${summary.exceeded > 0 || strained.length > 0 ? 'fails' : 'stands'}"><strong>${summary.exceeded > 0 ? html`${summary.exceeded} of ${summary.caps}` : html`All ${summary.caps}`}</strong> <span>${summary.exceeded > 0 ? (summary.exceeded === 1 ? 'caps exceeds a check' : 'caps exceed a check') : 'caps hold every check'}${summary.worst && html`; largest utilisation ${short(summary.worst.utilisation)}: ${worstWords(summary.worst)} in ${summary.worst.combination}`}</span></p>
 <p>${strained.length > 0 ? html`<strong class="exceeds">Neighbours that distort too much:</strong> ${joined(strained.map((n, i) => html`${i > 0 && ', '}${n.a}–${n.b} (utilisation ${short(n.utilisation!)})`))}.` : 'No two neighbours distort too much.'}</p>
 <p class="caution">${record.reply.notices[0]?.text}</p></section>
 <section id="plan"><h2>Plan, ${what}</h2>${filters(options)}
 <p class="legend">Outlines of the piles to scale. Stack of four courses: utilisation, a quarter each; a fifth course, crossed: exceeded. Dashed lines: equal settlement, straight between caps. Double line: neighbours that distort too much, with their utilisation.</p>
-<div class="plans">${previous && before && map(previous, before, 'before')}${map(record, caps, 'now')}</div></section>
+<div class="plans">${previous && before && map(previous, before, 'before', { record, caps })}${map(record, caps, 'now', previous && before && { record: previous, caps: before })}</div></section>
 ${previous && before && changes(previous, before, record, caps)}
 <section id="caps"><h2>Caps by ${what}</h2>${table(record, caps, before)}</section>
 </main>`
@@ -124,5 +124,5 @@ function changes(
   })
   const names = (list: readonly PlanCap[]) => list.map((c) => c.mark).join(', ')
   return html`<section id="changes"><h2>What changed since revision ${previous.revision}</h2>
-${added.length > 0 && html`<p>Caps added: ${names(added)}.</p>`}${gone.length > 0 && html`<p>Caps gone: ${names(gone)}.</p>`}${rows.length === 0 ? html`<p>No cap has another utilisation or another question.</p>` : html`<div class="wide" tabindex="0" role="region" aria-label="Changes"><table class="checks"><thead><tr><th scope="col">cap</th><th scope="col" class="num">before</th><th scope="col" class="num">now</th><th scope="col">utilisation</th><th scope="col">now governs</th><th scope="col">verdict</th><th scope="col">asked otherwise</th></tr></thead><tbody>${joined(rows)}</tbody></table></div>`}</section>`
+${added.length > 0 && html`<p>Caps added: ${names(added)}.</p>`}${gone.length > 0 && html`<p>Caps gone: ${names(gone)}.</p>`}${rows.length === 0 ? html`<p>No cap has another utilisation or another question.</p>` : html`<div class="wide" tabindex="0" role="region" aria-label="Changes"><table class="checks"><thead><tr><th scope="col">cap</th><th scope="col" class="num">before</th><th scope="col" class="num">now</th><th scope="col">utilisation</th><th scope="col">now governs</th><th scope="col">verdict</th><th scope="col">changed input</th></tr></thead><tbody>${joined(rows)}</tbody></table></div>`}</section>`
 }

@@ -8,7 +8,7 @@ const roles = [
 ] as const
 
 const when = (time: string | undefined) =>
-  time && html`<time datetime="${time}">${time.slice(0, 16).replace('T', ' ')}</time>`
+  time && html`<time datetime="${time}">${time.slice(0, 16).replace('T', ' ')} UTC</time>`
 
 /** Who answers for the page, for what, and which record it is of. Lines for signatures stay open on paper until somebody signs. */
 export function titleBlock(issue: Issue, subject: string, what: string): Markup {

@@ -10,6 +10,8 @@ import { round } from './frame.ts'
 
 /** Distance between neighbouring caps on the drawing: wide where there are few, since utilisations stand beside them. */
 const [WIDE, NARROW, FEW] = [180, 104, 40]
+/** Two revisions stand beside each other on a usual screen when each keeps to HALF; caps closer than LEAST would cover each other. */
+const [HALF, LEAST] = [390, 76]
 const [LARGEST, MARGIN] = [3600, 64]
 /** Beyond this many caps the single piles would be dots of ink: their outline stands for them. */
 const MOST_WITH_PILES = 150
@@ -20,29 +22,40 @@ export function planMap(
   record: AssessmentRecord,
   caps: readonly PlanCap[],
   title: string,
-  narrow: boolean,
+  /** Another revision that is drawn beside this one: both over the same ground, to one scale, with the same lines. */
+  beside?: { readonly record: AssessmentRecord; readonly caps: readonly PlanCap[] },
 ): Markup {
+  const all = [...caps, ...(beside?.caps ?? [])]
   const [x0, x1, y0, y1] = [
-    Math.min(...caps.map((c) => c.x)),
-    Math.max(...caps.map((c) => c.x)),
-    Math.min(...caps.map((c) => c.y)),
-    Math.max(...caps.map((c) => c.y)),
+    Math.min(...all.map((c) => c.x)),
+    Math.max(...all.map((c) => c.x)),
+    Math.min(...all.map((c) => c.y)),
+    Math.max(...all.map((c) => c.y)),
   ]
   const extent = Math.max(x1 - x0, y1 - y0, 1)
-  const scale = Math.min((narrow || caps.length > FEW ? NARROW : WIDE) / usualDistance(record), LARGEST / extent)
+  const apart = usualDistance(beside ? [record, beside.record] : [record])
+  const usual = Math.min((beside || caps.length > FEW ? NARROW : WIDE) / apart, LARGEST / extent)
+  const scale = beside ? Math.min(usual, Math.max(HALF / (x1 - x0 || 1), LEAST / apart)) : usual
   const x = scaleLinear([x0, x1 === x0 ? x0 + 1 : x1], [MARGIN, MARGIN + Math.max(1, (x1 - x0) * scale)])
   const y = scaleLinear([y0, y1 === y0 ? y0 + 1 : y1], [MARGIN + Math.max(1, (y1 - y0) * scale), MARGIN])
   const [width, height] = [(x1 - x0) * scale + 2 * MARGIN + 40, (y1 - y0) * scale + 2 * MARGIN + 30]
-  const levels = settlementLevels(caps)
+  const levels = settlementLevels(all)
   const lines = contours(
     caps.flatMap((c) => (c.settlement === undefined ? [] : [{ x: x(c.x), y: y(c.y), value: c.settlement }])),
     levels,
   )
-  const centres = caps.map((c): Spot => [x(c.x), y(c.y)])
+  // What a label of a contour keeps clear of: each cap, and its mark below it.
+  const discs = caps.flatMap((c): Disc[] => {
+    const r = reach(record, c) * scale
+    return [
+      [x(c.x), y(c.y), r],
+      [x(c.x) - r + 34, y(c.y) + r + 8, 14],
+    ]
+  })
   const labels: Spot[] = []
   const drawn = lines.map(({ level, segments }) => {
     const d = segments.map(([a, b, c, e]) => `M${round(a)} ${round(b)}L${round(c)} ${round(e)}`).join('')
-    const at = labelPlace(segments, labels, centres)
+    const at = labelPlace(segments, labels, discs)
     if (at) labels.push(at)
     return html`<path class="contour" d="${d}"/>${at && html`<text class="tick halo mid" x="${round(at[0])}" y="${round(at[1] + 3)}">${short(level)} mm</text>`}`
   })
@@ -60,26 +73,27 @@ export function planMap(
 }
 
 type Scale = (n: number) => number
-type Spot = readonly [number, number]
+type Spot = readonly [x: number, y: number]
+type Disc = readonly [x: number, y: number, radius: number]
 
 /** Where the label of a contour stands clear of other labels and of the caps; nowhere, where it would not. */
 function labelPlace(
   segments: readonly (readonly [number, number, number, number])[],
   labels: readonly Spot[],
-  centres: readonly Spot[],
+  discs: readonly Disc[],
 ): Spot | undefined {
   const every = Math.max(1, Math.floor(segments.length / 12))
-  const near = (at: Spot, all: readonly Spot[]) =>
-    all.reduce((least, p) => Math.min(least, Math.hypot(p[0] - at[0], p[1] - at[1])), 1e9)
+  const near = ([x, y]: Spot, all: readonly (Spot | Disc)[]) =>
+    all.reduce((least, [a, b, radius = 0]) => Math.min(least, Math.hypot(a - x, b - y) - radius), 1e9)
   let best: Spot | undefined
   let room = 0
   for (let i = 0; i < segments.length; i += every) {
     const [a, b, c, e] = segments[i]!
     const at: Spot = [(a + c) / 2, (b + e) / 2]
-    const own = Math.min(2 * near(at, labels), near(at, centres))
+    const own = Math.min(near(at, labels), near(at, discs))
     if (own > room) [best, room] = [at, own]
   }
-  return room > 38 ? best : undefined
+  return room > 22 ? best : undefined
 }
 
 function capMark(
@@ -114,9 +128,16 @@ function capMark(
 }
 
 /** The distance at which neighbouring caps usually stand, m: the middle one, so that a lone cap far off does not shrink the rest. */
-function usualDistance({ reply }: AssessmentRecord): number {
-  const distances = reply.result.neighbours.map((n) => n.distance).sort((a, b) => a - b)
+function usualDistance(records: readonly AssessmentRecord[]): number {
+  const distances = records.flatMap(({ reply }) => reply.result.neighbours.map((n) => n.distance)).sort((a, b) => a - b)
   return distances[Math.floor(distances.length / 4)] || 10
+}
+
+/** How far the outline of a cap reaches from its place, m. */
+function reach({ schedule }: AssessmentRecord, { index }: PlanCap): number {
+  const { layout, pileType } = schedule.caps[index]!
+  const points = positions(layout).map((p) => Math.max(Math.abs(p.x), Math.abs(p.y)))
+  return Math.max(...points) + sectionWidth(schedule.pileTypes[pileType]!.section)
 }
 
 function settlementLevels(caps: readonly PlanCap[]): number[] {
