@@ -6,7 +6,7 @@ import { fileURLToPath } from 'node:url'
 import { promisify } from 'node:util'
 import { afterAll, beforeAll, expect, test } from 'vitest'
 import type { Schemas } from '../schema/client.ts'
-import { type Started, startService } from './service/start-service.ts'
+import { endService, type Started, startService } from './service/start-service.ts'
 
 /** README's examples are run as a reader would: each fenced block as it stands, but for the address of the service. */
 
@@ -55,7 +55,7 @@ beforeAll(async () => {
   await writeFile(join(folder, 'package.json'), '{ "type": "module" }')
 })
 afterAll(async () => {
-  service?.child.kill('SIGKILL')
+  await endService(service)
   if (folder) await rm(folder, { recursive: true, force: true })
 })
 

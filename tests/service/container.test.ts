@@ -9,7 +9,7 @@ import { promisify } from 'node:util'
 import { afterAll, beforeAll, expect, test } from 'vitest'
 import { buildImage, type Image } from './build-image.ts'
 import { isSent, readCommand, readDockerfile } from './dockerfile.ts'
-import { type Started, startService } from './start-service.ts'
+import { endService, type Started, startService } from './start-service.ts'
 
 const run = promisify(execFile)
 const tree = fileURLToPath(new URL('../../', import.meta.url))
@@ -56,7 +56,7 @@ beforeAll(async () => {
 }, 180_000)
 
 afterAll(async () => {
-  service?.child.kill('SIGKILL')
+  await endService(service)
   permit(folder, true)
   await rm(folder, { recursive: true, force: true })
 })

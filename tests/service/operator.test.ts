@@ -9,7 +9,7 @@ import { fileURLToPath } from 'node:url'
 import { afterEach, beforeEach, expect, test } from 'vitest'
 import { kentledge, type Schemas } from '../../schema/client.ts'
 import { readExamples } from '../../src/contract/examples.ts'
-import { freePort, type Started, startService } from './start-service.ts'
+import { endService, freePort, type Started, startService } from './start-service.ts'
 
 /** What an operator does with the commands, beside a service that runs. */
 
@@ -21,12 +21,7 @@ beforeEach(() => {
   folder = mkdtempSync(join(tmpdir(), 'kentledge-operator-'))
 })
 afterEach(async () => {
-  for (const { child } of started.splice(0)) {
-    if (child.exitCode !== null || child.signalCode !== null) continue
-    const exit = once(child, 'exit')
-    child.kill('SIGKILL')
-    await exit
-  }
+  for (const service of started.splice(0)) await endService(service)
   rmSync(folder, { recursive: true, force: true })
 })
 

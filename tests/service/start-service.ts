@@ -59,3 +59,12 @@ export async function startService(start: Start = {}): Promise<Started> {
   child.kill('SIGKILL')
   throw new Error(`the service did not start (exit code ${child.exitCode}): ${failed?.message ?? ''}${log}`)
 }
+
+/** Ends a service at once, and waits until its folder is gone too. */
+export async function endService(service: Started | undefined): Promise<void> {
+  const { child } = service ?? {}
+  if (!child || child.exitCode !== null || child.signalCode !== null) return
+  const exit = once(child, 'exit')
+  child.kill('SIGKILL')
+  await exit
+}
