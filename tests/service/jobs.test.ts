@@ -108,7 +108,8 @@ describe.each(bothDatabases())('on $name', (database) => {
     await wait(200)
     const begun = performance.now()
     expect(await kill(second, 'SIGTERM')).toEqual([0, null])
-    expect(performance.now() - begun).toBeLessThan(2500)
+    // The job itself would take minutes.
+    expect(performance.now() - begun).toBeLessThan(20_000)
     expect(await stream).not.toMatch(/event: (completed|failed)/)
 
     const third = await start(env)
