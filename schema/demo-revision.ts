@@ -7,7 +7,7 @@ export type Demo = { title: string; ground: Record<string, Profile> }
 
 /** Three reactions of the model, kN and kN.m. */
 const reactions = [
-  { cap: 'A3', combination: 'W1', column: 'Fz', value: 3990 },
+  { cap: 'A3', combination: 'W1', column: 'Fz', value: 4100 },
   { cap: 'C2', combination: 'W2', column: 'My', value: 20 },
   { cap: 'C4', combination: 'W1', column: 'Fz', value: 3050 },
 ]

@@ -13,6 +13,7 @@ const parts: Readonly<Record<string, () => Promise<readonly Finding[]>>> = {
     ...(await (await import('./overload.ts')).overload()),
   ],
   f: async () => (await import('./records.ts')).records(),
+  g: async () => (await import('./dashboards.ts')).dashboards(),
 }
 
 const print = (line: string) => process.stdout.write(`${line}\n`)
