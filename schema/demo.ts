@@ -1,6 +1,5 @@
 import { spawn } from 'node:child_process'
 import { once } from 'node:events'
-import { openAsBlob } from 'node:fs'
 import { mkdtemp, readFile, rm } from 'node:fs/promises'
 import { createServer } from 'node:net'
 import { tmpdir } from 'node:os'
@@ -8,8 +7,12 @@ import { join } from 'node:path'
 import { setTimeout as wait } from 'node:timers/promises'
 import { fileURLToPath } from 'node:url'
 import { kentledge, type Schemas } from './client.ts'
+import { type Demo, movedGround, movedLoads, tellChanges } from './demo-revision.ts'
 
-/** Starts the service, posts the demo schedule and its CSV of reactions as a model exporter would, prints the verdicts, stops the service. */
+/**
+ * Starts the service, posts the demo schedule and its CSV of reactions as a model exporter would, prints the verdicts; keeps it
+ * in a project, posts the next revision, prints what changed; stops the service.
+ */
 
 type Answer = Schemas['AssessmentAnswer']
 
@@ -100,12 +103,22 @@ async function linksOf(address: string): Promise<string[]> {
   return paths.filter((_, i) => found[i])
 }
 
+/** Keeps the schedule as revision 1 of a project, what the model says a week later as revision 2, and tells what changed. */
+async function printRevisions(client: ReturnType<typeof kentledge>, schedule: Demo, loads: string): Promise<void> {
+  await client.putProject('river-quay', schedule.title)
+  const first = await client.recordCsv('river-quay', schedule, loads)
+  const second = await client.recordCsv('river-quay', movedGround(schedule), movedLoads(loads))
+  print(`Kept in project river-quay as ${first.recordHash} and ${second.recordHash}.`)
+  for (const line of tellChanges(await client.changes(second.id))) print(line)
+}
+
 const dataDir = await mkdtemp(join(tmpdir(), 'kentledge-demo-'))
 const { service, address } = await startService(dataDir)
 try {
-  const schedule = JSON.parse(await readFile(example('demo-schedule.json'), 'utf8')) as { title: string }
-  const loads = await openAsBlob(example('demo-loads.csv'), { type: 'text/csv' })
-  const answer = await kentledge({ baseUrl: address }).assessCsv(schedule, loads)
+  const schedule = JSON.parse(await readFile(example('demo-schedule.json'), 'utf8')) as Demo
+  const loads = await readFile(example('demo-loads.csv'), 'utf8')
+  const client = kentledge({ baseUrl: address })
+  const answer = await client.assessCsv(schedule, loads)
   print(schedule.title)
   print()
   printVerdicts(answer.result)
@@ -114,6 +127,8 @@ try {
   print()
   print(`${answer.meta.engine}, request ${answer.meta.requestHash}`)
   print(answer.notices[0]?.text)
+  print()
+  await printRevisions(client, schedule, loads)
   print()
   print('`npm start` keeps the service up. Then open:')
   for (const path of await linksOf(address)) print(`  http://127.0.0.1:8080${path}`)

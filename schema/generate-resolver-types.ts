@@ -28,6 +28,8 @@ export async function resolverTypes(): Promise<string> {
         Assessment: '../operations/show-record.ts#ShownRecord',
         Cap: '../operations/read-many.ts#CapNode',
         Changes: '../operations/changes-in-thread.ts#ToldChanges',
+        Job: '../operations/show-job.ts#ShownJob',
+        JobConnection: './nodes.ts#JobConnectionNode',
         CapAggregates: './nodes.ts#AggregateNode',
         ProjectConnection: './nodes.ts#ProjectConnectionNode',
         AssessmentConnection: './nodes.ts#AssessmentConnectionNode',

@@ -1673,10 +1673,12 @@ export interface components {
                 readonly aliases: number;
                 /** @description tokens of a document */
                 readonly tokens: number;
-                /** @description cost of a document: 10 for group and settlement, 5 for singlePile and block, 1 for other fields */
+                /** @description objects of an answer, as many as its lists may hold; hundreds for a calculator, a trace and a comparison of revisions */
                 readonly cost: number;
                 /** @description characters of a document */
                 readonly characters: number;
+                /** @description subscriptions that are open in one socket */
+                readonly subscriptions: number;
             };
         };
         readonly Project: {

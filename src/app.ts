@@ -9,6 +9,7 @@ import { engineVersion } from './engine/index.ts'
 import { Problem } from './errors.ts'
 import { limits as documentLimits } from './graphql/limits.ts'
 import { graphqlPlugin } from './graphql/plugin.ts'
+import { sockets } from './graphql/sockets.ts'
 import { accessLog, traceIdOf } from './http/access-log.ts'
 import { answerClientError } from './http/client-errors.ts'
 import { type Drain, drain } from './http/drain.ts'
@@ -92,6 +93,7 @@ export async function buildService(config: Config, store: Store): Promise<Servic
     await pool.close()
     await store.close()
   })
+  await sockets(app)
   const stop = drain(app)
   accessLog(app)
   guard(app, authenticate({ store }, config.AUTH))

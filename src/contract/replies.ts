@@ -258,7 +258,10 @@ export const limitList = z.strictObject({
     depth: most('fields above one another in a document'),
     aliases: most('aliases in a document'),
     tokens: most('tokens of a document'),
-    cost: most('cost of a document: 10 for group and settlement, 5 for singlePile and block, 1 for other fields'),
+    cost: most(
+      'objects of an answer, as many as its lists may hold; hundreds for a calculator, a trace and a comparison of revisions',
+    ),
     characters: most('characters of a document'),
+    subscriptions: most('subscriptions that are open in one socket'),
   }),
 })

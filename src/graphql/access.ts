@@ -7,6 +7,7 @@ export const access: Readonly<Record<string, readonly Scope[] | 'any key'>> = {
   'Query.project': ['read'],
   'Query.assessments': ['read'],
   'Query.assessment': ['read'],
+  'Query.jobs': ['read'],
   'Query.singlePile': ['calculate'],
   'Query.block': ['calculate'],
   'Query.group': ['calculate'],
@@ -15,6 +16,7 @@ export const access: Readonly<Record<string, readonly Scope[] | 'any key'>> = {
   'Query.method': 'any key',
   'Query.sources': 'any key',
   'Query.limits': 'any key',
+  'Subscription.assessmentProgress': ['read'],
 }
 
 /**

@@ -7,6 +7,7 @@ import { type FormatOptions, formatError } from './error-format.ts'
 import { judgeVariables } from './judge-variables.ts'
 import { type GraphqlMediaType, legacy, modern, negotiate } from './media-type.ts'
 import { type GraphqlRequest, readRequest, refuseJson } from './read-request.ts'
+import { subscriptions } from './subscriptions.ts'
 
 const notAcceptable = {
   type: '/problems/not-acceptable',
@@ -81,6 +82,7 @@ export function graphqlRoute(app: FastifyInstance, options: RouteOptions): void 
     const answer = await run(app, read, options, options.actorOf(request))
     return send(statusUnder(type, answer), answer)
   }
-  app.get('/graphql', handler)
+  const wsHandler = subscriptions(app, options)
+  app.route({ method: 'GET', url: '/graphql', handler, wsHandler })
   app.post('/graphql', handler)
 }

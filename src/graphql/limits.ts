@@ -9,6 +9,8 @@ export const limits = {
   cost: 10_000,
   /** Characters of a document: one token may be a very long string, and parsed documents are kept. */
   characters: 32_768,
+  /** Subscriptions that are open in one socket. */
+  subscriptions: 10,
 } as const
 
 /** Cost of a field that takes longer than an object of an answer, about its computing time; any other with fields of its own costs 1. */

@@ -29,6 +29,8 @@ export async function graphqlPlugin(app: FastifyInstance, options: GraphqlOption
     schema: await readFile(new URL('../../schema/schema.graphql', import.meta.url), 'utf8'),
     resolvers: resolvers(bodyBytes) as Parameters<typeof app.graphql.defineResolvers>[0],
     routes: false,
+    // Lets its resolvers subscribe; the socket is our own, like the route.
+    subscription: true,
     // Compiled aside, after the second use. Compiled at a use of its own (a number here), that use skips the check of
     // the variables, and a misfit fails without a reason.
     jit: { minCount: 2, eluThreshold: 1 },

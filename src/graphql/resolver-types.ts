@@ -7,7 +7,8 @@ import type { ShownProject } from '../operations/put-project.ts';
 import type { ShownRecord } from '../operations/show-record.ts';
 import type { CapNode } from '../operations/read-many.ts';
 import type { ToldChanges } from '../operations/changes-in-thread.ts';
-import type { AggregateNode, ProjectConnectionNode, AssessmentConnectionNode, CapConnectionNode, NeighbourConnectionNode } from './nodes.ts';
+import type { ShownJob } from '../operations/show-job.ts';
+import type { JobConnectionNode, AggregateNode, ProjectConnectionNode, AssessmentConnectionNode, CapConnectionNode, NeighbourConnectionNode } from './nodes.ts';
 import type { Context } from './context.ts';
 export type Maybe<T> = T | null;
 export type InputMaybe<T> = Maybe<T>;
@@ -42,6 +43,8 @@ export type Query = {
   readonly assessments: AssessmentConnection;
   /** One assessment; an error where there is none, or the key has no right to it. */
   readonly assessment?: Maybe<Assessment>;
+  /** Assessments that are no records yet, or never will be, as one flat list, oldest first. */
+  readonly jobs: JobConnection;
   /** Resistance of one pile in compression or uplift. */
   readonly singlePile: SinglePileAnswer;
   /** Resistance of the prism of soil and piles that a layout encloses. */
@@ -89,6 +92,16 @@ export type QueryAssessmentArgs = {
 };
 
 
+export type QueryJobsArgs = {
+  project?: InputMaybe<Scalars['String']['input']>;
+  state?: InputMaybe<JobState>;
+  from?: InputMaybe<Scalars['String']['input']>;
+  to?: InputMaybe<Scalars['String']['input']>;
+  first?: InputMaybe<Scalars['Int']['input']>;
+  after?: InputMaybe<Scalars['String']['input']>;
+};
+
+
 export type QuerySinglePileArgs = {
   request: SinglePileRequestInput;
 };
@@ -112,6 +125,30 @@ export type QuerySettlementArgs = {
 export type QueryMethodArgs = {
   id: Scalars['String']['input'];
   kind?: InputMaybe<Scalars['String']['input']>;
+};
+
+/** By websocket (protocol graphql-transport-ws) at the same address; the key in the header of the request that opens it. */
+export type Subscription = {
+  readonly __typename?: 'Subscription';
+  /** How far an assessment is: at once, then with each change, until it ends. */
+  readonly assessmentProgress: AssessmentProgress;
+};
+
+
+/** By websocket (protocol graphql-transport-ws) at the same address; the key in the header of the request that opens it. */
+export type SubscriptionAssessmentProgressArgs = {
+  id: Scalars['ID']['input'];
+};
+
+export type AssessmentProgress = {
+  readonly __typename?: 'AssessmentProgress';
+  readonly id: Scalars['ID']['output'];
+  /** queued | running | failed | cancelled | completed */
+  readonly state: Scalars['String']['output'];
+  /** Caps that are through. */
+  readonly done: Scalars['Int']['output'];
+  /** Of so many; null until the schedule has been read. */
+  readonly caps?: Maybe<Scalars['Int']['output']>;
 };
 
 export type SinglePileRequestInput = {
@@ -906,14 +943,33 @@ export type AssessmentChangesArgs = {
 export type Summary = {
   readonly __typename?: 'Summary';
   readonly caps: Scalars['Int']['output'];
+  /** Caps with every check satisfied. */
   readonly satisfied: Scalars['Int']['output'];
+  /** Caps with a check exceeded; neighbours are counted in checks alone. */
   readonly exceeded: Scalars['Int']['output'];
+  /** Of all caps and neighbours. */
   readonly worst?: Maybe<WorstCheck>;
+  /** The worst of each kind of check, how many were made and how many exceed. */
+  readonly checks: ReadonlyArray<KindOfCheck>;
+};
+
+export type KindOfCheck = {
+  readonly __typename?: 'KindOfCheck';
+  readonly cap: Scalars['String']['output'];
+  /** The other cap of an angular distortion. */
+  readonly neighbour?: Maybe<Scalars['String']['output']>;
+  readonly check: Scalars['String']['output'];
+  readonly combination: Scalars['String']['output'];
+  readonly utilisation: Scalars['Float']['output'];
+  readonly count: Scalars['Int']['output'];
+  readonly exceeded: Scalars['Int']['output'];
 };
 
 export type WorstCheck = {
   readonly __typename?: 'WorstCheck';
   readonly cap: Scalars['String']['output'];
+  /** The other cap of an angular distortion. */
+  readonly neighbour?: Maybe<Scalars['String']['output']>;
   readonly check: Scalars['String']['output'];
   readonly combination: Scalars['String']['output'];
   readonly utilisation: Scalars['Float']['output'];
@@ -1191,6 +1247,51 @@ export type InputChange = {
   readonly unit?: Maybe<Scalars['String']['output']>;
 };
 
+export type JobState =
+  | 'queued'
+  | 'running'
+  | 'failed'
+  | 'cancelled';
+
+export type JobConnection = {
+  readonly __typename?: 'JobConnection';
+  readonly nodes: ReadonlyArray<Job>;
+  readonly edges: ReadonlyArray<JobEdge>;
+  readonly pageInfo: PageInfo;
+  readonly totalCount: Scalars['Int']['output'];
+};
+
+export type JobEdge = {
+  readonly __typename?: 'JobEdge';
+  readonly cursor: Scalars['String']['output'];
+  readonly node: Job;
+};
+
+/** An assessment that is no record yet, or never will be; this is kept for 30 days. */
+export type Job = {
+  readonly __typename?: 'Job';
+  /** Of the record to come. */
+  readonly id: Scalars['ID']['output'];
+  /** Slug of its project. */
+  readonly projectSlug: Scalars['String']['output'];
+  /** queued | running | failed | cancelled */
+  readonly state: Scalars['String']['output'];
+  readonly createdAt: Scalars['String']['output'];
+  /** When it was begun last. */
+  readonly startedAt?: Maybe<Scalars['String']['output']>;
+  readonly finishedAt?: Maybe<Scalars['String']['output']>;
+  readonly actor: Scalars['String']['output'];
+  readonly actorKey?: Maybe<Scalars['String']['output']>;
+  /** How often it was begun. */
+  readonly attempts: Scalars['Int']['output'];
+  /** Caps that are through. */
+  readonly done: Scalars['Int']['output'];
+  /** Of so many; null until the schedule has been read. */
+  readonly caps?: Maybe<Scalars['Int']['output']>;
+  /** Why there is no record: a problem document. */
+  readonly problem?: Maybe<Scalars['JSON']['output']>;
+};
+
 
 
 export type ResolverTypeWrapper<T> = Promise<T> | T;
@@ -1283,6 +1384,8 @@ export type ResolversTypes = {
   String: ResolverTypeWrapper<Scalars['String']['output']>;
   Boolean: ResolverTypeWrapper<Scalars['Boolean']['output']>;
   ID: ResolverTypeWrapper<Scalars['ID']['output']>;
+  Subscription: ResolverTypeWrapper<Record<PropertyKey, never>>;
+  AssessmentProgress: ResolverTypeWrapper<AssessmentProgress>;
   SinglePileRequestInput: SinglePileRequestInput;
   GroupRequestInput: GroupRequestInput;
   SettlementRequestInput: SettlementRequestInput;
@@ -1348,6 +1451,7 @@ export type ResolversTypes = {
   WorstCheckAggregate: ResolverTypeWrapper<WorstCheckAggregate>;
   Assessment: ResolverTypeWrapper<ShownRecord>;
   Summary: ResolverTypeWrapper<Summary>;
+  KindOfCheck: ResolverTypeWrapper<KindOfCheck>;
   WorstCheck: ResolverTypeWrapper<WorstCheck>;
   CapAggregates: ResolverTypeWrapper<AggregateNode>;
   CapAggregate: ResolverTypeWrapper<CapAggregate>;
@@ -1372,6 +1476,10 @@ export type ResolversTypes = {
   LoneCap: ResolverTypeWrapper<LoneCap>;
   NeighbourChange: ResolverTypeWrapper<NeighbourChange>;
   InputChange: ResolverTypeWrapper<InputChange>;
+  JobState: JobState;
+  JobConnection: ResolverTypeWrapper<JobConnectionNode>;
+  JobEdge: ResolverTypeWrapper<Omit<JobEdge, 'node'> & { node: ResolversTypes['Job'] }>;
+  Job: ResolverTypeWrapper<ShownJob>;
 };
 
 /** Mapping between all available schema types and the resolvers parents */
@@ -1386,6 +1494,8 @@ export type ResolversParentTypes = {
   String: Scalars['String']['output'];
   Boolean: Scalars['Boolean']['output'];
   ID: Scalars['ID']['output'];
+  Subscription: Record<PropertyKey, never>;
+  AssessmentProgress: AssessmentProgress;
   SinglePileRequestInput: SinglePileRequestInput;
   GroupRequestInput: GroupRequestInput;
   SettlementRequestInput: SettlementRequestInput;
@@ -1448,6 +1558,7 @@ export type ResolversParentTypes = {
   WorstCheckAggregate: WorstCheckAggregate;
   Assessment: ShownRecord;
   Summary: Summary;
+  KindOfCheck: KindOfCheck;
   WorstCheck: WorstCheck;
   CapAggregates: AggregateNode;
   CapAggregate: CapAggregate;
@@ -1472,6 +1583,9 @@ export type ResolversParentTypes = {
   LoneCap: LoneCap;
   NeighbourChange: NeighbourChange;
   InputChange: InputChange;
+  JobConnection: JobConnectionNode;
+  JobEdge: Omit<JobEdge, 'node'> & { node: ResolversParentTypes['Job'] };
+  Job: ShownJob;
 };
 
 export interface QuantityScalarConfig extends GraphQLScalarTypeConfig<ResolversTypes['Quantity'], any> {
@@ -1499,6 +1613,7 @@ export type QueryResolvers<ContextType = Context, ParentType extends ResolversPa
   project?: Resolver<Maybe<ResolversTypes['Project']>, ParentType, ContextType, RequireFields<QueryProjectArgs, 'slug'>>;
   assessments?: Resolver<ResolversTypes['AssessmentConnection'], ParentType, ContextType, RequireFields<QueryAssessmentsArgs, 'order' | 'first'>>;
   assessment?: Resolver<Maybe<ResolversTypes['Assessment']>, ParentType, ContextType, RequireFields<QueryAssessmentArgs, 'id'>>;
+  jobs?: Resolver<ResolversTypes['JobConnection'], ParentType, ContextType, RequireFields<QueryJobsArgs, 'first'>>;
   singlePile?: Resolver<ResolversTypes['SinglePileAnswer'], ParentType, ContextType, RequireFields<QuerySinglePileArgs, 'request'>>;
   block?: Resolver<ResolversTypes['BlockAnswer'], ParentType, ContextType, RequireFields<QueryBlockArgs, 'request'>>;
   group?: Resolver<ResolversTypes['GroupAnswer'], ParentType, ContextType, RequireFields<QueryGroupArgs, 'request'>>;
@@ -1507,6 +1622,17 @@ export type QueryResolvers<ContextType = Context, ParentType extends ResolversPa
   method?: Resolver<Maybe<ResolversTypes['Method']>, ParentType, ContextType, RequireFields<QueryMethodArgs, 'id'>>;
   sources?: Resolver<ReadonlyArray<ResolversTypes['Source']>, ParentType, ContextType>;
   limits?: Resolver<ResolversTypes['Limits'], ParentType, ContextType>;
+};
+
+export type SubscriptionResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Subscription'] = ResolversParentTypes['Subscription']> = {
+  assessmentProgress?: SubscriptionResolver<ResolversTypes['AssessmentProgress'], "assessmentProgress", ParentType, ContextType, RequireFields<SubscriptionAssessmentProgressArgs, 'id'>>;
+};
+
+export type AssessmentProgressResolvers<ContextType = Context, ParentType extends ResolversParentTypes['AssessmentProgress'] = ResolversParentTypes['AssessmentProgress']> = {
+  id?: Resolver<ResolversTypes['ID'], ParentType, ContextType>;
+  state?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  done?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  caps?: Resolver<Maybe<ResolversTypes['Int']>, ParentType, ContextType>;
 };
 
 export type AnswerResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Answer'] = ResolversParentTypes['Answer']> = {
@@ -1876,10 +2002,22 @@ export type SummaryResolvers<ContextType = Context, ParentType extends Resolvers
   satisfied?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
   exceeded?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
   worst?: Resolver<Maybe<ResolversTypes['WorstCheck']>, ParentType, ContextType>;
+  checks?: Resolver<ReadonlyArray<ResolversTypes['KindOfCheck']>, ParentType, ContextType>;
+};
+
+export type KindOfCheckResolvers<ContextType = Context, ParentType extends ResolversParentTypes['KindOfCheck'] = ResolversParentTypes['KindOfCheck']> = {
+  cap?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  neighbour?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
+  check?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  combination?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  utilisation?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
+  count?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  exceeded?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
 };
 
 export type WorstCheckResolvers<ContextType = Context, ParentType extends ResolversParentTypes['WorstCheck'] = ResolversParentTypes['WorstCheck']> = {
   cap?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  neighbour?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
   check?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   combination?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
   utilisation?: Resolver<ResolversTypes['Float'], ParentType, ContextType>;
@@ -2091,6 +2229,33 @@ export type InputChangeResolvers<ContextType = Context, ParentType extends Resol
   unit?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
 };
 
+export type JobConnectionResolvers<ContextType = Context, ParentType extends ResolversParentTypes['JobConnection'] = ResolversParentTypes['JobConnection']> = {
+  nodes?: Resolver<ReadonlyArray<ResolversTypes['Job']>, ParentType, ContextType>;
+  edges?: Resolver<ReadonlyArray<ResolversTypes['JobEdge']>, ParentType, ContextType>;
+  pageInfo?: Resolver<ResolversTypes['PageInfo'], ParentType, ContextType>;
+  totalCount?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+};
+
+export type JobEdgeResolvers<ContextType = Context, ParentType extends ResolversParentTypes['JobEdge'] = ResolversParentTypes['JobEdge']> = {
+  cursor?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  node?: Resolver<ResolversTypes['Job'], ParentType, ContextType>;
+};
+
+export type JobResolvers<ContextType = Context, ParentType extends ResolversParentTypes['Job'] = ResolversParentTypes['Job']> = {
+  id?: Resolver<ResolversTypes['ID'], ParentType, ContextType>;
+  projectSlug?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  state?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  createdAt?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  startedAt?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
+  finishedAt?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
+  actor?: Resolver<ResolversTypes['String'], ParentType, ContextType>;
+  actorKey?: Resolver<Maybe<ResolversTypes['String']>, ParentType, ContextType>;
+  attempts?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  done?: Resolver<ResolversTypes['Int'], ParentType, ContextType>;
+  caps?: Resolver<Maybe<ResolversTypes['Int']>, ParentType, ContextType>;
+  problem?: Resolver<Maybe<ResolversTypes['JSON']>, ParentType, ContextType>;
+};
+
 export type Resolvers<ContextType = Context> = {
   Quantity?: GraphQLScalarType;
   Varying?: GraphQLScalarType;
@@ -2098,6 +2263,8 @@ export type Resolvers<ContextType = Context> = {
   MethodChoice?: GraphQLScalarType;
   JSON?: GraphQLScalarType;
   Query?: QueryResolvers<ContextType>;
+  Subscription?: SubscriptionResolvers<ContextType>;
+  AssessmentProgress?: AssessmentProgressResolvers<ContextType>;
   Answer?: AnswerResolvers<ContextType>;
   Meta?: MetaResolvers<ContextType>;
   Notice?: NoticeResolvers<ContextType>;
@@ -2142,6 +2309,7 @@ export type Resolvers<ContextType = Context> = {
   WorstCheckAggregate?: WorstCheckAggregateResolvers<ContextType>;
   Assessment?: AssessmentResolvers<ContextType>;
   Summary?: SummaryResolvers<ContextType>;
+  KindOfCheck?: KindOfCheckResolvers<ContextType>;
   WorstCheck?: WorstCheckResolvers<ContextType>;
   CapAggregates?: CapAggregatesResolvers<ContextType>;
   CapAggregate?: CapAggregateResolvers<ContextType>;
@@ -2166,4 +2334,7 @@ export type Resolvers<ContextType = Context> = {
   LoneCap?: LoneCapResolvers<ContextType>;
   NeighbourChange?: NeighbourChangeResolvers<ContextType>;
   InputChange?: InputChangeResolvers<ContextType>;
+  JobConnection?: JobConnectionResolvers<ContextType>;
+  JobEdge?: JobEdgeResolvers<ContextType>;
+  Job?: JobResolvers<ContextType>;
 };

@@ -8,7 +8,7 @@ import { methods, sources } from './lists.ts'
 import { plainInput } from './plain-input.ts'
 import type { Resolvers } from './resolver-types.ts'
 import { scalars } from './scalars.ts'
-import { storedQueries, storedTypes } from './stored.ts'
+import { storedQueries, storedSubscriptions, storedTypes } from './stored.ts'
 import { traceWanted } from './trace-wanted.ts'
 
 /** The operations answer in the contract's own shapes, held to the schema by the compiler: no field needs a resolver. */
@@ -32,5 +32,5 @@ export function resolvers(bodyBytes: number): Resolvers {
     sources,
     limits: () => ({ depth, aliases, tokens, cost, bodyBytes, layers, pilesPerCap }),
   }
-  return { ...scalars, ...storedTypes, Query: guarded('Query', query) }
+  return { ...scalars, ...storedTypes, Subscription: storedSubscriptions, Query: guarded('Query', query) }
 }

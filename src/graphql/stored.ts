@@ -10,16 +10,18 @@ import {
   sumAssessments,
   timeOf,
 } from '../operations/find-assessments.ts'
+import { countJobs, findJobs, type JobFilter, jobList } from '../operations/find-jobs.ts'
 import { listChanges } from '../operations/list-changes.ts'
 import { countProjects, getProject, listProjects, projectList } from '../operations/list-projects.ts'
 import { type CapFilter, type CapPosition, capList } from '../operations/read-caps.ts'
 import { type NeighbourPosition, neighbourList } from '../operations/read-many.ts'
-import { ownRecord } from '../operations/rights.ts'
+import { needScope, ownAssessment, ownRecord } from '../operations/rights.ts'
 import { showRecord } from '../operations/show-record.ts'
+import { watchJob } from '../operations/watch-job.ts'
 import { askedPage, connectionFields, connectionOf } from './connection.ts'
 import type { CapConnectionNode } from './nodes.ts'
 import { plainInput } from './plain-input.ts'
-import type { Resolvers } from './resolver-types.ts'
+import type { Resolvers, Trace } from './resolver-types.ts'
 
 /** Arguments without those that are null: clients send null for "not given". */
 const given = <T extends object>(args: T) => plainInput(args) as { [K in keyof T]?: NonNullable<T[K]> }
@@ -34,6 +36,10 @@ function knownCheck(filter: CapFilter): CapFilter {
   if (check !== undefined && !checkKinds.some((kind) => kind === check))
     throw new Problem('bad-query', { field: 'check', expected: checkKinds.join(' or '), got: check })
   return filter
+}
+
+async function* mapped<A, B>(events: AsyncIterable<A>, map: (event: A) => B): AsyncGenerator<B> {
+  for await (const event of events) yield map(event)
 }
 
 /** Fields of Query that read what is stored. */
@@ -54,11 +60,36 @@ export const storedQueries = {
     return { ...connectionOf(list, rows, limit, total), sums: () => sumAssessments(office, actor, filter) }
   },
   assessment: async (_parent, { id }, { actor, office }) => showRecord(await ownRecord(office, actor, id)),
+  jobs: async (_parent, args, { actor, office }) => {
+    const { first, after, ...rest } = given(args)
+    const filter: JobFilter = timed(rest)
+    const list = jobList(filter)
+    const { limit, page } = askedPage<string>(list, { first, after })
+    const rows = (await findJobs(office, actor, filter, page)).map((row) => ({ ...row, position: row.id }))
+    return connectionOf(list, rows, limit, () => countJobs(office, actor, filter))
+  },
 } satisfies Resolvers['Query']
+
+export const storedSubscriptions = {
+  assessmentProgress: {
+    subscribe: async (_parent, { id }, { actor, office }) => {
+      needScope(actor, 'read')
+      // Refused before the stream begins: within it a refusal would end the socket.
+      await ownAssessment(office, actor, id)
+      return mapped(watchJob(office, actor, id), (assessmentProgress) => ({ assessmentProgress }))
+    },
+  },
+} satisfies Resolvers['Subscription']
 
 /** Fields of what is stored that are asked for apart. */
 export const storedTypes = {
   ProjectConnection: connectionFields(),
+  JobConnection: connectionFields(),
+  Job: {
+    projectSlug: ({ project }) => project,
+    done: ({ progress }) => progress.done,
+    caps: ({ progress }) => progress.caps,
+  },
   AssessmentConnection: { ...connectionFields(), aggregates: ({ sums }) => sums() },
   CapConnection: connectionFields(),
   NeighbourConnection: connectionFields(),
@@ -112,9 +143,7 @@ export const storedTypes = {
   },
   Cap: {
     checks: ({ assessment, ordinal }, _args, { loaders }) => loaders.checks.load({ record: assessment, cap: ordinal }),
-    trace: async ({ assessment, ordinal }, _args, { loaders }) => {
-      const text = await loaders.trace.load({ record: assessment, cap: ordinal })
-      return text === null ? null : JSON.parse(text)
-    },
+    trace: async ({ assessment, ordinal }, _args, { loaders }) =>
+      (await loaders.trace.load({ record: assessment, cap: ordinal })) as Trace | null,
   },
 } satisfies Resolvers

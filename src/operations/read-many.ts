@@ -139,16 +139,7 @@ export async function checksOf({ store }: Reading, keys: readonly many.CapKey[])
   const shown = grouped(await many.checksOf(store, keys), (row) => capKey(row.record, row.cap), showCheck)
   return keys.map(({ record, cap }) => shown(capKey(record, cap)))
 }
-/** Traces as JSON. */
-export async function tracesOf({ store }: Reading, keys: readonly many.CapKey[]) {
-  const rows = await many.tracesOf(store, keys)
-  const at = lookedUp(
-    rows,
-    (row) => capKey(row.record, row.cap),
-    (row) => row.text,
-  )
-  return keys.map(({ record, cap }) => at(capKey(record, cap)))
-}
+export const tracesOf = ({ store }: Reading, keys: readonly many.CapKey[]) => many.tracesOf(store, keys)
 
 export const neighbourList = (id: string, filter: NeighbourFilter, order: NeighbourOrder): string =>
   listName('neighbours', id, { ...filter, order })

@@ -18,7 +18,7 @@ export type Hold = { readonly id: string; readonly runner: string }
 export type PackedText = { readonly schedule: Uint8Array; readonly loads?: Uint8Array }
 export type Claimed = { readonly job: Job; readonly hold: Hold; readonly text: PackedText }
 
-const columns = [
+export const jobColumns = [
   'id',
   'project',
   'state',
@@ -87,7 +87,7 @@ export async function addJob(
 }
 
 export const findJob = (store: Store, id: string): Promise<Job | undefined> =>
-  store.reader.selectFrom('jobs').select(columns).where('id', '=', id).executeTakeFirst()
+  store.reader.selectFrom('jobs').select(jobColumns).where('id', '=', id).executeTakeFirst()
 
 /** The job that has waited longest, but for those in `but`. */
 export async function nextJob(store: Store, but: readonly string[]): Promise<string | undefined> {
@@ -114,7 +114,7 @@ export async function claimJob(store: Store, id: string): Promise<Claimed | unde
     }))
     .where('id', '=', id)
     .where('state', 'in', ['queued', 'running'])
-    .returning([...columns, 'schedule', 'loads'])
+    .returning([...jobColumns, 'schedule', 'loads'])
     .executeTakeFirst()
   if (!row) return undefined
   const { schedule, loads, ...job } = row

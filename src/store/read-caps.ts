@@ -1,7 +1,7 @@
 import { joinTrace, type Trace, type TracePart } from '../engine/index.ts'
 import { unpack } from './blobs.ts'
 import type { Store } from './open-store.ts'
-import type { CheckRow, NeighbourRow } from './tables.ts'
+import type { CheckRow } from './tables.ts'
 
 /** One cap with its part of the result as canonical JSON. */
 export async function findCap(store: Store, record: string, mark: string) {
@@ -27,9 +27,6 @@ export function listChecks(store: Store, record: string, caps?: readonly number[
   if (caps) query = query.where('cap', 'in', [...caps, -1])
   return query.orderBy('cap').orderBy('check_kind').execute()
 }
-
-export const listNeighbours = (store: Store, record: string): Promise<NeighbourRow[]> =>
-  store.reader.selectFrom('neighbours').selectAll().where('record', '=', record).orderBy('ordinal').execute()
 
 async function tracePart({ reader }: Store, record: string, part: number): Promise<TracePart | undefined> {
   const row = await reader

@@ -1,3 +1,4 @@
+import { joinTrace, type Trace, type TracePart } from '../engine/index.ts'
 import { unpack } from './blobs.ts'
 import type { RankedCap } from './cap-pages.ts'
 import type { Store } from './open-store.ts'
@@ -61,8 +62,8 @@ export const checksOf = ({ reader }: Store, keys: readonly CapKey[]): Promise<Ch
     .orderBy('check_kind')
     .execute()
 
-/** Traces as JSON. */
-export async function tracesOf({ reader }: Store, keys: readonly CapKey[]) {
+/** Parts of traces, as they lie in the store. */
+async function traceParts({ reader }: Store, keys: readonly CapKey[]) {
   const rows = await reader
     .selectFrom('traces')
     .selectAll()
@@ -70,7 +71,31 @@ export async function tracesOf({ reader }: Store, keys: readonly CapKey[]) {
       or(byRecord(keys).map(([record, caps]) => and([eb('record', '=', record), eb('cap', 'in', caps)]))),
     )
     .execute()
-  return rows.map(({ record, cap, trace }) => ({ record, cap, text: unpack(trace) }))
+  return rows.map(({ record, cap, trace }) => ({ record, cap, part: JSON.parse(unpack(trace)) as TracePart }))
+}
+
+/** The traces of caps, each put together from its own part and those that it shares with others: a call for each step of the sharing. */
+export async function tracesOf(store: Store, keys: readonly CapKey[]): Promise<readonly (Trace | null)[]> {
+  const place = ({ record, cap }: CapKey) => `${record}/${cap}`
+  const parts = new Map<string, TracePart>()
+  for (let ahead = keys; ahead.length > 0; ) {
+    const found = await traceParts(store, ahead)
+    for (const { part, ...key } of found) parts.set(place(key), part)
+    const used = found.flatMap(({ record, part }) => part.uses.map((cap) => ({ record, cap })))
+    const next = new Map(used.filter((key) => !parts.has(place(key))).map((key) => [place(key), key]))
+    ahead = [...next.values()]
+  }
+  return keys.map((key) => {
+    const own = new Map<number, TracePart>()
+    const collect = (cap: number): void => {
+      const part = parts.get(place({ record: key.record, cap }))
+      if (!part || own.has(cap)) return
+      own.set(cap, part)
+      for (const other of part.uses) collect(other)
+    }
+    collect(key.cap)
+    return own.has(key.cap) ? joinTrace([...own].sort(([a], [b]) => a - b).map(([, part]) => part)) : null
+  })
 }
 
 export const signaturesOf = ({ reader }: Store, records: readonly string[]): Promise<SignatureRow[]> =>

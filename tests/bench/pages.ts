@@ -49,7 +49,7 @@ export function pages(): Finding[] {
   const finding = (what: string, name: keyof typeof bytes, most?: { ms: number; bytes: number }): Finding => {
     const ms = median(us[name]) / 1e3
     return {
-      part: 'g',
+      part: 'i',
       what,
       value: `${time(median(us[name]))}, ${Math.round(bytes[name] / 1e3)} kB`,
       ...(most && {

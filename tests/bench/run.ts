@@ -13,7 +13,8 @@ const parts: Readonly<Record<string, () => Promise<readonly Finding[]>>> = {
     ...(await (await import('./overload.ts')).overload()),
   ],
   f: async () => (await import('./records.ts')).records(),
-  g: async () => (await import('./pages.ts')).pages(),
+  g: async () => (await import('./dashboards.ts')).dashboards(),
+  i: async () => (await import('./pages.ts')).pages(),
 }
 
 const print = (line: string) => process.stdout.write(`${line}\n`)
