@@ -18,7 +18,7 @@ function teller({ port }: Telling): Told {
   let next = 0
   return (done, caps) => {
     const now = performance.now()
-    if (!port || now < next) return
+    if (!port || (now < next && done < caps)) return
     next = now + RATE
     port.postMessage({ done, caps } satisfies Progress)
   }
