@@ -53,8 +53,8 @@ const lines = ({ log }: Started) =>
     .filter((line) => line.includes('"msg":"job"'))
     .map((line) => JSON.parse(line) as { job: string; state: string; traceId: string; attempt: number })
 
-const JOBS = 8
-const slow = slowSchedule(40)
+const JOBS = 6
+const slow = slowSchedule(30)
 
 describe.each(bothDatabases())('on $name', (database) => {
   test(
