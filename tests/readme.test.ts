@@ -80,12 +80,15 @@ async function isThere(program: string): Promise<boolean> {
 const [curl, python] = await Promise.all([isThere('curl'), isThere('python3')])
 
 test('every block is of a language that is run here, and names the address that is replaced', () => {
-  expect(blocks.map((block) => block.language)).toEqual(['sh', 'sh', 'ts', 'python', 'sh', 'sh', 'sh', 'python'])
+  expect(blocks.map((block) => block.language)).toEqual([
+    ...['sh', 'sh', 'ts', 'python', 'sh', 'sh', 'sh', 'sh', 'python', 'sh'],
+  ])
   for (const block of blocks) expect(block.text, block.title).toContain(inReadme)
 })
 
 const stored = (block: { text: string }) => block.text.includes('/projects/')
-const calculating = of('sh').filter((block) => !stored(block))
+const dashboard = (block: { text: string }) => block.text.includes('/graphql')
+const calculating = of('sh').filter((block) => !stored(block) && !dashboard(block))
 test.runIf(curl).for(calculating.map((block) => [block.title, block] as const))('sh, %s', async ([, block]) => {
   const { result, trace } = json(await output('sh', ['-euc', here(block.text)]))
   expect(trace).toBeUndefined()
@@ -114,16 +117,29 @@ test.for(of('ts').map((block) => [block.title, block] as const))('ts, %s: its ty
 })
 
 test.runIf(curl)('sh: a project is made, and a schedule kept in it once, however often it is sent', async () => {
-  const [make, post, queue] = of('sh')
+  const [make, post, again, queue] = of('sh')
     .filter(stored)
     .map((block) => here(block.text))
   expect(json(await output('sh', ['-euc', make!]))).toMatchObject({ slug: 'quay', revision: 0 })
   const record = json(await output('sh', ['-euc', post!]))
   expect(record).toMatchObject({ project: 'quay', revision: 1, summary: schedule.summary })
   expect(json(await output('sh', ['-euc', post!]))).toEqual(record)
+  expect(json(await output('sh', ['-euc', again!]))).toMatchObject({ project: 'quay', revision: 2 })
+  const [page] = of('sh').filter(dashboard)
+  const { data, errors } = json(await output('sh', ['-euc', here(page!.text)]))
+  expect(errors).toBeUndefined()
+  const { latest } = data.project
+  expect([latest.revision, latest.caps.totalCount]).toEqual([2, latest.summary.exceeded])
+  expect(latest.changes).toMatchObject({
+    verdicts: [
+      { cap: 'A3', check: 'pile-compression', turned: 'exceeded' },
+      { cap: 'A3', check: 'group-compression', turned: 'exceeded' },
+    ],
+    inputs: [{ name: 'A3', combination: 'W1', field: 'Fz', before: 3630, after: 4100, unit: 'kN' }],
+  })
   const followed = await output('sh', ['-euc', queue!])
   expect(followed).toMatch(/^event: (progress|completed)\ndata: /)
-  expect(json(followed.trim().split('\n').at(-1)!)).toMatchObject({ state: 'completed', revision: 2 })
+  expect(json(followed.trim().split('\n').at(-1)!)).toMatchObject({ state: 'completed', revision: 3 })
 })
 
 test.runIf(python)('python: the hashes of a project are recomputed, and a changed one is seen', async () => {
