@@ -4,5 +4,5 @@
  */
 export function csvText(value: string): string {
   const safe = /^\s*[=+\-@]|^[\t\r\n]/.test(value) ? `'${value}` : value
-  return /[",\r\n]/.test(safe) || safe !== value ? `"${safe.replaceAll('"', '""')}"` : safe
+  return /[",\r\n]/.test(safe) ? `"${safe.replaceAll('"', '""')}"` : safe
 }
