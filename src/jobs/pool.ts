@@ -1,4 +1,5 @@
-import { MessageChannel, type MessagePort } from 'node:worker_threads'
+import { setPriority } from 'node:os'
+import { isMainThread, MessageChannel, type MessagePort } from 'node:worker_threads'
 import { Piscina } from 'piscina'
 import { Problem } from '../errors.ts'
 
@@ -21,6 +22,11 @@ export type PoolOptions = {
   readonly queue: number
   readonly seconds: number
 }
+
+/** So much a thread stands back behind the event loop where both want a processor. */
+const NICE = 5
+// On Linux a thread has a priority of its own; elsewhere this would be that of the process.
+if (!isMainThread && process.platform === 'linux') setPriority(NICE)
 
 /** In a thread: what `compute` gives, or the problem that it throws, told so that it survives the way. */
 export function outcomeOf<Answer>(compute: () => Answer): Answer | Refusal {
