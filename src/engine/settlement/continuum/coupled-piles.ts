@@ -99,7 +99,7 @@ export class CoupledPiles {
     const [n, m] = [this.#n, this.#m]
     const b = heads.map((w) => Float64Array.from({ length: n * m }, (_, i) => w[Math.floor(i / m)]!))
     const q = heads.map(() => new Float64Array(n * m))
-    const solved = conjugateGradient((x, y) => timesPacked(this.#packed, n * m, x, y), this.#precondition, b, q, 1e-12)
+    const solved = conjugateGradient((x, y) => timesPacked(this.#packed, n * m, x, y), this.#precondition, b, q, 1e-11)
     if (!solved) return refuse('not-finite', '/layout', { symbol: 'group flexibility' })
     const loads = q.map((forces) => {
       const out = new Float64Array(n)
