@@ -2,12 +2,15 @@
 export type Operator = (x: readonly Float64Array[], y: readonly Float64Array[]) => void
 export type Preconditioner = (r: Float64Array, z: Float64Array) => void
 
+/** Rounding may stop a residual above its tolerance; above this it is no answer. */
+const ACCEPTED = 1e-9
+
 export type Solved = { readonly steps: number; readonly residual: number }
 
 /**
  * Preconditioned conjugate gradients for several right-hand sides in step, so that a product reads the matrix once for all.
  * Solutions come in `x` (zero at the start). Ends when every residual is below `tolerance` of its right-hand side;
- * undefined when a direction shows that the matrix is not positive definite.
+ * undefined when a direction shows that the matrix is not positive definite, or when the steps end above `ACCEPTED`.
  */
 export function conjugateGradient(
   multiply: Operator,
@@ -50,7 +53,7 @@ export function conjugateGradient(
     }
     residual = left()
   }
-  return { steps, residual }
+  return residual <= ACCEPTED ? { steps, residual } : undefined
 }
 
 export function dot(a: Float64Array, b: Float64Array): number {

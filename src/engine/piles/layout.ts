@@ -12,13 +12,16 @@ export type Layout =
   | { readonly kind: 'ring'; readonly count: number; readonly radius: number }
   | { readonly kind: 'points'; readonly points: readonly Point[] }
 
+/** A cosine or sine of rounding only is that of a pile on an axis. */
+const onAxis = (value: number): number => (Math.abs(value) < 1e-15 ? 0 : value)
+
 /** Positions in the layout's order: a grid runs along x first and is centred; a ring starts on the +x axis and turns towards +y. */
 export function positions(layout: Layout): readonly Point[] {
   if (layout.kind === 'points') return layout.points
   if (layout.kind === 'ring') {
     return Array.from({ length: layout.count }, (_, i) => {
       const angle = (2 * Math.PI * i) / layout.count
-      return { x: layout.radius * Math.cos(angle), y: layout.radius * Math.sin(angle) }
+      return { x: layout.radius * onAxis(Math.cos(angle)), y: layout.radius * onAxis(Math.sin(angle)) }
     })
   }
   const { columns, rows } = layout

@@ -10,8 +10,8 @@ import { type ElasticGroup, elasticGroup, type Plane, superposed } from './group
 import type { PilePlace } from './pile-places.ts'
 import type { PileResponse } from './pile-response.ts'
 import { groupResponse, type PreparedGroup, prepareFrom } from './prepared-group.ts'
-import { groupCurve, softPlane, softSettlements } from './soft-group.ts'
-import { curveTerms, type Softening } from './softening.ts'
+import { SOFT_SOLVE, SOFT_TOLERANCE, softCurve, softPlane, softSettlements } from './soft-group.ts'
+import type { Softening } from './softening.ts'
 
 export const planeSettlement = formula({
   symbol: 's',
@@ -87,7 +87,7 @@ export function groupSettlement(sheet: Sheet, job: GroupJob) {
     tilt,
     ...spread,
     piles: job.places.map((p, i) => ({ x: p.x, y: p.y, ...piles[i]! })),
-    curve: job.soft && groupCurveTerms(sheet, job, prepared, job.soft),
+    curve: job.soft && job.cap === 'rigid' ? softCurve(sheet, job, prepared, job.soft) : undefined,
     stiffness: capStiffness(sheet, prepared),
   }
 }
@@ -105,7 +105,7 @@ function movement(sheet: Sheet, job: GroupJob, prepared: PreparedGroup) {
   }
   const { plane, loads, residual } = softPlane(elastic, pile, soft, asked, pointer)
   const { x, y } = elastic.centroid
-  const method = 'rigid plane on softening piles, elastic between them; Newton'
+  const method = SOFT_SOLVE
   const term = <const U extends 'mm' | '1'>(symbol: string, name: string, unit: U, value: number) =>
     sheet.solution({
       symbol,
@@ -116,7 +116,7 @@ function movement(sheet: Sheet, job: GroupJob, prepared: PreparedGroup) {
       operands: [load.V, load.Mx, load.My, ...soft.operands, ...prepared.basis],
       unknowns: unknownsOf(plane),
       residuals: [{ name: 'change of the last step, relative', value: residual }],
-      tolerance: 1e-6,
+      tolerance: SOFT_TOLERANCE,
       source: pile.source,
     })
   return {
@@ -173,18 +173,6 @@ function rigid(sheet: Sheet, job: GroupJob, prepared: PreparedGroup) {
     tilt: { alongX: theta_x, alongY: theta_y },
     piles,
   }
-}
-
-/** Load-settlement curve of the group under a rigid cap. */
-function groupCurveTerms(
-  sheet: Sheet,
-  { pile, load, cap }: GroupJob,
-  { elastic, basis }: PreparedGroup,
-  soft: Softening,
-) {
-  if (cap === 'flexible') return undefined
-  const asked = { V: load.V.value, Mx: load.Mx.value, My: load.My.value }
-  return curveTerms(sheet.within('curve'), groupCurve(elastic, pile, soft, asked), [...soft.operands, ...basis])
 }
 
 /** A flexible cap hands each pile its share by statics; the tilt is that of the plane that fits the settlements best. */

@@ -86,22 +86,31 @@ function foldedMatrices(
     }
     // A point on an axis about which the class is odd does not move: it stands alone.
     for (let a = 0; a < n; a++) {
-      const p = points[fold.kept[a]!]!
-      if (!still(p.x, p.y, fold, a, group)) continue
+      if (!still(fold, a, group)) continue
       for (let b = 0; b < n; b++) packed[a >= b ? (a * (a + 1)) / 2 + b : (b * (b + 1)) / 2 + a] = a === b ? 1 : 0
     }
   }
   return out
 }
 
-function still(x: number, y: number, fold: Fold, place: number, sign: { x: number; y: number }): boolean {
-  const count = fold.count[place]!
-  const full = (fold.mirrors.x ? 2 : 1) * (fold.mirrors.y ? 2 : 1)
-  if (count === full) return false
-  const onX = fold.mirrors.x && Math.abs(x) <= 1e-7 * (Math.abs(y) + Math.abs(x)) + 1e-12
-  const onY = fold.mirrors.y && Math.abs(y) <= 1e-7 * (Math.abs(y) + Math.abs(x)) + 1e-12
-  const both = count === 1 && full === 4
-  return (sign.x < 0 && (onX || both)) || (sign.y < 0 && (onY || both))
+/** Whether a kept point lies on a mirror axis about which the class is odd. */
+const still = ({ onX, onY }: Fold, place: number, sign: { x: number; y: number }): boolean =>
+  (sign.x < 0 && onX[place]!) || (sign.y < 0 && onY[place]!)
+
+function largestResidual(
+  packed: Float64Array,
+  n: number,
+  x: readonly Float64Array[],
+  b: readonly Float64Array[],
+): number {
+  const product = x.map(() => new Float64Array(n))
+  timesPacked(packed, n, x, product)
+  let most = 0
+  for (const [s, side] of b.entries()) {
+    const size = side.reduce((m, v) => Math.max(m, Math.abs(v)), 0)
+    for (let i = 0; i < n; i++) most = Math.max(most, Math.abs(product[s]![i]! - side[i]!) / size)
+  }
+  return most
 }
 
 function solveClass(points: readonly Point[], fold: Fold, packed: Float64Array, rhs: readonly Float64Array[]) {
@@ -117,7 +126,7 @@ function solveClass(points: readonly Point[], fold: Fold, packed: Float64Array, 
       solveFactored(full, n, s)
       return s
     })
-    return { x, residual: 0, steps: 0 }
+    return { x, residual: largestResidual(packed, n, x, rhs), steps: 0 }
   }
   const xs = Float64Array.from(fold.kept, (k) => points[k]!.x)
   const ys = Float64Array.from(fold.kept, (k) => points[k]!.y)

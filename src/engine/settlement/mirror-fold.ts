@@ -9,6 +9,9 @@ export type Fold = {
   readonly of: Int32Array
   /** How many points each kept one stands for. */
   readonly count: Float64Array
+  /** Whether each kept point lies on a mirror axis: its x, its y is 0. */
+  readonly onX: readonly boolean[]
+  readonly onY: readonly boolean[]
 }
 
 /** Coordinates are compared in units of this share of the layout's extent: a little above their rounding. */
@@ -46,11 +49,12 @@ function attempt(points: readonly Point[], allowed: boolean): Fold | undefined {
     of[i] = place
     count[place]!++
   }
+  const onX = kept.map((i) => mirrors.x && round(points[i]!.x) === 0)
+  const onY = kept.map((i) => mirrors.y && round(points[i]!.y) === 0)
   // Rounding can split a mirror pair; then the layout is taken as it is.
-  const whole = kept.every((i, place) => {
-    const [onX, onY] = [round(points[i]!.x) === 0, round(points[i]!.y) === 0]
-    return count[place] === (mirrors.x && !onX ? 2 : 1) * (mirrors.y && !onY ? 2 : 1)
-  })
+  const whole = kept.every(
+    (_, place) => count[place] === (mirrors.x && !onX[place] ? 2 : 1) * (mirrors.y && !onY[place] ? 2 : 1),
+  )
   if (!whole && allowed) return undefined
-  return { mirrors, kept: Int32Array.from(kept), of, count: Float64Array.from(count) }
+  return { mirrors, onX, onY, kept: Int32Array.from(kept), of, count: Float64Array.from(count) }
 }

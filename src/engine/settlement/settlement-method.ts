@@ -24,5 +24,11 @@ export function pileResponse(
   at: SettlementPlaces,
   notice: (n: Notice) => void,
 ): PileResponse {
+  if (method === undefined)
+    notice({
+      code: 'default-used',
+      level: 'info',
+      text: `settlement: ${usualSettlementMethod} was used. Default for settlements.`,
+    })
   return methods[method ?? usualSettlementMethod](sheet, pile, ground, at, notice)
 }

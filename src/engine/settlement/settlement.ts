@@ -14,7 +14,7 @@ import { groupSettlement } from './group-settlement.ts'
 import { pilePlaces } from './pile-places.ts'
 import type { PileResponse, SettlementPlaces } from './pile-response.ts'
 import { pileResponse } from './settlement-method.ts'
-import { curveTerms, softening, type UltimateTerms } from './softening.ts'
+import { curveTerms, pileCurveWay, softening, type UltimateTerms } from './softening.ts'
 
 export const loadPerPile = formula({
   symbol: 'P',
@@ -49,6 +49,7 @@ export function settlement(
   notice: (n: Notice) => void,
   resistance: UltimateTerms | undefined,
 ) {
+  assertUsed(request)
   const pile = pileResponse(sheet, request.method, request.pile, request.ground, at, notice)
   const load = loadTerms(sheet, request, at.load)
   const places = request.layout && pilePlaces(sheet.within('group'), request.layout, at.layout)
@@ -68,7 +69,7 @@ export function settlement(
     baseLoadShare: pile.baseLoadShare,
     influenceFactor: sheet.step(influenceFactorOf, { E_s: pile.toeModulus, d: pile.width, k: pile.stiffness }),
     ...(axial && { axial }),
-    ...(soft && { curve: curveTerms(sheet.within('curve'), soft.curve, soft.operands) }),
+    ...(soft && { curve: curveTerms(sheet.within('curve'), soft.curve, pileCurveWay(soft.operands)) }),
   }
   if (!request.layout || !places) return { single }
   const points = places.map((p) => ({ x: p.x.value, y: p.y.value }))
@@ -89,6 +90,17 @@ export function settlement(
       pointer: at.load,
     }),
   }
+}
+
+/** What only softening reads is refused where nothing softens: it would vanish. */
+function assertUsed(request: SettlementRequest): void {
+  if (request.nonlinearity) return
+  for (const name of ['failureRatio', 'methods'] as const)
+    if (request[name])
+      refuse('method-not-applicable', `/${name}`, {
+        method: 'elastic-continuum',
+        reason: `${name} is read with nonlinearity "hyperbolic" only: add it, or leave ${name} out`,
+      })
 }
 
 /** So many piles may be coupled element by element. */

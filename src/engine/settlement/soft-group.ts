@@ -1,16 +1,21 @@
 import { refuse } from '../faults.ts'
+import type { CapTerms } from '../piles/pile-plan.ts'
+import type { Sheet } from '../trace/sheet.ts'
 import { pushGroup } from './continuum/hyperbolic-group.ts'
 import type { CurvePoint } from './continuum/hyperbolic-pile.ts'
 import type { CapLoad, ElasticGroup, Plane } from './group.ts'
 import type { PileResponse } from './pile-response.ts'
 import { planeModes } from './plane-modes.ts'
-import type { Softening } from './softening.ts'
+import type { PreparedGroup } from './prepared-group.ts'
+import { curveTerms, type Softening } from './softening.ts'
 
 /** Newton's method factors n x n at every step: so many piles are solved at once. */
 export const SOFT_PILES = 225
 
 /** A solution is one when a step of Newton changes no load by more than this share of the largest. */
-const FOUND = 1e-6
+export const SOFT_TOLERANCE = 1e-6
+
+export const SOFT_SOLVE = 'rigid plane on softening piles, elastic between them; Newton'
 
 export type SoftPlane = { readonly plane: Plane; readonly loads: Float64Array; readonly residual: number }
 
@@ -60,7 +65,7 @@ function tryPlane(
     modes.map((mode) => Float64Array.from(x, (xi, i) => mode.v + mode.x * xi + mode.y * y[i]!)),
     modes.map((mode) => mode.v * about.V + mode.x * about.My + mode.y * about.Mx),
   )
-  if (!(residual < FOUND)) return undefined
+  if (!(residual < SOFT_TOLERANCE)) return undefined
   const part = (name: 'v' | 'x' | 'y') => modes.reduce((sum, mode, a) => sum + mode[name] * movement[a]!, 0)
   return { plane: { centre: part('v'), alongX: part('x'), alongY: part('y') }, loads, residual }
 }
@@ -85,15 +90,31 @@ export function softSettlements(
 const SHARES = [0.1, 0.2, 0.3, 0.4, 0.5, 0.6, 0.7, 0.8, 0.85, 0.9, 0.94]
 
 /** Settlement at the centroid as the load grows in proportion; ends before a point that is not found. */
-export function groupCurve(group: ElasticGroup, pile: PileResponse, soft: Softening, load: CapLoad): CurvePoint[] {
-  const out: CurvePoint[] = [{ load: 0, settlement: 0 }]
+function groupCurve(group: ElasticGroup, pile: PileResponse, soft: Softening, load: CapLoad): CurvePoint[] {
+  const out: CurvePoint[] = [{ load: 0, settlement: 0, residual: 0 }]
   if (load.V <= 0) return out
   for (const share of SHARES) {
     const V = share * group.points.length * soft.ultimate
     const grown = { V, Mx: (load.Mx * V) / load.V, My: (load.My * V) / load.V }
     const found = tryPlane(group, pile, soft, grown, '')
     if (!found) break
-    out.push({ load: V, settlement: found.plane.centre })
+    out.push({ load: V, settlement: found.plane.centre, residual: found.residual })
   }
   return out
+}
+
+/** Load-settlement curve of the group under a rigid cap, as terms. */
+export function softCurve(
+  sheet: Sheet,
+  { pile, load }: { readonly pile: PileResponse; readonly load: CapTerms },
+  { elastic, basis }: PreparedGroup,
+  soft: Softening,
+) {
+  const points = groupCurve(elastic, pile, soft, { V: load.V.value, Mx: load.Mx.value, My: load.My.value })
+  return curveTerms(sheet.within('curve'), points, {
+    chosen: 'load',
+    method: SOFT_SOLVE,
+    tolerance: SOFT_TOLERANCE,
+    operands: [...soft.operands, ...basis],
+  })
 }

@@ -4,7 +4,7 @@ import { cite, practice } from '../sources/bibliography.ts'
 import type { Sheet } from '../trace/sheet.ts'
 import type { Term } from '../trace/term.ts'
 import { type PileCurve, pileCurve } from './continuum/hyperbolic-group.ts'
-import { type CurvePoint, loadCurve, settlementUnder, type Ultimate } from './continuum/hyperbolic-pile.ts'
+import { type CurvePoint, FOUND, loadCurve, settlementUnder, type Ultimate } from './continuum/hyperbolic-pile.ts'
 import type { PileResponse } from './pile-response.ts'
 
 /** Ultimate resistance of a pile, as the methods of resistance give it. */
@@ -21,7 +21,6 @@ export type UltimateTerms = {
 /** Common practice where a request names no R_f: [practice]. */
 const USUAL = { shaft: 0.5, base: 0.9 } as const
 const SOLVE = "boundary elements whose own springs soften hyperbolically; Newton's method on the element forces"
-const TOLERANCE = 1e-8
 
 export type Softening = {
   readonly operands: readonly Term[]
@@ -93,6 +92,7 @@ export function softening(
           resistance: curve.at(-1)!.load,
           unit: 'kN',
         })
+      if (!(under.residual <= FOUND)) return refuse('not-finite', pointer, { symbol: 's' })
       return here.solution({
         symbol: 's',
         name: 'settlement of the pile head with softening springs',
@@ -106,7 +106,7 @@ export function softening(
           unit: 'kN' as const,
         })),
         residuals: [{ name: 'compatibility and equilibrium, relative', value: under.residual }],
-        tolerance: TOLERANCE,
+        tolerance: FOUND,
         mesh: Array.from(edges),
         source: cite('fleming-1992', 'hyperbolic springs'),
       })
@@ -114,35 +114,53 @@ export function softening(
   }
 }
 
-/** Points of a curve as terms: loads are chosen, settlements found, or the other way round. */
-export function curveTerms(
-  sheet: Sheet,
-  points: readonly CurvePoint[],
-  operands: readonly Term[],
-  residual = 0,
-): { readonly load: Term<'kN'>; readonly settlement: Term<'mm'> }[] {
-  return points.map((p, i) => ({
-    load: sheet.solution(
-      {
-        symbol: 'P',
-        name: 'load of the curve',
-        unit: 'kN',
-        value: p.load,
-        method: SOLVE,
-        operands: i === 0 ? operands : operands.slice(0, 1),
-        unknowns: [{ symbol: 'P', value: p.load, unit: 'kN' }],
-        residuals: [{ name: 'compatibility and equilibrium, relative', value: residual }],
-        tolerance: TOLERANCE,
-        source: cite('fleming-1992', 'hyperbolic springs'),
-      },
-      `${i}/P`,
-    ),
-    settlement: sheet.assumed(
-      { symbol: 's', name: 'settlement of the curve', unit: 'mm' },
-      p.settlement * 1000,
-      'the curve is followed by steps of settlement',
-      practice('points of a curve'),
-      `${i}/s`,
-    ),
-  }))
+/** How the points of a curve were found: the loads for chosen settlements of one pile, or the settlements for chosen loads of a group. */
+export type CurveWay = {
+  readonly chosen: 'load' | 'settlement'
+  readonly method: string
+  readonly tolerance: number
+  readonly operands: readonly Term[]
+}
+
+/** The curve of one pile is followed by steps of settlement. */
+export const pileCurveWay = (operands: readonly Term[]): CurveWay => ({
+  chosen: 'settlement',
+  method: SOLVE,
+  tolerance: FOUND,
+  operands,
+})
+
+/** Points of a curve as terms: what was chosen is a given step, what was found a solution with its residual. */
+export function curveTerms(sheet: Sheet, points: readonly CurvePoint[], way: CurveWay) {
+  return points.map((point, i) => {
+    const term = <const U extends 'kN' | 'mm'>(part: 'load' | 'settlement', symbol: string, unit: U, value: number) => {
+      const label = { symbol, name: `${part} of the curve`, unit } as const
+      const id = `${i}/${symbol}`
+      if (part === way.chosen)
+        return sheet.assumed(
+          label,
+          value,
+          `the curve is followed by steps of ${part}`,
+          practice('points of a curve'),
+          id,
+        )
+      const { method, tolerance, operands } = way
+      return sheet.solution(
+        {
+          ...label,
+          ...{ value, method, tolerance },
+          // All operands stand once, with the first point.
+          operands: i === 0 ? operands : operands.slice(0, 1),
+          unknowns: [{ symbol, value, unit }],
+          residuals: [{ name: 'compatibility and equilibrium, relative', value: point.residual }],
+          source: cite('fleming-1992', 'hyperbolic springs'),
+        },
+        id,
+      )
+    }
+    return {
+      load: term('load', 'P', 'kN', point.load),
+      settlement: term('settlement', 's', 'mm', point.settlement * 1000),
+    }
+  })
 }

@@ -326,7 +326,18 @@ test('softening springs: elastic at small load, softer with more, never less set
   expect(hyperbolic.curve!.length).toBeGreaterThan(6)
 })
 
+test('points of a curve carry the residual that they were found with; the method that nobody named is told', () => {
+  const answer = calculateSettlement({ ...request, nonlinearity: 'hyperbolic' }, { trace: true })
+  const found = answer.trace!.steps.flatMap((s) => (s.kind === 'solution' && s.id.includes('curve/') ? [s] : []))
+  expect(found.some((s) => s.symbol === 'P') && found.some((s) => s.symbol === 's')).toBe(true)
+  expect(found.filter((s) => s.residuals[0]!.value > 0).length).toBeGreaterThan(found.length / 2)
+  expect(found.filter((s) => s.residuals[0]!.value > s.tolerance)).toEqual([])
+  expect(answer.notices.some((n) => n.code === 'default-used' && n.text.includes('elastic-continuum'))).toBe(true)
+})
+
 test('what cannot be answered is refused with its reason', () => {
+  expect(faults({ failureRatio: { shaft: 0.7 } })).toMatchObject([{ pointer: '/failureRatio' }])
+  expect(faults({ methods: {} })).toMatchObject([{ pointer: '/methods' }])
   expect(faults({ layout: { kind: 'grid', columns: 2, rows: 2, spacing: 0.8 } })).toMatchObject([
     { code: 'piles-too-close', pointer: '/layout', facts: { spacing: 0.8 } },
   ])

@@ -3,7 +3,8 @@ import type { SolvedPile } from './single-pile.ts'
 
 /** Ultimate resistance of each element, base last, kN; and how far a hyperbola has come to its asymptote when it is reached. */
 export type Ultimate = { readonly forces: Float64Array; readonly failureRatio: Float64Array }
-export type CurvePoint = { readonly load: number; readonly settlement: number }
+/** kN and m; `residual` of the solve that found the point, relative. */
+export type CurvePoint = { readonly load: number; readonly settlement: number; readonly residual: number }
 export type Pushed = { readonly load: number; readonly forces: Float64Array; readonly residual: number }
 
 /** Newton steps at one settlement of the head. */
@@ -58,8 +59,11 @@ export function pushHead(
   }
   let load = 0
   for (const force of q) load += force
-  return { load, forces: q, residual: Number.isFinite(residual) ? residual : 0 }
+  return { load, forces: q, residual }
 }
+
+/** A point whose elements depart by more than this from the head's movement is not found. */
+export const FOUND = 1e-8
 
 /** Share of the ultimate load up to which a curve is drawn. */
 const LAST = 0.98
@@ -68,7 +72,7 @@ const POINTS = 60
 /** The load-settlement curve (kN, m) from rest to 98 % of the ultimate resistance, or to a settlement of twice the diameter. */
 export function loadCurve(pile: SolvedPile, ground: Float64Array, ultimate: Ultimate): CurvePoint[] {
   const total = ultimate.forces.reduce((s, q) => s + q, 0)
-  const out: CurvePoint[] = [{ load: 0, settlement: 0 }]
+  const out: CurvePoint[] = [{ load: 0, settlement: 0, residual: 0 }]
   let w = (0.02 * total) / pile.stiffness
   let forces: Float64Array = new Float64Array(ground.length)
   const end = 4 * pile.soil.pile.radius
@@ -76,7 +80,8 @@ export function loadCurve(pile: SolvedPile, ground: Float64Array, ultimate: Ulti
   for (let i = 0; i <= POINTS; i++, w *= growth) {
     const pushed = pushHead(pile, ground, ultimate, w, forces)
     forces = pushed.forces
-    out.push({ load: pushed.load, settlement: w })
+    if (pushed.residual > FOUND) break
+    out.push({ load: pushed.load, settlement: w, residual: pushed.residual })
     if (pushed.load >= LAST * total) break
   }
   return out
@@ -97,13 +102,13 @@ export function settlementUnder(
   let pushed: Pushed = { load: low.load, forces: new Float64Array(ground.length), residual: 0 }
   let w = low.settlement
   for (let step = 0; step < 60; step++) {
-    // Illinois: a third of the way where one side keeps standing would stall; a curve this smooth needs halving at most.
+    // Every third step halves: on a bent curve one end of a regula falsi would stand still.
     const share = step % 3 === 2 ? 0.5 : (load - low.load) / (high.load - low.load || 1)
     w = low.settlement + share * (high.settlement - low.settlement)
     pushed = pushHead(pile, ground, ultimate, w, pushed.forces)
     if (Math.abs(pushed.load - load) <= 1e-10 * load) break
-    if (pushed.load < load) low = { load: pushed.load, settlement: w }
-    else high = { load: pushed.load, settlement: w }
+    if (pushed.load < load) low = { ...pushed, settlement: w }
+    else high = { ...pushed, settlement: w }
   }
   return { settlement: w, forces: pushed.forces, residual: Math.max(pushed.residual, Math.abs(pushed.load / load - 1)) }
 }
