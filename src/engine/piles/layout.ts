@@ -32,3 +32,9 @@ export function positions(layout: Layout): readonly Point[] {
     y: (Math.floor(i / columns) - (rows - 1) / 2) * dy,
   }))
 }
+
+/** Centroid of points, each counted once. */
+export function centroidOf(points: readonly Point[]): Point {
+  const n = points.length
+  return { x: points.reduce((s, p) => s + p.x, 0) / n, y: points.reduce((s, p) => s + p.y, 0) / n }
+}

@@ -1,5 +1,5 @@
 import { refuse } from '../faults.ts'
-import type { Point } from './layout.ts'
+import { centroidOf, type Point } from './layout.ts'
 
 /** Pile loads under a rigid cap with pinned heads: P_i = V/n + a x_i + b y_i about the centroid of the piles. */
 export type RigidCap = {
@@ -18,7 +18,7 @@ export const spreads = (xx: number, yy: number, xy: number): boolean => xx * yy 
 /** Prepares a layout once. A line of piles takes no moment about itself: refused with the moment named. */
 export function rigidCap(points: readonly Point[]): RigidCap {
   const n = points.length
-  const centroid = { x: points.reduce((s, p) => s + p.x, 0) / n, y: points.reduce((s, p) => s + p.y, 0) / n }
+  const centroid = centroidOf(points)
   const at = points.map((p) => ({ x: p.x - centroid.x, y: p.y - centroid.y }))
   const [xx, yy, xy] = at.reduce(
     ([a, b, c], p) => [a + p.x * p.x, b + p.y * p.y, c + p.x * p.y] as [number, number, number],

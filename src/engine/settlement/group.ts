@@ -2,10 +2,10 @@ import { refuse } from '../faults.ts'
 import { factor, solveFactored } from '../numerics/cholesky.ts'
 import { tabulate } from '../numerics/tabulate.ts'
 import { smallestSpacing } from '../piles/enclosing-prism.ts'
-import type { Point } from '../piles/layout.ts'
+import { centroidOf, type Point } from '../piles/layout.ts'
 import { type ModeLoads, solveModes } from './kernel-solve.ts'
 import { type Fold, foldOf } from './mirror-fold.ts'
-import { centroidOf, type Mode, planeModes } from './plane-modes.ts'
+import { type Mode, planeModes } from './plane-modes.ts'
 
 /** Loads at the cap's origin: kN and kN.m, pressing signs. */
 export type CapLoad = { readonly V: number; readonly Mx: number; readonly My: number }

@@ -1,5 +1,3 @@
-import type { Point } from '../piles/layout.ts'
-
 /** A way in which a rigid cap moves: the movement is v + x X + y Y at a point (X, Y) from the centroid. */
 export type Mode = { readonly v: number; readonly x: number; readonly y: number }
 
@@ -25,10 +23,4 @@ export function planeModes(x: Float64Array, y: Float64Array, mirrored: boolean):
   if (!(across > least)) return [sinking, { v: 0, ...u }]
   if (mirrored) return [sinking, { v: 0, x: 1, y: 0 }, { v: 0, x: 0, y: 1 }]
   return [sinking, { v: 0, ...u }, { v: 0, x: -u.y, y: u.x }]
-}
-
-/** Centroid of points, each counted once. */
-export function centroidOf(points: readonly Point[]): Point {
-  const n = points.length
-  return { x: points.reduce((s, p) => s + p.x, 0) / n, y: points.reduce((s, p) => s + p.y, 0) / n }
 }
