@@ -2794,7 +2794,7 @@ export interface operations {
                  *         "My": 400
                  *       },
                  *       "cap": "rigid",
-                 *       "method": "randolph-wroth-1978"
+                 *       "method": "elastic-continuum"
                  *     }
                  */
                 readonly "application/json": components["schemas"]["SettlementRequest"];

@@ -137,7 +137,8 @@ describe.skipIf(!available)('pages in the browser', () => {
         expect(sheet).toContain('sha256:')
       }
       const once = lines.filter((l) => lines.filter((o) => o.name === l.name).length === 1)
-      expect(once.length).toBeGreaterThan(30)
+      // Enough of them to stand for the sheet.
+      expect(once.length).toBeGreaterThan(20)
       const broken = once.filter((l) => !sheets.some((s) => s.includes(bare(l.name)) && s.includes(bare(l.foot))))
       expect(broken).toEqual([])
       await page.context().close()
